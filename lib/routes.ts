@@ -1,0 +1,30 @@
+/** Every address of the app that code links to, so that a renamed page breaks the types and not a link. */
+export const routes = {
+  today: () => "/",
+  signIn: (from?: string) => (from ? `/sign-in?from=${encodeURIComponent(from)}` : "/sign-in"),
+  forgotPassword: () => "/forgot-password",
+  resetPassword: (token: string) => `/reset-password/${token}`,
+  acceptInvite: (token: string) => `/invite/${token}`,
+  snap: () => "/cases/snap",
+  queue: () => "/cases/second-look",
+  secondLook: (ref: string) => `/cases/${ref}/second-look`,
+  casebook: (query?: Record<string, string>) => withQuery("/cases", query),
+  case: (ref: string) => `/cases/${ref}`,
+  tag: (ref: string) => `/cases/${ref}/tag`,
+  reworkList: () => "/cases/rework",
+  rework: (ref: string) => `/cases/${ref}/rework`,
+  library: () => "/library",
+  libraryClass: (slug: string) => `/library/${slug}`,
+  ledger: (query?: Record<string, string>) => withQuery("/costs", query),
+  rates: () => "/costs/rates",
+  crew: () => "/crew",
+  audit: () => "/crew/audit",
+  account: () => "/account",
+  outbox: () => "/outbox",
+  photo: (id: string, size: "thumb" | "view" | "original") => `/api/photos/${id}/${size}`,
+} as const;
+
+function withQuery(path: string, query?: Record<string, string>): string {
+  const search = new URLSearchParams(query).toString();
+  return search ? `${path}?${search}` : path;
+}

@@ -1,0 +1,21 @@
+import path from "node:path";
+
+/** Headers for every answer. The photo route adds its own cache rules. */
+const safetyHeaders = [
+  { key: "X-Content-Type-Options", value: "nosniff" },
+  { key: "Referrer-Policy", value: "same-origin" },
+  { key: "X-Frame-Options", value: "DENY" },
+  { key: "Permissions-Policy", value: "camera=(self), microphone=(), geolocation=()" },
+];
+
+/** @type {import("next").NextConfig} */
+const config = {
+  poweredByHeader: false,
+  experimental: { authInterrupts: true },
+  reactStrictMode: true,
+  turbopack: { root: path.resolve(".") },
+  outputFileTracingExcludes: { "/*": ["./uploads/**/*", "./data/**/*", "./backups/**/*", "./tests/**/*"] },
+  headers: async () => [{ source: "/:path*", headers: safetyHeaders }],
+};
+
+export default config;
