@@ -1,0 +1,65 @@
+import type { Role } from "@/lib/cases/case-words";
+import type { GlyphName } from "@/components/ui/glyph-names";
+
+interface PlaceEntry {
+  slug: string;
+  title: string;
+  href: string;
+  glyph: GlyphName;
+  roles: readonly Role[];
+}
+
+/** Where one can go, in the order of the bar. A person with several roles sees the places of all of them. */
+export const PLACES = [
+  { slug: "today", title: "Today", href: "/", glyph: "mark", roles: ["plater", "trainee", "senior", "owner"] },
+  { slug: "snap", title: "Snap", href: "/cases/snap", glyph: "ui-camera", roles: ["plater", "trainee"] },
+  {
+    slug: "second-look",
+    title: "Second look",
+    href: "/cases/second-look",
+    glyph: "ui-eye",
+    roles: ["senior", "owner"],
+  },
+  { slug: "rework", title: "Rework", href: "/cases/rework", glyph: "ui-again", roles: ["plater", "senior"] },
+  {
+    slug: "casebook",
+    title: "Casebook",
+    href: "/cases",
+    glyph: "ui-hold-tag",
+    roles: ["plater", "trainee", "senior", "owner"],
+  },
+  {
+    slug: "library",
+    title: "Library",
+    href: "/library",
+    glyph: "ui-library",
+    roles: ["plater", "trainee", "senior", "owner"],
+  },
+  { slug: "ledger", title: "Ledger", href: "/costs", glyph: "ui-money", roles: ["owner"] },
+  { slug: "crew", title: "Crew", href: "/crew", glyph: "ui-crew", roles: ["owner"] },
+] as const satisfies readonly PlaceEntry[];
+
+export type PlaceSlug = (typeof PLACES)[number]["slug"];
+
+export interface PlaceView {
+  slug: PlaceSlug;
+  title: string;
+  href: string;
+  glyph: GlyphName;
+  /** How much waits there. */
+  count?: number;
+}
+
+/** How much waits in which place; a place without a count shows none. */
+export type PlaceCounts = Partial<Record<PlaceSlug, number>>;
+
+/** The places of a person with these roles, in the order of the bar. */
+export function placesFor(roles: readonly Role[], counts: PlaceCounts = {}): PlaceView[] {
+  return PLACES.filter((place) => place.roles.some((role) => roles.includes(role))).map((place) => ({
+    slug: place.slug,
+    title: place.title,
+    href: place.href,
+    glyph: place.glyph,
+    count: counts[place.slug],
+  }));
+}

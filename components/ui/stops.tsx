@@ -1,0 +1,38 @@
+import type { ChangeEvent, CSSProperties } from "react";
+import { SURENESS, SURENESS_TITLES, type Sureness } from "@/lib/cases/case-words";
+
+export interface StopsProps {
+  name: string;
+  legend?: string;
+  hideLegend?: boolean;
+  defaultValue?: Sureness;
+  value?: Sureness;
+  onChange?: (event: ChangeEvent<HTMLInputElement>) => void;
+  error?: string;
+}
+
+/** How sure the caller is: three notches, each with a bar that fills. Native radios, values "1" to "3". */
+export function Stops({ name, legend = "How sure", hideLegend, defaultValue, value, onChange, error }: StopsProps) {
+  return (
+    <fieldset className="picks-set">
+      <legend className={hideLegend ? "sr-only" : undefined}>{legend}</legend>
+      <div className="stops">
+        {SURENESS.map((notch) => (
+          <label className="stop" key={notch} style={{ "--n": notch } as CSSProperties}>
+            <input
+              className="pick__input"
+              type="radio"
+              name={name}
+              value={notch}
+              onChange={onChange}
+              {...(value === undefined ? { defaultChecked: defaultValue === notch } : { checked: value === notch })}
+            />
+            {SURENESS_TITLES[notch]}
+            <i aria-hidden="true" />
+          </label>
+        ))}
+      </div>
+      {error && <p className="field__error">{error}</p>}
+    </fieldset>
+  );
+}
