@@ -1,5 +1,6 @@
 import { foreignKey, index, integer, primaryKey, real, sqliteTable, text, unique, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { BASE_METALS, METHODS, STATION_KINDS } from "@/lib/cases/case-words";
+import type { Layer } from "@/lib/plating/deposit-stack";
 import { moment, ownerShopId, rowId } from "./columns";
 import { members } from "./crew";
 
@@ -9,10 +10,7 @@ export const customers = sqliteTable(
   (t) => [unique("customers_shop_row").on(t.shopId, t.id), uniqueIndex("customers_name").on(t.shopId, t.name)],
 );
 
-export interface StoredLayer {
-  metal: string;
-  thicknessUm: number;
-}
+export type StoredLayer = Pick<Layer, "metal" | "thicknessUm">;
 
 export const workOrders = sqliteTable(
   "work_orders",

@@ -3,12 +3,17 @@ import { randomBytes } from "node:crypto";
 import { z } from "zod";
 import type { SignedIn } from "@/db/queries/crew";
 import { fault, FaultError, type Fault } from "@/lib/fault";
+import { InputError } from "@/lib/input-error";
 import { can, rolesFor, type Permission } from "@/lib/permissions";
 import { ROLE_TITLES } from "@/lib/cases/case-words";
 
 /** Turns whatever was thrown into a fault for the person. What they cannot use goes to the log under a short mark. */
 export function faultOf(error: unknown, where: string): Fault {
   if (error instanceof FaultError) return error.fault;
+  // A computation refused its input: its words are for the person.
+  if (error instanceof InputError) {
+    return { code: "invalid", message: `${error.field}: ${error.problem}`, fields: { [error.field]: error.problem } };
+  }
   const ref = randomBytes(3).toString("hex").toUpperCase();
   console.error(`[${ref}] ${where}`, error);
   return {

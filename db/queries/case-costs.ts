@@ -1,0 +1,111 @@
+import { and, asc, desc, eq, isNotNull, sql } from "drizzle-orm";
+import type { CaseCostInput } from "@/lib/costs/case-cost";
+import { moneyAtRisk } from "@/lib/costs/case-cost";
+import { strikeThenPlate } from "@/lib/costs/case-stack";
+import type { Handle } from "../open";
+import { caseCosts, cases, reworkCards, reworkSteps, workOrders } from "../schema";
+import { getRatesAt, type DatedRates } from "./rates";
+
+/** What the cost of a case rests on: its facts, the rates of its day, and the minutes that its cards recorded. */
+export function getCostFacts(db: Handle, shopId: number, caseId: number): (CaseCostInput & { rates: DatedRates }) | null {
+  const row = db
+    .select({
+      quantity: cases.quantity,
+      areaDm2: workOrders.areaDm2,
+      baseMetal: cases.baseMetal,
+      finalStack: workOrders.finalStack,
+      stageFound: cases.stageFound,
+      partValueCents: workOrders.partValueCents,
+      round: cases.round,
+      state: cases.state,
+      closing: cases.closing,
+      openedAt: cases.openedAt,
+    })
+    .from(cases)
+    .innerJoin(workOrders, and(eq(workOrders.shopId, cases.shopId), eq(workOrders.id, cases.workOrderId)))
+    .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
+    .get();
+  if (!row) return null;
+  const { finalStack, round, state, openedAt, ...facts } = row;
+  const minutes = spentMinutes(db, shopId, caseId);
+  return {
+    ...facts,
+    stack: strikeThenPlate(finalStack),
+    rounds: round,
+    rates: getRatesAt(db, shopId, openedAt),
+    recorded: state === "closed" && minutes !== null ? { minutes } : null,
+  };
+}
+
+/** Minutes ticked on the case's cards, all rounds. Null when no step was ever ticked. */
+function spentMinutes(db: Handle, shopId: number, caseId: number): number | null {
+  const row = db
+    .select({ minutes: sql<number | null>`sum(${reworkSteps.spentMinutes})` })
+    .from(reworkSteps)
+    .innerJoin(reworkCards, and(eq(reworkCards.shopId, reworkSteps.shopId), eq(reworkCards.id, reworkSteps.cardId)))
+    .where(and(eq(reworkCards.shopId, shopId), eq(reworkCards.caseId, caseId), isNotNull(reworkSteps.tickedAt)))
+    .get();
+  return row?.minutes ?? null;
+}
+
+export type CaseFigure = Pick<
+  typeof caseCosts.$inferSelect,
+  "basis" | "round" | "meanCents" | "low90Cents" | "high90Cents" | "lines" | "at"
+>;
+
+export interface CaseMoney {
+  /** What it is likely to cost if it goes on and fails later, with its 90 % range. */
+  atRisk: { meanCents: number; low90Cents: number; high90Cents: number };
+  /** Putting it right now. The newest estimate. */
+  estimate: CaseFigure | null;
+  /** Once the cards are done. */
+  recorded: CaseFigure | null;
+  /** From when the rates hold, and where they come from. */
+  rates: { validFromAt: number; source: string };
+  /** What was assumed because nobody said. */
+  assumed: string[];
+}
+
+/** The money of one case. Only for those who may see it: the caller asks `can(member, "money.case")` first. */
+export function getCaseMoney(db: Handle, shopId: number, caseId: number): CaseMoney | null {
+  const facts = getCostFacts(db, shopId, caseId);
+  if (!facts) return null;
+  const figures = db
+    .select({
+      basis: caseCosts.basis,
+      round: caseCosts.round,
+      meanCents: caseCosts.meanCents,
+      low90Cents: caseCosts.low90Cents,
+      high90Cents: caseCosts.high90Cents,
+      lines: caseCosts.lines,
+      at: caseCosts.at,
+    })
+    .from(caseCosts)
+    .where(and(eq(caseCosts.shopId, shopId), eq(caseCosts.caseId, caseId)))
+    .orderBy(desc(caseCosts.id))
+    .all();
+  const { meanCents, low90Cents, high90Cents, assumed } = moneyAtRisk(facts);
+  return {
+    atRisk: { meanCents, low90Cents, high90Cents },
+    estimate: figures.find((figure) => figure.basis === "estimate") ?? null,
+    recorded: figures.find((figure) => figure.basis === "recorded") ?? null,
+    rates: { validFromAt: facts.rates.validFromAt, source: facts.rates.source },
+    assumed,
+  };
+}
+
+/** Minutes planned against minutes taken of every done card, for the estimate's own record. Oldest first. */
+export function listCardMinutes(db: Handle, shopId: number) {
+  return db
+    .select({
+      cardId: reworkCards.id,
+      plannedMinutes: sql<number>`sum(${reworkSteps.plannedMinutes})`,
+      spentMinutes: sql<number>`sum(${reworkSteps.spentMinutes})`,
+    })
+    .from(reworkCards)
+    .innerJoin(reworkSteps, and(eq(reworkSteps.shopId, reworkCards.shopId), eq(reworkSteps.cardId, reworkCards.id)))
+    .where(and(eq(reworkCards.shopId, shopId), isNotNull(reworkCards.doneAt)))
+    .groupBy(reworkCards.id)
+    .orderBy(asc(reworkCards.id))
+    .all();
+}
