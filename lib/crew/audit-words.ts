@@ -1,0 +1,47 @@
+import { ROLE_TITLES, ROLES, type Role } from "@/lib/cases/case-words";
+
+/** What the audit trail records, each with the words that follow the person's name. */
+export const AUDIT_WORDS = {
+  "member.invited": "invited",
+  "invite.sent-again": "sent the invite again to",
+  "invite.revoked": "took back the invite of",
+  "member.joined": "joined the crew:",
+  "member.roles": "changed the roles of",
+  "member.removed": "removed from the crew",
+  "account.renamed": "changed their own name to",
+  "account.password": "changed their own password:",
+  "account.password-reset": "set a new password by a mailed link:",
+  "account.signed-out-everywhere": "signed out everywhere:",
+  "rates.set": "set rates",
+  "library.published": "published in the library",
+} as const satisfies Record<string, string>;
+export type AuditAction = keyof typeof AUDIT_WORDS;
+
+/** The words of an action; one that this version does not know is shown by its key, never hidden. */
+export function auditWords(action: string): string {
+  return Object.hasOwn(AUDIT_WORDS, action) ? AUDIT_WORDS[action as AuditAction] : action;
+}
+
+/**
+ * What an entry's detail adds, as one line; empty when it adds nothing.
+ * @example auditDetail({ from: ["plater"], to: ["plater", "senior"] }) === "Plater → Plater, Senior tech"
+ */
+export function auditDetail(detail: Record<string, unknown>): string {
+  const lines: string[] = [];
+  if ("from" in detail && "to" in detail) lines.push(`${valueWords(detail.from)} → ${valueWords(detail.to)}`);
+  for (const [key, value] of Object.entries(detail)) {
+    if (key === "from" || key === "to") continue;
+    lines.push(key === "roles" ? valueWords(value) : `${key}: ${valueWords(value)}`);
+  }
+  return lines.join("; ");
+}
+
+function valueWords(value: unknown): string {
+  if (Array.isArray(value)) return value.map(valueWords).join(", ") || "none";
+  if (typeof value === "string") return isRole(value) ? ROLE_TITLES[value] : value;
+  return JSON.stringify(value) ?? "none";
+}
+
+function isRole(value: string): value is Role {
+  return ROLES.some((role) => role === value);
+}
