@@ -1,0 +1,28 @@
+/** Sound: the baseline every suspect is held against. No fault, so no causes and no fixes. */
+import type { ShelfPart } from "@/lib/library/library-entry";
+
+export const sound: ShelfPart = {
+  class: {
+    slug: "sound",
+    title: "Sound",
+    short: "Even pink copper, whole in every recess, that holds on tape. No fault seen.",
+    atStrike:
+      "Even salmon-pink, as bright or matt as the base metal under it, with copper in recesses and at contacts. First copper came in about 30 s (common practice). Tape lifts nothing and a white cloth stays white.",
+    inFinalPlate: "Plates even and holds. What fails later did not show at the strike.",
+    tells: [
+      { versus: "underactivation", tell: "No haze that fades, and tape lifts nothing." },
+      { versus: "oxidation", tell: "Pink, not brown. A strike that is seconds old may look salmon; it must not deepen while you watch." },
+      { versus: "water-spots", tell: "A mark that a damp cloth takes off whole copper is water on top, not a fault of the strike." },
+    ],
+    checks: ["Tilt it under one lamp, wet and dry.", "Tape at an edge and in the middle of one part in the rack.", "White cloth, then a look into recesses and at contacts."],
+    prevention: ["Photograph sound strikes of each base metal: they are what every suspect is held against."],
+    stripNote:
+      "Nothing to take off. Sound is said of the strike only; whether a part is fit for its use is for its engineer. High-strength steel still needs its bake (ASTM B850), sound or not.",
+    otherLikelihood: 0,
+    sourceKeys: ["astm-b850", "common-practice", "from-memory"],
+    synonyms: ["good", "good copper", "no fault", "nothing wrong", "ok", "false alarm", "normal", "looks right", "salmon pink", "even pink", "passes tape", "clean strike", "what good looks like"],
+    position: 12,
+  },
+  causes: [],
+  fixes: [],
+};
