@@ -9,10 +9,12 @@ const STEP: Record<string, number> = { ArrowRight: 1, ArrowLeft: -1 };
 export function LineStripNav({
   className,
   pressed,
+  label,
   children,
 }: {
   className: string;
   pressed: string | null;
+  label: string;
   children: ReactNode;
 }) {
   const nav = useRef<HTMLElement>(null);
@@ -36,7 +38,7 @@ export function LineStripNav({
   return (
     // The nav itself takes no focus; it hears the keys of the links inside it.
     // eslint-disable-next-line jsx-a11y/no-noninteractive-element-interactions
-    <nav ref={nav} className={className} aria-label="The line" onKeyDown={onKeyDown}>
+    <nav ref={nav} className={className} aria-label={label} onKeyDown={onKeyDown}>
       {children}
     </nav>
   );

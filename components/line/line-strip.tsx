@@ -11,6 +11,8 @@ export interface LineStripProps {
   pressed: string | null;
   /** The current screen narrowed to that station; null gives the whole line. Keep the other filters in it. */
   hrefFor: (station: string | null) => string;
+  /** Names the strip for readers, where a page has two. */
+  label?: string;
 }
 
 function Station({
@@ -43,10 +45,10 @@ function Station({
 }
 
 /** The shop's line in section, left to right as the part travels. Pressing a station narrows the screen to it. */
-export function LineStrip({ mode, stations, pressed, hrefFor }: LineStripProps) {
+export function LineStrip({ mode, stations, pressed, hrefFor, label = "The line" }: LineStripProps) {
   if (stations.length === 0) return null;
   return (
-    <LineStripNav className={`line line--${mode}`} pressed={pressed}>
+    <LineStripNav className={`line line--${mode}`} pressed={pressed} label={label}>
       <ol>
         {stations.map((station) => {
           const isPressed = station.slug === pressed;

@@ -15,7 +15,7 @@ export interface NarrowedBarProps {
 /** Says that a station narrows the screen, and undoes it. */
 export function NarrowedBar({ station, words, clearHref, aside }: NarrowedBarProps) {
   return (
-    <div className="narrowed">
+    <section className="narrowed" aria-label="Narrowed">
       <div className="narrowed__in">
         <p role="status">
           Narrowed to <strong>{station}</strong>
@@ -26,6 +26,6 @@ export function NarrowedBar({ station, words, clearHref, aside }: NarrowedBarPro
         </Link>
         {aside && <span className="narrowed__aside">{aside}</span>}
       </div>
-    </div>
+    </section>
   );
 }

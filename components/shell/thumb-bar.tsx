@@ -15,7 +15,7 @@ export interface ThumbBarProps {
 /** Below 1080 px: one way out on the left, one main action under the thumb. */
 export function ThumbBar({ back, main, children }: ThumbBarProps) {
   return (
-    <div className="thumb">
+    <section className="thumb" aria-label="Main action">
       {back ? (
         <LinkButton className="thumb__out" href={back} glyph="ui-back">
           Back
@@ -36,6 +36,6 @@ export function ThumbBar({ back, main, children }: ThumbBarProps) {
           {main.label}
         </SubmitButton>
       )}
-    </div>
+    </section>
   );
 }

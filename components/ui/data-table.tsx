@@ -1,3 +1,5 @@
+/* The phone layout takes the table display away, and with it the semantics: hence the roles spelled out. */
+/* eslint-disable jsx-a11y/no-redundant-roles, jsx-a11y/no-interactive-element-to-noninteractive-role */
 import Link from "next/link";
 import type { ReactNode } from "react";
 
@@ -45,7 +47,6 @@ function Head<Row>({ column }: { column: Column<Row> }) {
 
 /** A plain table. On a phone each row turns into lines of head and value, so nothing scrolls sideways. */
 export function DataTable<Row>({ caption, showCaption, columns, rows, rowKey, foot }: DataTableProps<Row>) {
-  // The roles are spelled out because the phone layout takes the table display away, and with it the semantics.
   return (
     <table className="tb" role="table">
       <caption className={showCaption ? undefined : "sr-only"}>{caption}</caption>

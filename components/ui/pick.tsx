@@ -33,6 +33,8 @@ export interface PickGroupProps {
   layout?: "grid" | "rows" | "list" | "bar";
   error?: string;
   required?: boolean;
+  /** One more cell after the options: a button that opens more of them. */
+  more?: ReactNode;
 }
 
 function holds(chosen: string | readonly string[], value: string): boolean {
@@ -87,6 +89,7 @@ export function PickGroup(props: PickGroupProps) {
         {options.map((option) => (
           <Pick key={option.value} option={option} group={props} />
         ))}
+        {props.more}
       </div>
       {error && (
         <p className="field__error">

@@ -31,8 +31,10 @@ export function Range({ low, likely, high, min = 0, max = high, words, estimate 
         {mark && <u style={{ left: `${share(mark.at)}%` }} />}
       </span>
       <span className="range__words" aria-hidden="true">
-        <span>{mark ? mark.words : words.low}</span>
-        <span>{mark ? `${words.low} to ${words.high}` : words.high}</span>
+        <span>{mark ? mark.words : `likely ${words.likely}`}</span>
+        <span>
+          {words.low} to {words.high}
+        </span>
       </span>
     </div>
   );
