@@ -40,16 +40,14 @@ export function moveCase(tx: Handle, doer: Doer, row: CaseRow, move: Move): void
     .update(cases)
     .set({ ...move.columns, state })
     .where(
-      and(
-        eq(cases.shopId, doer.shopId),
-        eq(cases.id, row.id),
-        eq(cases.state, row.state),
-        eq(cases.round, row.round),
-      ),
+      and(eq(cases.shopId, doer.shopId), eq(cases.id, row.id), eq(cases.state, row.state), eq(cases.round, row.round)),
     )
     .run();
   if (changed.changes !== 1) {
-    throw fault("conflict", "That was not saved: somebody changed this case a moment ago. Reload to see what they did.");
+    throw fault(
+      "conflict",
+      "That was not saved: somebody changed this case a moment ago. Reload to see what they did.",
+    );
   }
   addEvent(tx, doer, row, { event: move.event, from: row.state, to: state, why: move.why, detail: move.detail });
 }

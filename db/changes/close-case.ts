@@ -48,9 +48,12 @@ export function amendCase(tx: Handle, doer: Doer, row: CaseRow, input: Amendment
   const changed = tx
     .update(cases)
     .set(facts)
-    .where(and(eq(cases.shopId, doer.shopId), eq(cases.id, row.id), eq(cases.state, "held"), eq(cases.round, row.round)))
+    .where(
+      and(eq(cases.shopId, doer.shopId), eq(cases.id, row.id), eq(cases.state, "held"), eq(cases.round, row.round)),
+    )
     .run();
-  if (changed.changes !== 1) throw fault("conflict", "Facts can be corrected only while the part is held. Tell a senior tech.");
+  if (changed.changes !== 1)
+    throw fault("conflict", "Facts can be corrected only while the part is held. Tell a senior tech.");
   addEvent(tx, doer, row, { event: "amended", from: "held", to: "held", detail: { before, after: facts } });
   priceCase(tx, doer, row.id);
   writeCaseText(tx, doer.shopId, row.id);

@@ -2,7 +2,15 @@ import { and, eq, inArray } from "drizzle-orm";
 import type { CardStepInput, Confirmation } from "@/lib/cases/case.schema";
 import { fault } from "@/lib/fault";
 import type { Handle } from "../open";
-import { calls, libraryCauses, libraryCautions, libraryClassCauses, libraryFixes, reworkCards, reworkSteps } from "../schema";
+import {
+  calls,
+  libraryCauses,
+  libraryCautions,
+  libraryClassCauses,
+  libraryFixes,
+  reworkCards,
+  reworkSteps,
+} from "../schema";
 import { stationOfKind } from "../queries/trace";
 import { addCall, type Caller } from "./add-call";
 import { moveCase, type CaseRow } from "./case-event";
@@ -31,16 +39,27 @@ export function confirmCase(tx: Handle, doer: Caller, row: CaseRow, input: Confi
     detail: { classSlug: input.classSlug, causeId: input.causeId, disposition: input.disposition },
     columns,
   });
-  addCall(tx, doer, { caseId: row.id, round: row.round, kind: "second-look", classSlug: input.classSlug, sure: input.sure });
+  addCall(tx, doer, {
+    caseId: row.id,
+    round: row.round,
+    kind: "second-look",
+    classSlug: input.classSlug,
+    sure: input.sure,
+  });
   if (input.disposition === "rework") {
     sendCard(tx, doer, row, input);
   } else {
-    moveCase(tx, doer, { ...row, state: "confirmed" }, {
-      event: "disposed",
-      why: input.why,
-      detail: { disposition: input.disposition },
-      columns: { closing: input.disposition, closedAt: doer.now },
-    });
+    moveCase(
+      tx,
+      doer,
+      { ...row, state: "confirmed" },
+      {
+        event: "disposed",
+        why: input.why,
+        detail: { disposition: input.disposition },
+        columns: { closing: input.disposition, closedAt: doer.now },
+      },
+    );
   }
   priceCase(tx, doer, row.id);
   writeCaseText(tx, doer.shopId, row.id);
@@ -104,7 +123,8 @@ function sendCard(tx: Handle, doer: Caller, row: CaseRow, input: Confirmation): 
         .where(and(eq(libraryFixes.shopId, doer.shopId), eq(libraryFixes.id, input.fixId)))
         .get()
     : undefined;
-  if (input.fixId && !fix) throw fault("invalid", "That fix is no longer in the library. Choose another.", { fixId: "Choose another fix." });
+  if (input.fixId && !fix)
+    throw fault("invalid", "That fix is no longer in the library. Choose another.", { fixId: "Choose another fix." });
   const { id } = tx
     .insert(reworkCards)
     .values({

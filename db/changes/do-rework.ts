@@ -2,9 +2,9 @@ import { and, count, eq, isNull } from "drizzle-orm";
 import type { OutcomeInput } from "@/lib/cases/case.schema";
 import { fault } from "@/lib/fault";
 import type { Handle } from "../open";
+import { claimPhotos } from "../queries/photos";
 import { reworkCards, reworkSteps } from "../schema";
 import { moveCase, type CaseRow, type Doer } from "./case-event";
-import { attachPhotos } from "./open-case";
 import { priceCase } from "./price-case";
 import { writeCaseText } from "./write-case-text";
 
@@ -22,7 +22,10 @@ export function tickStep(tx: Handle, doer: Doer, row: CaseRow, tick: { stepId: n
     .limit(1)
     .get();
   if (next?.id !== tick.stepId) {
-    throw fault("conflict", "That step is ticked already, or an earlier one is not. Reload the card and go on from its first open step.");
+    throw fault(
+      "conflict",
+      "That step is ticked already, or an earlier one is not. Reload the card and go on from its first open step.",
+    );
   }
   if (row.state === "confirmed") moveCase(tx, doer, row, { event: "rework-started" });
   else if (row.state !== "in-rework") throw fault("conflict", "This card is not open any more. Reload the case.");
@@ -44,7 +47,10 @@ export function recordOutcome(tx: Handle, doer: Doer, row: CaseRow, input: Outco
     .where(and(eq(reworkSteps.shopId, doer.shopId), eq(reworkSteps.cardId, card.id), isNull(reworkSteps.tickedAt)))
     .get();
   if (open && open.steps > 0) {
-    throw fault("conflict", `${open.steps} steps of the card are still open. Tick them first, with the minutes they took.`);
+    throw fault(
+      "conflict",
+      `${open.steps} steps of the card are still open. Tick them first, with the minutes they took.`,
+    );
   }
   const isSound = input.outcome === "sound";
   moveCase(tx, doer, row, {
@@ -59,7 +65,7 @@ export function recordOutcome(tx: Handle, doer: Doer, row: CaseRow, input: Outco
     .set({ doneAt: doer.now, outcome: input.outcome, outcomeNote: input.note, outcomeById: doer.memberId })
     .where(and(eq(reworkCards.shopId, doer.shopId), eq(reworkCards.id, card.id)))
     .run();
-  attachPhotos(tx, doer, { caseId: row.id, round: row.round, purpose: "re-strike" }, input.photoIds);
+  claimPhotos(tx, { ...doer, caseId: row.id, round: row.round, purpose: "re-strike", ids: input.photoIds });
   priceCase(tx, doer, row.id);
   writeCaseText(tx, doer.shopId, row.id);
 }

@@ -1,9 +1,9 @@
-import { and, eq, isNull, sql } from "drizzle-orm";
+import { and, eq, sql } from "drizzle-orm";
 import { formatCaseRef, yearMonth } from "@/lib/cases/case-ref";
 import type { Snap } from "@/lib/cases/case.schema";
 import type { Handle } from "../open";
-import { caseNumbers, cases, caseSolutions, photos } from "../schema";
-import { fault } from "@/lib/fault";
+import { claimPhotos } from "../queries/photos";
+import { caseNumbers, cases, caseSolutions } from "../schema";
 import { addCall } from "./add-call";
 import { addEvent, type Doer } from "./case-event";
 import { priceCase } from "./price-case";
@@ -63,7 +63,7 @@ export function openCase(tx: Handle, doer: Opening, snap: Snap): { id: number; r
   }
   addEvent(tx, doer, { id, round: 1 }, { event: "opened", from: null, to: "held" });
   addCall(tx, doer, { caseId: id, round: 1, kind: "first", classSlug: snap.calledClass, sure: snap.sure });
-  attachPhotos(tx, doer, { caseId: id, round: 1, purpose: "suspect" }, snap.photoIds);
+  claimPhotos(tx, { ...doer, caseId: id, round: 1, purpose: "suspect", ids: snap.photoIds });
   priceCase(tx, doer, id);
   writeCaseText(tx, doer.shopId, id);
   return { id, ref, isNew: true };
@@ -81,31 +81,4 @@ function takeRef(tx: Handle, doer: Opening): string {
     .returning({ last: caseNumbers.last })
     .get();
   return formatCaseRef(month, last);
-}
-
-/**
- * Hangs photos on a case. A photo whose file is still on its way gets its row now, so that whichever comes first,
- * the file or the case, the other finds it.
- * @throws FaultError "conflict" when a photo is another person's or already on another case
- */
-export function attachPhotos(
-  tx: Handle,
-  doer: Doer,
-  to: { caseId: number; round: number; purpose: "suspect" | "re-strike" },
-  photoIds: string[],
-): void {
-  for (const [position, id] of [...new Set(photoIds)].entries()) {
-    const placed = { caseId: to.caseId, round: to.round, purpose: to.purpose, position };
-    const row = tx
-      .insert(photos)
-      .values({ id, shopId: doer.shopId, memberId: doer.memberId, state: "awaited", fileName: "", createdAt: doer.now, ...placed })
-      .onConflictDoUpdate({
-        target: photos.id,
-        set: placed,
-        setWhere: and(eq(photos.shopId, doer.shopId), eq(photos.memberId, doer.memberId), isNull(photos.caseId)),
-      })
-      .returning({ id: photos.id })
-      .get();
-    if (!row) throw fault("conflict", "One of the photos is already on another case. Take it again.");
-  }
 }

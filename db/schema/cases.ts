@@ -1,5 +1,14 @@
 import { sql } from "drizzle-orm";
-import { foreignKey, index, integer, primaryKey, sqliteTable, text, unique, uniqueIndex } from "drizzle-orm/sqlite-core";
+import {
+  foreignKey,
+  index,
+  integer,
+  primaryKey,
+  sqliteTable,
+  text,
+  unique,
+  uniqueIndex,
+} from "drizzle-orm/sqlite-core";
 import { BASE_METALS, CLOSINGS, DISPOSITIONS, METHODS, OUTCOMES, STAGES_FOUND } from "@/lib/cases/case-words";
 import type { Sureness, Symptom } from "@/lib/cases/case-words";
 import { CASE_EVENTS, CASE_STATES } from "@/lib/cases/case-state";

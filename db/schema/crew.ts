@@ -1,4 +1,13 @@
-import { foreignKey, index, integer, primaryKey, sqliteTable, text, unique, uniqueIndex } from "drizzle-orm/sqlite-core";
+import {
+  foreignKey,
+  index,
+  integer,
+  primaryKey,
+  sqliteTable,
+  text,
+  unique,
+  uniqueIndex,
+} from "drizzle-orm/sqlite-core";
 import { ROLES } from "@/lib/cases/case-words";
 import { MAIL_KINDS } from "@/lib/crew/mail-kinds";
 import { moment } from "./columns";
@@ -11,7 +20,9 @@ export const shops = sqliteTable(
     name: text("name").notNull(),
     timeZone: text("time_zone").notNull(),
     currency: text("currency").notNull(),
-    units: text("units", { enum: ["metric", "us"] }).notNull().default("metric"),
+    units: text("units", { enum: ["metric", "us"] })
+      .notNull()
+      .default("metric"),
     /** True for the invented demo shops: screens say so. */
     isDemo: integer("is_demo", { mode: "boolean" }).notNull().default(false),
     /** Next running number per year-month lives in `case_numbers`. */

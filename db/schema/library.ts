@@ -1,4 +1,14 @@
-import { foreignKey, index, integer, primaryKey, real, sqliteTable, text, unique, uniqueIndex } from "drizzle-orm/sqlite-core";
+import {
+  foreignKey,
+  index,
+  integer,
+  primaryKey,
+  real,
+  sqliteTable,
+  text,
+  unique,
+  uniqueIndex,
+} from "drizzle-orm/sqlite-core";
 import { STATION_KINDS } from "@/lib/cases/case-words";
 import type { FixStep, LibraryTell } from "@/lib/library/library-entry";
 import { moment, ownerShopId, rowId } from "./columns";

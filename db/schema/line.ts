@@ -1,4 +1,14 @@
-import { foreignKey, index, integer, primaryKey, real, sqliteTable, text, unique, uniqueIndex } from "drizzle-orm/sqlite-core";
+import {
+  foreignKey,
+  index,
+  integer,
+  primaryKey,
+  real,
+  sqliteTable,
+  text,
+  unique,
+  uniqueIndex,
+} from "drizzle-orm/sqlite-core";
 import { BASE_METALS, METHODS, STATION_KINDS } from "@/lib/cases/case-words";
 import type { Layer } from "@/lib/plating/deposit-stack";
 import { moment, ownerShopId, rowId } from "./columns";

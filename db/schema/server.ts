@@ -11,7 +11,9 @@ export const jobs = sqliteTable(
     payload: text("payload", { mode: "json" }).$type<Record<string, string | number>>().notNull(),
     /** Two jobs with one key are one job while the first waits. */
     onceKey: text("once_key"),
-    state: text("state", { enum: ["waiting", "running", "done", "failed"] }).notNull().default("waiting"),
+    state: text("state", { enum: ["waiting", "running", "done", "failed"] })
+      .notNull()
+      .default("waiting"),
     attempts: integer("attempts").notNull().default(0),
     runAfterAt: moment("run_after_at").notNull(),
     startedAt: moment("started_at"),

@@ -13,7 +13,11 @@ interface Places {
  * never changed, so files copied after the database are complete.
  * @throws Error when the copy does not pass SQLite's own integrity check
  */
-export async function backUp({ dataDir, uploadsDir, target }: Places & { target: string }): Promise<{ photos: number; missing: number }> {
+export async function backUp({
+  dataDir,
+  uploadsDir,
+  target,
+}: Places & { target: string }): Promise<{ photos: number; missing: number }> {
   fs.mkdirSync(target, { recursive: true });
   const copyFile = path.join(target, "coppertell.db");
   const live = new Database(databaseFile(dataDir), { readonly: true });
@@ -24,7 +28,8 @@ export async function backUp({ dataDir, uploadsDir, target }: Places & { target:
   // One file, no companions: a backup that is carried off must be whole.
   copy.pragma("journal_mode = DELETE");
   const integrity = copy.pragma("integrity_check", { simple: true });
-  if (integrity !== "ok") throw new Error(`The copy is damaged: ${String(integrity)}. Keep the last good backup and check the disk.`);
+  if (integrity !== "ok")
+    throw new Error(`The copy is damaged: ${String(integrity)}. Keep the last good backup and check the disk.`);
   const paths = copy.prepare("select path from photo_sizes").pluck().all() as string[];
   copy.close();
 
@@ -41,9 +46,16 @@ export async function backUp({ dataDir, uploadsDir, target }: Places & { target:
 /** Accepted photos whose sizes are still being made lie outside `photo_sizes`; they are taken too. */
 function copyUnfinished(uploadsDir: string, target: string, known: string[]): void {
   const taken = new Set(known.map((each) => path.normalize(each)));
-  for (const each of fs.existsSync(uploadsDir) ? fs.readdirSync(uploadsDir, { recursive: true, encoding: "utf8" }) : []) {
+  for (const each of fs.existsSync(uploadsDir)
+    ? fs.readdirSync(uploadsDir, { recursive: true, encoding: "utf8" })
+    : []) {
     const from = path.join(uploadsDir, each);
-    if (taken.has(path.normalize(each)) || each.endsWith(".gitkeep") || !fs.statSync(from, { throwIfNoEntry: false })?.isFile()) continue;
+    if (
+      taken.has(path.normalize(each)) ||
+      each.endsWith(".gitkeep") ||
+      !fs.statSync(from, { throwIfNoEntry: false })?.isFile()
+    )
+      continue;
     copyInto(from, path.join(target, "uploads", each));
   }
 }
@@ -63,13 +75,15 @@ export function restore({ dataDir, uploadsDir, source, now }: Places & { source:
   aside: string | null;
 } {
   const from = path.join(source, "coppertell.db");
-  if (!fs.existsSync(from)) throw new Error(`${source} holds no coppertell.db. Name the folder that npm run backup printed.`);
+  if (!fs.existsSync(from))
+    throw new Error(`${source} holds no coppertell.db. Name the folder that npm run backup printed.`);
   const check = new Database(from, { readonly: true });
   const integrity = check.pragma("integrity_check", { simple: true });
   const cases = check.prepare("select count(*) from cases").pluck().get() as number;
   const photos = check.prepare("select count(*) from photo_sizes").pluck().get() as number;
   check.close();
-  if (integrity !== "ok") throw new Error(`The backup in ${source} is damaged: ${String(integrity)}. Use an older one.`);
+  if (integrity !== "ok")
+    throw new Error(`The backup in ${source} is damaged: ${String(integrity)}. Use an older one.`);
 
   const file = databaseFile(dataDir);
   let aside: string | null = null;

@@ -1,22 +1,42 @@
 #!/usr/bin/env node
 /** `npm run demo`: from a fresh checkout to a running demo shop. Safe to run again. */
 import { spawn } from "node:child_process";
-import { demandNode, installPackages, isPortTaken, makeSecrets, readSecrets, run, say, waitForHealth } from "./steps.mjs";
+import {
+  demandNode,
+  installPackages,
+  isPortTaken,
+  makeSecrets,
+  readSecrets,
+  run,
+  say,
+  waitForHealth,
+} from "./steps.mjs";
 
 const port = Number(process.env.PORT ?? 3000);
 
 async function demo() {
   demandNode();
-  if (isPortTaken(port)) throw new Error(`Port ${port} is in use. Stop what runs there, or choose another: PORT=3001 npm run demo`);
+  if (isPortTaken(port))
+    throw new Error(`Port ${port} is in use. Stop what runs there, or choose another: PORT=3001 npm run demo`);
   installPackages();
   makeSecrets(port);
   // A chosen port goes before the address that .env was made with.
-  const origin = process.env.PORT ? `http://localhost:${port}` : (readSecrets().NEXTAUTH_URL ?? `http://localhost:${port}`);
-  const env = { NEXT_TELEMETRY_DISABLED: "1", NEXTAUTH_URL: origin, UPLOADTHING_INGEST_URL: `${origin}/api/ingest`, UPLOADTHING_CALLBACK_URL: `${origin}/api/uploadthing` };
-  run("Database and the demo shops (photos are rendered here: a minute or two)", "npx", ["tsx", "db/scripts/seed.ts", "--demo"], env);
+  const origin = process.env.PORT
+    ? `http://localhost:${port}`
+    : (readSecrets().NEXTAUTH_URL ?? `http://localhost:${port}`);
+  const env = { NEXT_TELEMETRY_DISABLED: "1", NEXTAUTH_URL: origin };
+  run(
+    "Database and the demo shops (photos are rendered here: a minute or two)",
+    "node",
+    ["--conditions=react-server", "--import", "tsx", "db/scripts/seed.ts", "--demo"],
+    env,
+  );
   run("Building the app", "node", ["node_modules/next/dist/bin/next", "build"], env);
   say("Starting the server");
-  const server = spawn("node", ["node_modules/next/dist/bin/next", "start", "-p", String(port)], { stdio: "inherit", env: { ...process.env, ...env } });
+  const server = spawn("node", ["node_modules/next/dist/bin/next", "start", "-p", String(port)], {
+    stdio: "inherit",
+    env: { ...process.env, ...env },
+  });
   for (const signal of ["SIGINT", "SIGTERM"]) process.on(signal, () => server.kill("SIGTERM"));
   server.on("exit", (code) => process.exit(code ?? 0));
   await waitForHealth(origin, 60);

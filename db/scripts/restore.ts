@@ -9,4 +9,6 @@ if (!source) {
 }
 const env = readEnv();
 const back = restore({ dataDir: env.DATA_DIR, uploadsDir: env.UPLOADS_DIR, source, now: Date.now() });
-console.log(`Restored ${source}: ${back.cases} cases, ${back.photos} photo files. What was there before: ${back.aside ?? "nothing"}.`);
+console.log(
+  `Restored ${source}: ${back.cases} cases, ${back.photos} photo files. What was there before: ${back.aside ?? "nothing"}.`,
+);

@@ -18,7 +18,9 @@ export function run(step, command, args, env = {}) {
 export function demandNode() {
   const [major, minor] = process.versions.node.split(".").map(Number);
   if (major < 20 || (major === 20 && minor < 9) || major > 22) {
-    throw new Error(`Coppertell runs on Node.js 20.9 to 22; this is ${process.versions.node}. Install Node.js 20 and run this again.`);
+    throw new Error(
+      `Coppertell runs on Node.js 20.9 to 22; this is ${process.versions.node}. Install Node.js 20 and run this again.`,
+    );
   }
 }
 
@@ -43,29 +45,36 @@ export function makeSecrets(port) {
   }
   say("Making secrets in .env");
   const origin = `http://localhost:${port}`;
-  fs.writeFileSync(".env", Object.entries(localEnvironment(origin)).map(([name, value]) => `${name}=${value}\n`).join(""), { mode: 0o600 });
+  fs.writeFileSync(
+    ".env",
+    Object.entries(localEnvironment(origin))
+      .map(([name, value]) => `${name}=${value}\n`)
+      .join(""),
+    { mode: 0o600 },
+  );
 }
 
-/** An environment in which everything is local: database, uploads, mail. */
+/** All that a local installation needs to be told: without further variables uploads and mail stay on this machine. */
 export function localEnvironment(origin) {
-  const token = { apiKey: `sk_local_${randomBytes(24).toString("hex")}`, appId: "coppertell-local", regions: ["local"] };
-  return {
-    NEXTAUTH_URL: origin,
-    NEXTAUTH_SECRET: randomBytes(32).toString("hex"),
-    UPLOADTHING_TOKEN: Buffer.from(JSON.stringify(token)).toString("base64"),
-    UPLOADTHING_INGEST_URL: `${origin}/api/ingest`,
-    UPLOADTHING_CALLBACK_URL: `${origin}/api/uploadthing`,
-    UPLOADTHING_LOG_LEVEL: "Warning",
-  };
+  return { NEXTAUTH_URL: origin, NEXTAUTH_SECRET: randomBytes(32).toString("hex") };
 }
 
 /** The variables of `.env`, as a program that does not read it needs them. */
 export function readSecrets() {
   const lines = fs.existsSync(".env") ? fs.readFileSync(".env", "utf8").split("\n") : [];
-  return Object.fromEntries(lines.filter((line) => line.includes("=")).map((line) => [line.slice(0, line.indexOf("=")), line.slice(line.indexOf("=") + 1)]));
+  return Object.fromEntries(
+    lines
+      .filter((line) => line.includes("="))
+      .map((line) => [line.slice(0, line.indexOf("=")), line.slice(line.indexOf("=") + 1)]),
+  );
 }
 
-const BROWSERS = [process.env.CHROMIUM_PATH, "/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bin/google-chrome"];
+const BROWSERS = [
+  process.env.CHROMIUM_PATH,
+  "/usr/bin/chromium",
+  "/usr/bin/chromium-browser",
+  "/usr/bin/google-chrome",
+];
 
 /** Finds a Chromium, or installs one. @returns its path, or "" for Playwright's own */
 export function findBrowser() {
@@ -76,7 +85,9 @@ export function findBrowser() {
   }
   if (process.getuid?.() === 0 && fs.existsSync("/usr/bin/apt-get")) {
     run("Looking up Debian's packages", "apt-get", ["update", "-qq"]);
-    run("Installing Chromium", "apt-get", ["install", "-y", "-qq", "--no-install-recommends", "chromium"], { DEBIAN_FRONTEND: "noninteractive" });
+    run("Installing Chromium", "apt-get", ["install", "-y", "-qq", "--no-install-recommends", "chromium"], {
+      DEBIAN_FRONTEND: "noninteractive",
+    });
     if (found()) return found();
   }
   run("Installing Playwright's Chromium", "npx", ["playwright", "install", "chromium"]);
@@ -86,7 +97,10 @@ export function findBrowser() {
 /** Whether something answers at this address already. */
 export function isPortTaken(port) {
   try {
-    execSync(`node -e "require('net').connect(${port},'127.0.0.1').on('connect',()=>process.exit(0)).on('error',()=>process.exit(1))"`, { stdio: "ignore" });
+    execSync(
+      `node -e "require('net').connect(${port},'127.0.0.1').on('connect',()=>process.exit(0)).on('error',()=>process.exit(1))"`,
+      { stdio: "ignore" },
+    );
     return true;
   } catch {
     return false;

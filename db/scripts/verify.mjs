@@ -14,7 +14,10 @@ const began = Date.now();
 function check(name, command, args, env = {}) {
   say(name);
   const from = Date.now();
-  const done = spawnSync(command, args, { stdio: "inherit", env: { ...process.env, NEXT_TELEMETRY_DISABLED: "1", ...env } });
+  const done = spawnSync(command, args, {
+    stdio: "inherit",
+    env: { ...process.env, NEXT_TELEMETRY_DISABLED: "1", ...env },
+  });
   const holds = done.status === 0;
   console.log(`${holds ? "✓" : "✗"} ${name} (${Math.round((Date.now() - from) / 1000)} s)`);
   return holds;
@@ -49,7 +52,10 @@ function verify() {
   if (count(check("Build", "node", ["node_modules/next/dist/bin/next", "build"]))) {
     const e2e = path.join(results, "e2e.json");
     countTests(
-      check("Browser tests", "npx", ["playwright", "test"], { CHROMIUM_PATH: chromium, PLAYWRIGHT_JSON_OUTPUT_NAME: e2e }),
+      check("Browser tests", "npx", ["playwright", "test"], {
+        CHROMIUM_PATH: chromium,
+        PLAYWRIGHT_JSON_OUTPUT_NAME: e2e,
+      }),
       e2e,
       (report) => ({ passed: report.stats.expected, failed: report.stats.unexpected + report.stats.flaky }),
     );

@@ -8,7 +8,16 @@ import type { Db } from "@/db/open";
 import { requireCase } from "@/db/queries/cases";
 import { calls, caseCosts, caseEvents, cases, photos, reworkCards, reworkSteps } from "@/db/schema";
 import { TEST_NOW } from "@/tests/fixtures/crew-factory";
-import { causeOf, confirmFor, emptyDatabase, makeCase, makeConfirmation, makeShop, makeSnap, type TestShop } from "@/tests/fixtures/shop-factory";
+import {
+  causeOf,
+  confirmFor,
+  emptyDatabase,
+  makeCase,
+  makeConfirmation,
+  makeShop,
+  makeSnap,
+  type TestShop,
+} from "@/tests/fixtures/shop-factory";
 
 let db: Db;
 let shop: TestShop;
@@ -18,15 +27,33 @@ beforeEach(async () => {
   shop = await makeShop(db);
 });
 
-const plater = () => ({ shopId: shop.shopId, memberId: shop.members.plater.memberId, now: TEST_NOW + 120_000, asTrainee: false });
+const plater = () => ({
+  shopId: shop.shopId,
+  memberId: shop.members.plater.memberId,
+  now: TEST_NOW + 120_000,
+  asTrainee: false,
+});
 const senior = () => ({ ...plater(), memberId: shop.members.senior.memberId });
 const row = (ref: string) => db.select().from(cases).where(eq(cases.ref, ref)).get();
 const eventsOf = (id: number) =>
-  db.select({ event: caseEvents.event, from: caseEvents.fromState, to: caseEvents.toState }).from(caseEvents).where(eq(caseEvents.caseId, id)).all();
+  db
+    .select({ event: caseEvents.event, from: caseEvents.fromState, to: caseEvents.toState })
+    .from(caseEvents)
+    .where(eq(caseEvents.caseId, id))
+    .all();
 
 function tickAll(ref: string, minutes = 10): void {
-  const card = db.select().from(reworkCards).where(eq(reworkCards.caseId, requireCase(db, shop.shopId, ref).id)).all().at(-1);
-  for (const step of db.select().from(reworkSteps).where(eq(reworkSteps.cardId, card?.id ?? 0)).all()) {
+  const card = db
+    .select()
+    .from(reworkCards)
+    .where(eq(reworkCards.caseId, requireCase(db, shop.shopId, ref).id))
+    .all()
+    .at(-1);
+  for (const step of db
+    .select()
+    .from(reworkSteps)
+    .where(eq(reworkSteps.cardId, card?.id ?? 0))
+    .all()) {
     tickStep(db, plater(), requireCase(db, shop.shopId, ref), { stepId: step.id, spentMinutes: minutes });
   }
 }
@@ -66,7 +93,7 @@ describe("opening a case", () => {
   it("will not take a photo that hangs on another case", () => {
     const snap = makeSnap(shop);
     makeCase(db, shop, { photoIds: snap.photoIds });
-    expect(() => makeCase(db, shop, { photoIds: snap.photoIds })).toThrow(/already on another case/);
+    expect(() => makeCase(db, shop, { photoIds: snap.photoIds })).toThrow(/belongs to another case/);
   });
 });
 
@@ -74,10 +101,16 @@ describe("the second look", () => {
   it("confirms class, cause and card, and lets only one of two seniors through", () => {
     const held = makeCase(db, shop);
     confirmFor(db, shop, held);
-    expect(row(held.ref)).toMatchObject({ state: "confirmed", confirmedClass: "underactivation", selfConfirmed: false });
+    expect(row(held.ref)).toMatchObject({
+      state: "confirmed",
+      confirmedClass: "underactivation",
+      selfConfirmed: false,
+    });
     expect(db.select().from(reworkSteps).all()).toHaveLength(2);
     // The second senior still has the row as it was held.
-    expect(() => confirmCase(db, senior(), held, makeConfirmation(db, shop, held.ref))).toThrow(/changed this case a moment ago/);
+    expect(() => confirmCase(db, senior(), held, makeConfirmation(db, shop, held.ref))).toThrow(
+      /changed this case a moment ago/,
+    );
     expect(db.select().from(reworkCards).all()).toHaveLength(1);
   });
 
@@ -96,7 +129,12 @@ describe("the second look", () => {
   it("releases a sound part without cost", () => {
     const held = makeCase(db, shop);
     releaseCase(db, senior(), held, "Only a reflection");
-    expect(row(held.ref)).toMatchObject({ state: "closed", closing: "released", confirmedClass: "sound", costCents: 0 });
+    expect(row(held.ref)).toMatchObject({
+      state: "closed",
+      closing: "released",
+      confirmedClass: "sound",
+      costCents: 0,
+    });
   });
 
   it("closes scrap at once, with its reason, at the parts' value or more", () => {
@@ -114,11 +152,23 @@ describe("the rework card", () => {
     confirmFor(db, shop, held);
     const steps = db.select().from(reworkSteps).all();
     const confirmed = requireCase(db, shop.shopId, held.ref);
-    expect(() => tickStep(db, plater(), confirmed, { stepId: steps[1]?.id ?? 0, spentMinutes: 5 })).toThrow(/earlier one is not/);
+    expect(() => tickStep(db, plater(), confirmed, { stepId: steps[1]?.id ?? 0, spentMinutes: 5 })).toThrow(
+      /earlier one is not/,
+    );
     tickAll(held.ref, 15);
-    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), { ref: held.ref, outcome: "sound", note: "", photoIds: [crypto.randomUUID()] });
+    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), {
+      ref: held.ref,
+      outcome: "sound",
+      note: "",
+      photoIds: [crypto.randomUUID()],
+    });
     expect(row(held.ref)).toMatchObject({ state: "closed", closing: "sound", costBasis: "recorded" });
-    const labour = db.select().from(caseCosts).all().at(-1)?.lines.find((line) => line.name === "Labour");
+    const labour = db
+      .select()
+      .from(caseCosts)
+      .all()
+      .at(-1)
+      ?.lines.find((line) => line.name === "Labour");
     // 30 minutes at the starting rate of 5200 cents an hour.
     expect(labour?.meanCents).toBe(2600);
   });
@@ -127,11 +177,21 @@ describe("the rework card", () => {
     const held = makeCase(db, shop);
     confirmFor(db, shop, held);
     tickAll(held.ref);
-    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), { ref: held.ref, outcome: "same-fault", note: "still hazy", photoIds: [] });
+    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), {
+      ref: held.ref,
+      outcome: "same-fault",
+      note: "still hazy",
+      photoIds: [],
+    });
     expect(row(held.ref)).toMatchObject({ state: "held", round: 2 });
     confirmFor(db, shop, requireCase(db, shop.shopId, held.ref));
     tickAll(held.ref);
-    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), { ref: held.ref, outcome: "sound", note: "clean", photoIds: [] });
+    recordOutcome(db, plater(), requireCase(db, shop.shopId, held.ref), {
+      ref: held.ref,
+      outcome: "sound",
+      note: "clean",
+      photoIds: [],
+    });
     expect(row(held.ref)).toMatchObject({ state: "closed", closing: "sound", round: 2 });
     expect(db.select().from(reworkCards).all()).toHaveLength(2);
   });
@@ -167,7 +227,13 @@ describe("history", () => {
 
   it("keeps the value before a correction", () => {
     const held = makeCase(db, shop);
-    amendCase(db, plater(), held, { ref: held.ref, quantity: 5, baseMetal: "bronze", stageFound: "at-strike", note: "counted again" });
+    amendCase(db, plater(), held, {
+      ref: held.ref,
+      quantity: 5,
+      baseMetal: "bronze",
+      stageFound: "at-strike",
+      note: "counted again",
+    });
     expect(row(held.ref)).toMatchObject({ quantity: 5, baseMetal: "bronze", note: "counted again" });
     const last = db.select().from(caseEvents).all().at(-1);
     expect(last).toMatchObject({ event: "amended", detail: { before: { quantity: 3, baseMetal: "brass" } } });
