@@ -5,7 +5,8 @@ import { markMemberRemoved } from "@/db/queries/crew-changes";
 import { cases, jobs, outbox } from "@/db/schema";
 import { chooseMails } from "@/lib/server/crew/account";
 import { announceConfirmed } from "@/lib/server/mail/announce-confirmed";
-import { announceHeldCase, secondLookDigestJob } from "@/lib/server/mail/announce-held";
+import { announceHeldCase } from "@/lib/server/mail/announce-held";
+import { secondLookDigestJob } from "@/lib/server/mail/second-look-digest";
 import { insertShop } from "@/tests/fixtures/crew-factory";
 import { confirmFor, emptyDatabase, makeCase, makeShop, type TestShop } from "@/tests/fixtures/shop-factory";
 
