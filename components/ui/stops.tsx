@@ -6,7 +6,8 @@ export interface StopsProps {
   legend?: string;
   hideLegend?: boolean;
   defaultValue?: Sureness;
-  value?: Sureness;
+  /** Null: none yet, and the component is controlled all the same. */
+  value?: Sureness | null;
   onChange?: (event: ChangeEvent<HTMLInputElement>) => void;
   error?: string;
 }
