@@ -108,7 +108,8 @@ function claimOne(tx: Handle, claim: Claim, id: string, position: number): void 
     .where(eq(photos.id, id))
     .get();
   const isMine = row?.shopId === shopId && row.memberId === memberId && (row.caseId ?? caseId) === caseId;
-  if (!isMine) throw fault("conflict", `Photo ${position + 1} belongs to another case. Take it away and take a new one.`);
+  if (!isMine)
+    throw fault("conflict", `Photo ${position + 1} belongs to another case. Take it away and take a new one.`);
   tx.update(photos)
     .set(place)
     .where(and(eq(photos.shopId, shopId), eq(photos.id, id), isNull(photos.caseId)))
@@ -151,9 +152,7 @@ export function acceptPhoto(tx: Handle, photo: Accepted): boolean {
   const updated = tx
     .update(photos)
     .set({ fileName, bytes, format, width, height, takenAt, placeholder, state: "processing", refusal: null })
-    .where(
-      and(eq(photos.shopId, photo.shopId), eq(photos.id, photo.id), inArray(photos.state, ["awaited", "refused"])),
-    )
+    .where(and(eq(photos.shopId, photo.shopId), eq(photos.id, photo.id), inArray(photos.state, ["awaited", "refused"])))
     .run();
   return updated.changes > 0;
 }
@@ -180,7 +179,9 @@ export function showPhoto(tx: Handle, shopId: number, id: string, sizes: StoredS
     .where(and(eq(photos.shopId, shopId), eq(photos.id, id), eq(photos.state, "processing")))
     .run();
   if (updated.changes === 0) return false;
-  tx.delete(photoSizes).where(and(eq(photoSizes.shopId, shopId), eq(photoSizes.photoId, id))).run();
+  tx.delete(photoSizes)
+    .where(and(eq(photoSizes.shopId, shopId), eq(photoSizes.photoId, id)))
+    .run();
   tx.insert(photoSizes)
     .values(sizes.map((each) => ({ ...each, shopId, photoId: id })))
     .run();

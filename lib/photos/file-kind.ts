@@ -1,17 +1,6 @@
 /** What a file is by its first bytes, whatever its name says. */
 export type FileKind =
-  | "jpeg"
-  | "png"
-  | "webp"
-  | "heif"
-  | "gif"
-  | "tiff"
-  | "pdf"
-  | "svg"
-  | "html"
-  | "video"
-  | "archive"
-  | "unknown";
+  "jpeg" | "png" | "webp" | "heif" | "gif" | "tiff" | "pdf" | "svg" | "html" | "video" | "archive" | "unknown";
 
 /** How many first bytes `fileKind` wants. */
 export const HEAD_BYTES = 1024;

@@ -2,7 +2,16 @@
  * A JPEG without what the camera wrote into it, bit for bit the same picture (ITU T.81, annex B).
  */
 
-const MARKER = { app0: 0xe0, app2: 0xe2, app14: 0xee, app15: 0xef, com: 0xfe, sos: 0xda, eoi: 0xd9, soi: 0xd8 } as const;
+const MARKER = {
+  app0: 0xe0,
+  app2: 0xe2,
+  app14: 0xee,
+  app15: 0xef,
+  com: 0xfe,
+  sos: 0xda,
+  eoi: 0xd9,
+  soi: 0xd8,
+} as const;
 const ICC_NAME = "ICC_PROFILE\0";
 /** An APP2 segment holds 65 535 bytes with its length, name and two counters (ICC.1:2022, annex B.4). */
 const ICC_CHUNK_BYTES = 65_535 - 2 - ICC_NAME.length - 2;

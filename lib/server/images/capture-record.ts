@@ -27,7 +27,10 @@ function cameraTimeAt(exif: Buffer | undefined, timeZone: string): number | null
   const shown = photo?.DateTimeOriginal;
   if (!(shown instanceof Date)) return null;
   const offset = photo?.OffsetTimeOriginal;
-  return captureTimeAt({ wallClockMs: shown.getTime(), offset: typeof offset === "string" ? offset : undefined }, timeZone);
+  return captureTimeAt(
+    { wallClockMs: shown.getTime(), offset: typeof offset === "string" ? offset : undefined },
+    timeZone,
+  );
 }
 
 function parseExif(exif: Buffer) {

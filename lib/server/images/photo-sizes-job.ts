@@ -27,7 +27,8 @@ export async function photoSizesJob(db: Db, payload: unknown, now: number, root 
   const { photoId: id, shopId } = readPhotoJob(payload);
   const received = inUploads(root, receivedPath(shopId, id));
   if (getPhoto(db, shopId, id)?.state !== "processing") return removeFile(received);
-  if (!(await exists(received))) throw fault("broken", "The photo's file is gone from the server. Take the photo again.");
+  if (!(await exists(received)))
+    throw fault("broken", "The photo's file is gone from the server. Take the photo again.");
   const made = await pictureSlot(() => makeSizes(received));
   const stored = made.map(({ content, ...size }) => ({
     ...size,

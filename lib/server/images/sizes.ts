@@ -67,7 +67,11 @@ async function makeOriginal(file: string): Promise<MadeSize> {
   if (metadata.format === "webp") {
     return encode("original", picture.webp({ quality: ORIGINAL_JPEG_QUALITY, effort: 2 }), "image/webp");
   }
-  return encode("original", picture.flatten({ background: PAPER }).jpeg({ quality: ORIGINAL_JPEG_QUALITY }), "image/jpeg");
+  return encode(
+    "original",
+    picture.flatten({ background: PAPER }).jpeg({ quality: ORIGINAL_JPEG_QUALITY }),
+    "image/jpeg",
+  );
 }
 
 async function cleanBytes(file: string, { format, orientation = 1, space }: Metadata): Promise<Uint8Array | null> {

@@ -2,7 +2,7 @@ import "server-only";
 import type { NextRequest } from "next/server";
 import { createRouteHandler, createUploadthing, UTFiles } from "uploadthing/next";
 import { UploadThingError } from "uploadthing/server";
-import { getPhoto, getPhotoOwner } from "@/db/queries/photos";
+import { getPhoto, getPhotoOwner, refusePhoto } from "@/db/queries/photos";
 import { getUploadedFile } from "@/db/queries/uploads";
 import type { SignedIn } from "@/db/queries/crew";
 import { FaultError, fault } from "@/lib/fault";
@@ -70,9 +70,13 @@ function admit(desk: Desk, member: SignedIn | undefined, input: PhotoUploadInput
   if (!member) throw kitError(fault("signed-out", "You are signed out. Sign in again; your photos stay on this phone."));
   const [file] = files;
   if (!file || files.length > 1) throw kitError(fault("invalid", REFUSALS.oneAtATime));
-  const refusal = refusalBeforeSending(file);
-  if (refusal) throw kitError(fault("unsupported", refusal));
   if (!isMine(desk, member, input.photoId)) throw kitError(fault("refused", REFUSALS.notYours));
+  const refusal = refusalBeforeSending(file);
+  if (refusal) {
+    // A case that awaits this very photo says why it never came.
+    refusePhoto(desk.db, member.shopId, input.photoId, refusal);
+    throw kitError(fault("unsupported", refusal));
+  }
   const { photoId, purpose, takenAt = null } = input;
   const ticket: UploadTicket = { photoId, shopId: member.shopId, memberId: member.memberId, purpose, takenAt };
   return { ...ticket, [UTFiles]: [{ ...file, customId: photoId }] };
