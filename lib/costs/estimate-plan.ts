@@ -1,17 +1,11 @@
-import { intervalOf, pertMean, timesFactor, type ThreePoint } from "@/lib/costs/pert";
+import { intervalOf, pertMean, type ThreePoint } from "@/lib/costs/pert";
 import type { CheckedRework } from "@/lib/costs/rework-input";
-import {
-  COST_LINE_KEYS,
-  COST_LINES,
-  lostShare,
-  reworkTerms,
-  type CostLine,
-  type ReworkTerm,
-} from "@/lib/costs/rework-terms";
+import { tallyTerms, type AllowedPlan, type NamedRange, type Tally } from "@/lib/costs/rework-tally";
+import { COST_LINE_KEYS, COST_LINES, lostShare, type CostLine } from "@/lib/costs/rework-terms";
 import type { StripMethod } from "@/lib/costs/strip-methods";
-import { cautionsFor, sourcesFor, type StripPlan } from "@/lib/costs/strip-plan";
+import { cautionsFor, sourcesFor } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
-import { centsForMinutes, splitCents } from "@/lib/money";
+import { splitCents } from "@/lib/money";
 import type { Layer } from "@/lib/plating/deposit-stack";
 import { layerMassG } from "@/lib/plating/faraday";
 import { metalOf } from "@/lib/plating/metals";
@@ -43,8 +37,6 @@ export interface ReworkEstimate {
 
 /** Said on every estimate that had to leave scrap risk out. */
 export const NO_PART_VALUE = "No part value given: scrap risk is left out.";
-
-export type AllowedPlan = Extract<StripPlan, { allowed: true }>;
 
 /** The figures of one way, without the words: what is compared, summed and stored. */
 export type ReworkFigures = Omit<ReworkEstimate, "widest" | "spread" | "cautions" | "sources" | "assumed"> & {
@@ -91,52 +83,6 @@ export function describeEstimate(facts: CheckedRework, plan: AllowedPlan, figure
     sources: [...sourcesFor(plan.steps), facts.times.source],
     assumed: facts.partValueStated ? [] : [NO_PART_VALUE],
   };
-}
-
-/** One uncertain thing and the cents that it may cost at least and at most. */
-export interface NamedRange {
-  name: string;
-  low: number;
-  high: number;
-}
-
-interface Tally {
-  meanByLine: Record<CostLine, number>;
-  handsOn: ThreePoint;
-  tank: ThreePoint;
-  /** Least and most cents of each term. */
-  ranges: NamedRange[];
-}
-
-function tallyTerms(facts: CheckedRework, plan: AllowedPlan): Tally {
-  const tally: Tally = {
-    meanByLine: { labour: 0, line: 0, metalWrittenOff: 0, metalAgain: 0, chemistry: 0, waste: 0, scrapRisk: 0 },
-    handsOn: { low: 0, likely: 0, high: 0 },
-    tank: { low: 0, likely: 0, high: 0 },
-    ranges: [],
-  };
-  for (const term of reworkTerms({ ...facts, method: plan.method, steps: plan.steps })) addTerm(tally, term, facts);
-  return tally;
-}
-
-function addTerm(tally: Tally, term: ReworkTerm, { rates, minutesCorrection }: CheckedRework): void {
-  const range: NamedRange = { name: term.name, low: 0, high: 0 };
-  const add = (line: CostLine, amount: ThreePoint) => {
-    tally.meanByLine[line] += pertMean(amount);
-    range.low += amount.low;
-    range.high += amount.high;
-  };
-  if (term.handsOnMinutes) {
-    const minutes = timesFactor(term.handsOnMinutes, minutesCorrection);
-    addTo(tally.handsOn, minutes);
-    add("labour", timesFactor(minutes, centsForMinutes(1, rates.labourCentsPerHour)));
-  }
-  if (term.tankMinutes) {
-    addTo(tally.tank, term.tankMinutes);
-    add("line", timesFactor(term.tankMinutes, centsForMinutes(1, rates.lineCentsPerHour)));
-  }
-  for (const { line, amount } of term.cents ?? []) add(line, amount);
-  tally.ranges.push(range);
 }
 
 function addThicknessRanges(tally: Tally, facts: CheckedRework, plan: AllowedPlan): void {
@@ -196,11 +142,6 @@ function sumOf(amounts: readonly number[]): number {
 }
 
 function withMean(minutes: ThreePoint): Minutes {
-  return { ...minutes, mean: pertMean(minutes) };
-}
-
-function addTo(total: ThreePoint, more: ThreePoint): void {
-  total.low += more.low;
-  total.likely += more.likely;
-  total.high += more.high;
+  const { low, likely, high } = minutes;
+  return { low, likely, high, mean: pertMean(minutes) };
 }

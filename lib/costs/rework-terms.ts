@@ -5,9 +5,9 @@ import { metalPrice, type ShopRates } from "@/lib/costs/rates";
 import type { ReworkTimes } from "@/lib/costs/rework-times";
 import type { StripMethod } from "@/lib/costs/strip-methods";
 import type { StripStep } from "@/lib/costs/strip-plan";
-import { layerMassG, plateForThickness } from "@/lib/plating/faraday";
+import { layerMassG } from "@/lib/plating/faraday";
 import { metalOf } from "@/lib/plating/metals";
-import { PLATE_PRACTICE } from "@/lib/plating/plate-practice";
+import { usualPlateMinutes } from "@/lib/plating/plate-practice";
 
 /** The lines of an estimate, in the order in which they are shown. */
 export const COST_LINES = {
@@ -130,16 +130,7 @@ function lineAgainTerm({ stageFound, quantity, areaDm2, times }: ReworkFacts): R
 
 function platingTerm({ steps, quantity, areaDm2, times }: ReworkFacts): ReworkTerm {
   let minutes = 0;
-  for (const { layer } of steps) {
-    const practice = PLATE_PRACTICE[layer.metal];
-    minutes += plateForThickness({
-      ...practice,
-      metal: layer.metal,
-      valence: layer.valence,
-      areaDm2: 1,
-      thicknessUm: layer.thicknessUm,
-    }).minutes;
-  }
+  for (const { layer } of steps) minutes += usualPlateMinutes(layer);
   const tank = timesFactor(times.platingTimeFactor, (minutes * quantity * areaDm2) / times.loadDm2);
   return { name: "Plating again", handsOnMinutes: timesFactor(tank, times.attendedShare), tankMinutes: tank };
 }

@@ -1,11 +1,6 @@
-import {
-  describeEstimate,
-  planFigures,
-  type AllowedPlan,
-  type ReworkEstimate,
-  type ReworkFigures,
-} from "@/lib/costs/estimate-plan";
+import { describeEstimate, planFigures, type ReworkEstimate, type ReworkFigures } from "@/lib/costs/estimate-plan";
 import { checkReworkInput, type CheckedRework, type ReworkInput } from "@/lib/costs/rework-input";
+import type { AllowedPlan } from "@/lib/costs/rework-tally";
 import { STRIP_METHODS, type StripMethod } from "@/lib/costs/strip-methods";
 import { planStrip, type StripPlan } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
