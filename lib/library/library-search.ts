@@ -1,16 +1,19 @@
 /** Search over classes, causes and fixes that knows the shop's words and forgives spelling. Pure: build once, ask often. */
-import Fuse from "fuse.js";
-import { ALLOY_NAMES } from "@/lib/library/alloy-names";
-import { BASE_METAL_TITLES, SYMPTOMS, type BaseMetal } from "@/lib/cases/case-words";
-import type { LibraryCause, LibraryClass, LibraryFix, Shelf } from "@/lib/library/library-entry";
-import { mendWords, searchWords, type Vocabulary } from "@/lib/library/search-words";
-
-export type LibraryEntries = Pick<Shelf, "classes" | "causes" | "fixes">;
+import Fuse, { type IFuseOptions } from "fuse.js";
+import {
+  documentsOf,
+  markBegun,
+  markWhole,
+  type LibraryEntries,
+  type SearchDocument,
+  type SearchPhrase,
+} from "@/lib/library/search-documents";
+import { mendWords, vocabularyOf } from "@/lib/library/search-words";
 
 export interface LibraryHit {
   slug: string;
   title: string;
-  kind: "class" | "cause" | "fix";
+  kind: SearchDocument["kind"];
   /** Slugs of the defect classes that the hit belongs to. */
   classes: string[];
   /** 0 is a perfect match, 1 none. Order only: not a probability. */
@@ -21,21 +24,30 @@ export interface LibraryHit {
 
 export type LibrarySearch = (typed: string) => LibraryHit[];
 
-/** One entry as it is searched. `names`, `also`, `metals` and `body` hold index words, not prose. */
-interface SearchDocument {
-  slug: string;
-  title: string;
-  kind: LibraryHit["kind"];
-  classes: string[];
-  phrases: { said: string; words: string[] }[];
-  names: string;
-  also: string;
-  metals: string;
-  body: string;
-  all: string;
-}
-
 const MOST_HITS = 24;
+
+/**
+ * Words are mended before Fuse sees them, so it may be strict: at its looser setting 'dust' answers for 'rust'.
+ * The looser one is kept for what the mending could not place.
+ */
+const MENDED_THRESHOLD = 0.1;
+
+const FUSE_OPTIONS: IFuseOptions<SearchDocument> = {
+  useTokenSearch: true,
+  ignoreLocation: true,
+  threshold: 0.35,
+  includeScore: true,
+  ignoreFieldNorm: true,
+  keys: [
+    { name: "names", weight: 3 },
+    { name: "also", weight: 4 },
+    { name: "metals", weight: 1 },
+    { name: "all", weight: 3 },
+  ],
+};
+
+/** How much of a hit's score a phrase that says exactly what was typed takes off. */
+const PHRASE_SHARE = 0.9;
 
 /**
  * Builds the search over a library. The result answers what was typed with the best hits first, at most 24;
@@ -44,106 +56,50 @@ const MOST_HITS = 24;
  */
 export function buildLibrarySearch(entries: LibraryEntries): LibrarySearch {
   const documents = documentsOf(entries);
-  const vocabulary = vocabularyOf(documents);
-  const fuse = new Fuse(documents, {
-    useTokenSearch: true,
-    ignoreLocation: true,
-    threshold: 0.35,
-    includeMatches: true,
-    includeScore: true,
-    ignoreFieldNorm: true,
-    keys: [
-      { name: "names", weight: 3 },
-      { name: "also", weight: 4 },
-      { name: "metals", weight: 1 },
-      { name: "body", weight: 1 },
-      { name: "all", weight: 3 },
-    ],
-  });
+  const vocabulary = vocabularyOf(documents.map((document) => document.prose));
+  const exact = new Fuse(documents, { ...FUSE_OPTIONS, threshold: MENDED_THRESHOLD });
+  const loose = new Fuse(documents, FUSE_OPTIONS, exact.getIndex());
   return (typed) => {
-    const words = mendWords(searchWords(typed), vocabulary);
+    const words = mendWords(typed, vocabulary);
     if (words.length === 0) return [];
-    return fuse.search(words.join(" "), { limit: MOST_HITS }).map(({ item, score }) => ({
-      slug: item.slug,
-      title: item.title,
-      kind: item.kind,
-      classes: item.classes,
-      score: score ?? 1,
-      matched: saidBest(item, words),
-    }));
+    const marked = words.map((word) => (vocabulary.stems.has(word) ? markWhole(word) : markBegun(word)));
+    const found = exact.search(marked.join(" "), { limit: MOST_HITS });
+    const results = found.length > 0 ? found : loose.search(words.join(" "), { limit: MOST_HITS });
+    return results.map(({ item, score }) => toHit(item, score ?? 1, words)).sort((a, b) => a.score - b.score);
   };
 }
 
-function documentsOf({ classes, causes, fixes }: LibraryEntries): SearchDocument[] {
-  const causeOf = new Map(causes.map((cause) => [cause.slug, cause]));
-  return [
-    ...classes.map(classDocument),
-    ...causes.map((cause) => causeDocument(cause, classes)),
-    ...fixes.map((fix) => fixDocument(fix, fix.causeSlugs.flatMap((slug) => causeOf.get(slug) ?? []))),
-  ];
+/** Fuse's score, lowered where one phrase of the entry says what was typed, raised where the words lie scattered. */
+function toHit(document: SearchDocument, score: number, words: readonly string[]): LibraryHit {
+  const { said, likeness } = phraseNearest(document, words);
+  return {
+    slug: document.slug,
+    title: document.title,
+    kind: document.kind,
+    classes: document.classes,
+    score: Math.min(1, score * (1 - PHRASE_SHARE * likeness ** 2)),
+    matched: said,
+  };
 }
 
-function classDocument(entry: LibraryClass): SearchDocument {
-  const symptoms = Object.values(SYMPTOMS).flatMap((symptom) => (symptom.glyph === entry.slug ? [symptom.words] : []));
-  return documentOf(entry.slug, entry.title, "class", [entry.slug], {
-    also: [...entry.synonyms, ...symptoms],
-    metals: [],
-    body: [entry.short, entry.atStrike, entry.inFinalPlate],
-  });
+/**
+ * The phrase of the entry most like what was typed, and how like (0 to 1: shared words over all words of both).
+ * A metal's name is said when nothing better is, but counts for nothing: it stands in too many entries.
+ * Failing that, the title: its prose answered.
+ */
+function phraseNearest(document: SearchDocument, words: readonly string[]): { said: string; likeness: number } {
+  const phrase = nearestOf(document.phrases, words);
+  if (phrase.likeness > 0) return phrase;
+  const metal = nearestOf(document.metalPhrases, words);
+  return { said: metal.likeness > 0 ? metal.said : document.title, likeness: 0 };
 }
 
-function causeDocument(entry: LibraryCause, classes: readonly LibraryClass[]): SearchDocument {
-  const titles = classes.flatMap((owner) => (entry.classSlugs.includes(owner.slug) ? [owner.title] : []));
-  return documentOf(entry.slug, entry.title, "cause", entry.classSlugs, {
-    also: entry.synonyms,
-    metals: entry.baseMetals.flatMap(namesOfMetal),
-    body: [entry.why, entry.proof, ...titles],
-  });
-}
-
-function fixDocument(entry: LibraryFix, causes: readonly LibraryCause[]): SearchDocument {
-  return documentOf(entry.slug, entry.title, "fix", [...new Set(causes.flatMap((cause) => cause.classSlugs))], {
-    also: entry.materials,
-    metals: [],
-    body: [...entry.steps.map((step) => step.title), ...causes.map((cause) => cause.title)],
-  });
-}
-
-function documentOf(
-  slug: string,
-  title: string,
-  kind: LibraryHit["kind"],
-  classes: string[],
-  texts: { also: readonly string[]; metals: readonly string[]; body: readonly string[] },
-): SearchDocument {
-  const index = (lines: readonly string[]) => lines.flatMap(searchWords).join(" ");
-  const names = index([title]);
-  const also = index(texts.also);
-  const metals = index(texts.metals);
-  const body = index(texts.body);
-  const phrases = [title, ...texts.also, ...texts.metals].map((said) => ({ said, words: searchWords(said) }));
-  return { slug, title, kind, classes, phrases, names, also, metals, body, all: [names, also, metals, body].join(" ") };
-}
-
-function namesOfMetal(metal: BaseMetal): string[] {
-  return [BASE_METAL_TITLES[metal], ...ALLOY_NAMES[metal]];
-}
-
-function vocabularyOf(documents: readonly SearchDocument[]): Vocabulary {
-  const counts = new Map<string, number>();
-  for (const document of documents) {
-    for (const word of new Set(document.all.split(" "))) counts.set(word, (counts.get(word) ?? 0) + 1);
+function nearestOf(phrases: readonly SearchPhrase[], words: readonly string[]): { said: string; likeness: number } {
+  let best = { said: "", likeness: 0 };
+  for (const phrase of phrases) {
+    const shared = words.filter((word) => phrase.words.some((own) => own.startsWith(word))).length;
+    const likeness = (2 * shared) / (words.length + Math.max(phrase.words.length, shared));
+    if (likeness > best.likeness) best = { said: phrase.said, likeness };
   }
-  return counts;
-}
-
-/** The phrase of the entry that shares most words with what was typed; its title when only its prose answered. */
-function saidBest(document: SearchDocument, words: readonly string[]): string {
-  let best = { said: document.title, shared: 0 };
-  for (const phrase of document.phrases) {
-    const hits = words.filter((word) => phrase.words.some((own) => own.startsWith(word))).length;
-    const shared = hits - phrase.words.length / 100;
-    if (hits > 0 && shared > best.shared) best = { said: phrase.said, shared };
-  }
-  return best.said;
+  return best;
 }

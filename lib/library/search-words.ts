@@ -3,9 +3,9 @@
  * no filler, and misspelt words mended against the library's own vocabulary.
  */
 
-/** Words that say nothing about a fault. 'no', 'not', 'won't', 'too' stay out of it: they do. */
+/** Words that say nothing about a fault. 'no', 'not', 'too' stay: they do. */
 const FILLER = new Set(
-  "a an and are as at be been but by for from get gets got had has have he her his how i if in into is it its just like me my of on or our out so some that the their them then there these they this those to up was we were what when where which who why will with would you your part parts job piece pieces".split(
+  "a an and any are as at be been but by can did do does for from get gets got had has have he her his how i if in into is it its just like me my of on or our out so some that the their them then there these they this those to up was we very were what when where which who why will with would you your part parts job piece pieces".split(
     " ",
   ),
 );
@@ -26,16 +26,30 @@ const ONE_SPELLING: Record<string, string> = {
   smokey: "smoky",
   zamac: "zamak",
   mazak: "zamak",
+  no: "not",
+  non: "not",
+  without: "not",
+  never: "not",
+  wont: "not",
+  cant: "not",
+  dont: "not",
+  doesnt: "not",
+  didnt: "not",
+  isnt: "not",
+  wouldnt: "not",
   amps: "current",
   volts: "voltage",
+  muriatic: "hydrochloric",
+  hcl: "hydrochloric",
+  h2so4: "sulfuric",
+  di: "deionized",
+  deionised: "deionized",
   inox: "stainless",
+  ss: "stainless",
 };
 
-/**
- * The index words of a text, in order, filler left out. Empty text gives none. Text that is all filler keeps its words.
- * @example searchWords("It won't take on the 304 parts") // ["wont", "tak", "304"]
- */
-export function searchWords(text: string): string[] {
+/** The words of a text as written, one spelling each, filler left out unless there is nothing else. */
+export function plainWords(text: string): string[] {
   const plain = text
     .toLowerCase()
     .normalize("NFD")
@@ -44,49 +58,78 @@ export function searchWords(text: string): string[] {
     .filter((word) => word.length > 0)
     .map((word) => ONE_SPELLING[word] ?? word);
   const telling = plain.filter((word) => !FILLER.has(word));
-  return (telling.length > 0 ? telling : plain).map(stem);
+  return telling.length > 0 ? telling : plain;
+}
+
+/**
+ * The words of a text as they are indexed: `plainWords`, cut to their stems.
+ * @example searchWords("It won't take on the 304 parts") // ["not", "tak", "304"]
+ */
+export function searchWords(text: string): string[] {
+  return plainWords(text).map(stem);
 }
 
 /** Cuts the endings that shops vary: peels, peeling, peeled → peel; haze, hazy → haz. Words with digits stay whole. */
 function stem(word: string): string {
   if (/\d/.test(word) || word.length < 4) return word;
   const single = word.replace(/(?<=[^s])s$/, "");
-  const verb = single.length > 5 ? single.replace(/(ing|ed)$/, "") : single;
-  const even = verb !== single ? verb.replace(/([bdgklmnprt])\1$/, "$1") : verb;
-  return even.length > 3 ? even.replace(/(ie|e|y)$/, "") : even;
+  const cut = single.replace(/(ing|ed|ish|[iy]?ness)$/, "");
+  const base = cut.length > 2 && /[aeiouy]/.test(cut) ? cut : single;
+  const bare = base.length > 3 ? base.replace(/(ie|e|y)$/, "") : base;
+  return bare === single ? bare : bare.replace(/([bdgklmnprt])\1$/, "$1");
 }
 
-/** Every index word of the library with how many entries hold it. */
-export type Vocabulary = ReadonlyMap<string, number>;
+/** Every word of the library as written, with how often it stands there, and all their stems. */
+export interface Vocabulary {
+  words: ReadonlyMap<string, number>;
+  stems: ReadonlySet<string>;
+}
+
+export function vocabularyOf(texts: Iterable<string>): Vocabulary {
+  const words = new Map<string, number>();
+  for (const text of texts) for (const word of plainWords(text)) words.set(word, (words.get(word) ?? 0) + 1);
+  return { words, stems: new Set([...words.keys()].map(stem)) };
+}
 
 /**
- * Mends misspelt words: each word that the vocabulary neither holds nor continues becomes its nearest one or two.
- * A word with nothing near is dropped unless nothing else is left. Words with digits are never mended.
+ * The index words of what was typed, misspelt ones mended: a word that the library neither holds nor continues becomes
+ * the two words it was run together from, or its nearest one or two. A word with nothing near is dropped unless nothing
+ * else is left. Words with digits are never mended.
  */
-export function mendWords(words: readonly string[], vocabulary: Vocabulary): string[] {
-  const mended = words.flatMap((word) => (isKnown(word, vocabulary) ? [word] : nearest(word, vocabulary)));
-  return mended.length > 0 ? [...new Set(mended)] : [...words];
+export function mendWords(typed: string, vocabulary: Vocabulary): string[] {
+  const words = plainWords(typed);
+  const mended = words.flatMap((word) => (isKnown(word, vocabulary) ? [word] : mendWord(word, vocabulary)));
+  return [...new Set((mended.length > 0 ? mended : words).map(stem))];
 }
 
 function isKnown(word: string, vocabulary: Vocabulary): boolean {
-  if (vocabulary.has(word) || /\d/.test(word)) return true;
-  for (const known of vocabulary.keys()) {
-    if (known.startsWith(word) || (word.length >= 5 && known.includes(word))) return true;
-  }
+  if (vocabulary.words.has(word) || vocabulary.stems.has(stem(word)) || /\d/.test(word)) return true;
+  for (const known of vocabulary.words.keys()) if (known.startsWith(word)) return true;
   return false;
+}
+
+function mendWord(word: string, vocabulary: Vocabulary): string[] {
+  for (let at = 3; at <= word.length - 3; at += 1) {
+    const halves = [word.slice(0, at), word.slice(at)];
+    if (halves.every((half) => vocabulary.words.has(half))) return halves;
+  }
+  return nearest(word, vocabulary);
 }
 
 const MOST_MENDINGS = 2;
 
 function nearest(word: string, vocabulary: Vocabulary): string[] {
   const found: { known: string; far: number; count: number }[] = [];
-  for (const [known, count] of vocabulary) {
+  for (const [known, count] of vocabulary.words) {
     const far = distance(word, known);
     if (far !== null) found.push({ known, far, count });
   }
   found.sort((a, b) => a.far - b.far || b.count - a.count || a.known.localeCompare(b.known));
   const best = found[0]?.far;
-  return found.filter((near) => near.far === best).slice(0, MOST_MENDINGS).map((near) => near.known);
+  return found
+    .filter((near) => near.far === best)
+    .slice(0, MOST_MENDINGS)
+    .map((near) => near.known);
 }
 
 /** How far apart two words are, or null when too far to be the same word misspelt. */
@@ -95,9 +138,9 @@ function distance(typed: string, known: string): number | null {
   const allowed = typed.length < 6 ? 1 : typed.length < 10 ? 2 : 3;
   if (Math.abs(typed.length - known.length) > allowed) return null;
   const edits = editDistance(typed, known);
+  if (lettersSorted(typed) === lettersSorted(known)) return 1;
   if (edits <= allowed) return typed[0] === known[0] ? edits : edits + 0.5;
-  if (lettersSorted(typed) === lettersSorted(known)) return 1.25;
-  return soundOf(typed) === soundOf(known) ? 1.75 : null;
+  return soundOf(typed) === soundOf(known) ? 1.25 : null;
 }
 
 /** Optimal string alignment: insertions, deletions, changes and swaps of neighbours, each one edit. */

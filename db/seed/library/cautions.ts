@@ -1,7 +1,12 @@
 /** Cautions by key. A step names those it needs; the screen shows them beside the step. 'stop' means: not without the named condition. */
 import type { LibraryCaution } from "@/lib/library/library-entry";
 
-const stop = (key: string, sourceKey: string, text: string): LibraryCaution => ({ key, level: "stop", text, sourceKey });
+const stop = (key: string, sourceKey: string, text: string): LibraryCaution => ({
+  key,
+  level: "stop",
+  text,
+  sourceKey,
+});
 const care = (key: string, sourceKey: string, text: string): LibraryCaution => ({
   key,
   level: "caution",
@@ -48,16 +53,16 @@ export const cautions: LibraryCaution[] = [
   stop(
     "persulfate",
     "common-practice",
-    "Persulfate is a strong oxidiser and its bath heats up as it works. Make it fresh, leave it uncovered, never bottle the spent bath, keep organics and acid away. With ammonia it needs ventilation.",
+    "Persulfate is a strong oxidiser and its bath heats up as it works. Make it fresh, leave it uncovered, never bottle the spent bath, keep organics, acid and cyanide away. With ammonia it needs ventilation.",
   ),
   care(
     "acid-splash",
-    "osha-1000",
+    "common-practice",
     "Acid: gloves, apron, goggles and face shield, exhaust running. Add acid to water, never water to acid. Eyewash within reach.",
   ),
   care(
     "hot-alkali",
-    "osha-1000",
+    "common-practice",
     "Hot alkaline cleaner burns skin and eyes, and its mist burns the throat. Face shield and gloves; exhaust on. It dissolves aluminium and zinc with hydrogen gas: no flame or spark.",
   ),
   care(

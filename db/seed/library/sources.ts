@@ -4,7 +4,11 @@ import type { LibrarySource } from "@/lib/library/library-entry";
 const published = (key: string, citation: string): LibrarySource => ({ key, kind: "published", citation });
 
 export const sources: LibrarySource[] = [
-  { key: "common-practice", kind: "common-practice", citation: "Common practice in plating shops; no single document." },
+  {
+    key: "common-practice",
+    kind: "common-practice",
+    citation: "Common practice in plating shops; no single document.",
+  },
   {
     key: "from-memory",
     kind: "from-memory",
@@ -14,17 +18,29 @@ export const sources: LibrarySource[] = [
     "guidebook-copper",
     "Surface Finishing Guidebook, 2011-12 and 2012-13 editions, copper plating: Tables I, II, III and VI.",
   ),
-  published("guidebook-aluminium", "Surface Finishing Guidebook, 2011-12 edition, preparation of aluminium for plating."),
+  published(
+    "guidebook-aluminium",
+    "Surface Finishing Guidebook, 2011-12 edition, preparation of aluminium for plating.",
+  ),
   published("guidebook-brush", "Surface Finishing Guidebook, 2011-12 edition, brush plating."),
-  published("astm-b322", "ASTM B322, guide for cleaning metals before electroplating (scope read; clauses from memory)."),
+  published(
+    "astm-b322",
+    "ASTM B322, guide for cleaning metals before electroplating (scope read; clauses from memory).",
+  ),
   published("astm-b183", "ASTM B183, preparation of low-carbon steel for electroplating (from memory)."),
   published("astm-b242", "ASTM B242, preparation of high-carbon steel for electroplating (from memory)."),
   published("astm-b252", "ASTM B252, preparation of zinc alloy die castings for electroplating (scope read)."),
   published("astm-b253", "ASTM B253-11, preparation of aluminium alloys for electroplating (scope read)."),
-  published("astm-b254", "ASTM B254, preparation of and electroplating on stainless steel (scope, clauses 4 and 7 read)."),
+  published(
+    "astm-b254",
+    "ASTM B254, preparation of and electroplating on stainless steel (scope, clauses 4 and 7 read).",
+  ),
   published("astm-b281", "ASTM B281, preparation of copper and copper-base alloys for electroplating (scope read)."),
   published("astm-b571", "ASTM B571, qualitative adhesion testing of metallic coatings (public summary read)."),
-  published("astm-b849", "ASTM B849, stress relief of iron and steel before coating; ISO 9587 is its equal (scope read)."),
+  published(
+    "astm-b849",
+    "ASTM B849, stress relief of iron and steel before coating; ISO 9587 is its equal (scope read).",
+  ),
   published(
     "astm-b850",
     "ASTM B850, bake of coated steel against hydrogen embrittlement; ISO 9588 is its equal. Table from a public bake chart; the 4 hours to the start from memory.",

@@ -50,10 +50,7 @@ export function rinse(title: string, { detail, minutes = 2, cautionKeys = [] }: 
 }
 
 /** An acid dip. Steel may be in any rack, so the hydrogen stop stands beside it unless the card is for another metal. */
-export function activate(
-  title: string,
-  { detail, minutes = 3, cautionKeys = ["embrittlement"] }: Detail,
-): FixStep {
+export function activate(title: string, { detail, minutes = 3, cautionKeys = ["embrittlement"] }: Detail): FixStep {
   return {
     title,
     detail,

@@ -1,6 +1,15 @@
 /** Bleed-out: solution that hid in a seam or pore comes back. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, mend, photographAndTape, polishBack, rinse, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  mend,
+  photographAndTape,
+  polishBack,
+  rinse,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const bleedOut: ShelfPart = {
   class: {
@@ -9,9 +18,13 @@ export const bleedOut: ShelfPart = {
     short: "A stain that creeps from a seam, hole or pore after the part was rinsed and dried.",
     atStrike:
       "Brown, green or white creeps out of a lap, solder line, crimp, thread or casting pore, wet at first, crusted later. Wipe it and it comes back within minutes to days. Copper right at the opening may be thin, dark or missing.",
-    inFinalPlate: "Spotting out: plated castings that left the shop clean show dark dots in store. Salts lift the plate around the opening, and gold goes green at the seam.",
+    inFinalPlate:
+      "Spotting out: plated castings that left the shop clean show dark dots in store. Salts lift the plate around the opening, and gold goes green at the seam.",
     tells: [
-      { versus: "water-spots", tell: "It starts at an opening and comes back after wiping. A water spot sits where a drop hung and stays away." },
+      {
+        versus: "water-spots",
+        tell: "It starts at an opening and comes back after wiping. A water spot sits where a drop hung and stays away.",
+      },
       { versus: "oxidation", tell: "Wet or crusted at its source, with a clear starting point. Oxidation has none." },
       { versus: "handling", tell: "It grows. A finger mark keeps its shape." },
     ],
@@ -20,11 +33,45 @@ export const bleedOut: ShelfPart = {
       "Warm the part gently (no hotter than the hand bears) and watch the seam.",
       "Loupe on a polished casting: pores in one region, often near the gate.",
     ],
-    prevention: ["Plate before assembly: seams are for after.", "Castings that need it are impregnated before they come.", "Hot and cold rinses by turns, long, after each tank; drain holes with the customer's leave."],
-    stripNote: "Each strip tank fills the pore again, so a part stripped for bleed-out may bleed worse. Dry it right out before deciding.",
+    prevention: [
+      "Plate before assembly: seams are for after.",
+      "Castings that need it are impregnated before they come.",
+      "Hot and cold rinses by turns, long, after each tank; drain holes with the customer's leave.",
+    ],
+    stripNote:
+      "Each strip tank fills the pore again, so a part stripped for bleed-out may bleed worse. Dry it right out before deciding.",
     otherLikelihood: 0.08,
     sourceKeys: ["astm-b252", "common-practice", "from-memory"],
-    synonyms: ["bleeding", "bleeds", "spotting out", "weeping", "weeping casting", "seeping", "oozing", "stain from a seam", "green at the seam", "comes back after wiping", "leaks out", "crusty seam", "salts at the joint", "creeping stain", "leaching"],
+    synonyms: [
+      "sweating",
+      "sweats",
+      "casting sweats",
+      "seam leaks",
+      "leaking seam",
+      "drips from a seam",
+      "stain out of the threads",
+      "keeps coming back",
+      "spots come back",
+      "stain from a joint",
+      "green ooze",
+      "trapped acid",
+      "trapped solution",
+      "bleeding",
+      "bleeds",
+      "spotting out",
+      "weeping",
+      "weeping casting",
+      "seeping",
+      "oozing",
+      "stain from a seam",
+      "green at the seam",
+      "comes back after wiping",
+      "leaks out",
+      "crusty seam",
+      "salts at the joint",
+      "creeping stain",
+      "leaching",
+    ],
     position: 9,
   },
   causes: [
@@ -38,7 +85,16 @@ export const bleedOut: ShelfPart = {
       likelihood: 0.36,
       baseMetals: ["zinc", "aluminium", "iron", "bronze", "brass", "pewter"],
       sourceKeys: ["astm-b252", "common-practice", "from-memory"],
-      synonyms: ["porosity", "porous", "pinholes in the casting", "sponge casting", "pores", "sand casting"],
+      synonyms: [
+        "casting sweats",
+        "porous casting stains",
+        "porosity",
+        "porous",
+        "pinholes in the casting",
+        "sponge casting",
+        "pores",
+        "sand casting",
+      ],
     },
     {
       slug: "seam-holds-solution",
@@ -50,7 +106,16 @@ export const bleedOut: ShelfPart = {
       likelihood: 0.31,
       baseMetals: ["steel", "brass", "copper", "nickel-silver", "silver", "stainless"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["crimped seam", "spot weld", "lap joint", "solder seam", "brazed joint", "rolled edge", "hem", "hollow handle"],
+      synonyms: [
+        "crimped seam",
+        "spot weld",
+        "lap joint",
+        "solder seam",
+        "brazed joint",
+        "rolled edge",
+        "hem",
+        "hollow handle",
+      ],
     },
     {
       slug: "hole-not-drained",
@@ -83,11 +148,29 @@ export const bleedOut: ShelfPart = {
       causeSlugs: ["casting-porous", "seam-holds-solution", "hole-not-drained"],
       title: "Pump the seam or pore out, dry, re-strike",
       steps: [
-        rinse("Hot and cold rinses by turns", { detail: "60 °C and cold, a minute each, five rounds; ultrasonic if there is one. Purified water last. pH paper reads neutral.", minutes: 12, cautionKeys: ["acid-cyanide"] }),
-        { title: "Dry right through", detail: "Warm air, 60 to 80 °C, an hour, seam down on white paper. No new stain means dry.", minutes: 5, perPart: false, cautionKeys: ["hot-part", "compressed-air"], station: "finish" },
+        rinse("Hot and cold rinses by turns", {
+          detail:
+            "60 °C and cold, a minute each, five rounds; ultrasonic if there is one. Purified water last. pH paper reads neutral.",
+          minutes: 12,
+          cautionKeys: ["acid-cyanide"],
+        }),
+        {
+          title: "Dry right through",
+          detail: "Warm air, 60 to 80 °C, an hour, seam down on white paper. No new stain means dry.",
+          minutes: 5,
+          perPart: false,
+          cautionKeys: ["hot-part", "compressed-air"],
+          station: "finish",
+        },
         polishBack({ detail: "Only the stained copper, wet, small pad." }),
-        clean("Short clean and activation", { detail: "Shortest times on the card; each tank goes into the seam again.", minutes: 5 }),
-        activate("Weakest activator that works", { detail: "10 to 20 s, then hot-cold rinsing once more." }),
+        clean("Short clean and activation", {
+          detail: "Shortest times on the card; each tank goes into the seam again.",
+          minutes: 5,
+        }),
+        activate("Weakest activator that works", {
+          detail:
+            "10 to 20 s, then hot-cold rinsing once more. Not if the opening bled alkali from a cyanide bath: acid in there makes the gas, and the senior decides.",
+        }),
         strike({ detail: "Then hot-cold rinse, dry, wait an hour on white paper before the part goes on." }),
       ],
       whenNot: "Not a third time: a part that bleeds after two rounds is for the senior and the customer.",
@@ -99,9 +182,20 @@ export const bleedOut: ShelfPart = {
       causeSlugs: ["casting-porous", "skin-polished-through"],
       title: "Seal the casting, with the customer's leave",
       steps: [
-        mend(null, "Ask first", { detail: "Impregnation, a sealed seam or a drain hole changes the part: written leave from the customer.", minutes: 10 }),
-        rinse("Pump and dry out", { detail: "Hot-cold rinses, then dry warm: a wet pore takes no resin.", minutes: 20, cautionKeys: ["hot-part"] }),
-        mend(null, "Impregnate", { detail: "At a shop equipped for vacuum resin. Surface washed and cured by them.", minutes: 30, cautionKeys: ["sheet"] }),
+        mend(null, "Ask first", {
+          detail: "Impregnation, a sealed seam or a drain hole changes the part: written leave from the customer.",
+          minutes: 10,
+        }),
+        rinse("Pump and dry out", {
+          detail: "Hot-cold rinses, then dry warm: a wet pore takes no resin.",
+          minutes: 20,
+          cautionKeys: ["hot-part"],
+        }),
+        mend(null, "Impregnate", {
+          detail: "At a shop equipped for vacuum resin. Surface washed and cured by them.",
+          minutes: 30,
+          cautionKeys: ["sheet"],
+        }),
         clean("Full clean: resin on the face dewets", { detail: "Water break must pass before the acid.", minutes: 8 }),
         activate("Activate for the alloy", { detail: "Line card time." }),
         strike({ detail: "Strike one first and wait a day." }),
@@ -115,8 +209,15 @@ export const bleedOut: ShelfPart = {
       causeSlugs: ["hole-not-drained"],
       title: "Rack so that it drains",
       steps: [
-        mend("rinse", "Holes down or sideways", { detail: "Tilt 15 degrees or more; a part that cannot turn gets a rubber plug rated for the tanks.", minutes: 10 }),
-        mend("rinse", "Tip at each rinse", { detail: "Three tips a rinse, and a spray into each hole.", minutes: 5, cautionKeys: ["acid-cyanide"] }),
+        mend("rinse", "Holes down or sideways", {
+          detail: "Tilt 15 degrees or more; a part that cannot turn gets a rubber plug rated for the tanks.",
+          minutes: 10,
+        }),
+        mend("rinse", "Tip at each rinse", {
+          detail: "Three tips a rinse, and a spray into each hole.",
+          minutes: 5,
+          cautionKeys: ["acid-cyanide"],
+        }),
         photographAndTape({ detail: "Paper wick in the hole: neutral before the part goes on." }),
       ],
       whenNot: "Not with plugs that trap air over a face that must plate.",
@@ -131,7 +232,11 @@ export const bleedOut: ShelfPart = {
         rinse("Pump and dry out first", { detail: "Copper over a wet pore is the next blister.", minutes: 12 }),
         rinseToWaterBreak(),
         activate("Gentle acid to the first gas", { detail: "0.25 to 1 % sulfuric for zinc.", cautionKeys: [] }),
-        strike({ detail: "3 to 5 µm strike-plate (guidebook), live entry; polish lightly, look with a loupe.", minutes: 20, cautionKeys: ["live-entry"] }),
+        strike({
+          detail: "3 to 5 µm strike-plate (guidebook), live entry; polish lightly, look with a loupe.",
+          minutes: 20,
+          cautionKeys: ["live-entry"],
+        }),
         photographAndTape({ detail: "A day on white paper before the final plate." }),
       ],
       whenNot: "Not pores that a loupe shows as holes: copper bridges them and they bleed later.",

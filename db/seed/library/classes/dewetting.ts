@@ -54,6 +54,12 @@ export const dewetting: ShelfPart = {
     otherLikelihood: 0.06,
     sourceKeys: ["astm-f22", "astm-f21", "astm-b322", "common-practice", "from-memory"],
     synonyms: [
+      "film tears",
+      "crawls",
+      "oil spots",
+      "water pulls away",
+      "beading up",
+      "round bare spots",
       "bare islands",
       "bare spots",
       "bare patches",
@@ -89,7 +95,20 @@ export const dewetting: ShelfPart = {
       likelihood: 0.26,
       baseMetals: ["steel", "iron", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium", "stainless"],
       sourceKeys: ["astm-b322", "common-practice", "from-memory"],
-      synonyms: ["dead cleaner", "tired cleaner", "weak soap", "cold cleaner", "electrocleaner old", "soak tank worn out", "degreaser"],
+      synonyms: [
+        "not clean",
+        "dirty part",
+        "poor cleaning",
+        "grease not removed",
+        "clean tank",
+        "dead cleaner",
+        "tired cleaner",
+        "weak soap",
+        "cold cleaner",
+        "electrocleaner old",
+        "soak tank worn out",
+        "degreaser",
+      ],
     },
     {
       slug: "oil-skin",
@@ -102,7 +121,14 @@ export const dewetting: ShelfPart = {
       likelihood: 0.2,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["oil film on the tank", "oil slick", "scum on the rinse", "floating oil", "rainbow on the water", "drag-out oil"],
+      synonyms: [
+        "oil film on the tank",
+        "oil slick",
+        "scum on the rinse",
+        "floating oil",
+        "rainbow on the water",
+        "drag-out oil",
+      ],
     },
     {
       slug: "buffing-compound-left",
@@ -115,7 +141,15 @@ export const dewetting: ShelfPart = {
       likelihood: 0.18,
       baseMetals: ["brass", "zinc", "copper", "nickel-silver", "aluminium", "silver", "gold", "steel", "pewter"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["polishing compound", "rouge", "tripoli", "buff grease", "compound in the letters", "wax in corners", "buffing wax"],
+      synonyms: [
+        "polishing compound",
+        "rouge",
+        "tripoli",
+        "buff grease",
+        "compound in the letters",
+        "wax in corners",
+        "buffing wax",
+      ],
     },
     {
       slug: "silicone-or-lacquer",
@@ -128,7 +162,14 @@ export const dewetting: ShelfPart = {
       likelihood: 0.1,
       baseMetals: ["brass", "silver", "zinc", "aluminium", "copper", "pewter"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["mold release", "silicone spray", "clear coat", "lacquered brass", "release agent", "antitarnish coating", "wd"],
+      synonyms: [
+        "mold release",
+        "silicone spray",
+        "clear coat",
+        "lacquered brass",
+        "release agent",
+        "antitarnish coating",
+      ],
     },
     {
       slug: "soap-set-by-acid",
@@ -141,7 +182,13 @@ export const dewetting: ShelfPart = {
       likelihood: 0.12,
       baseMetals: ["steel", "brass", "copper", "zinc", "aluminium", "nickel-silver", "bronze"],
       sourceKeys: ["astm-b322", "common-practice", "from-memory"],
-      synonyms: ["silicate film", "soap film", "cleaner dragged into acid", "white film after acid", "acid goes cloudy"],
+      synonyms: [
+        "silicate film",
+        "soap film",
+        "cleaner dragged into acid",
+        "white film after acid",
+        "acid goes cloudy",
+      ],
     },
     {
       slug: "strike-organics",
@@ -154,7 +201,14 @@ export const dewetting: ShelfPart = {
       likelihood: 0.08,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["oily air line", "blower oil", "dirty strike", "organic contamination", "strike needs carbon", "foam on the strike"],
+      synonyms: [
+        "oily air line",
+        "blower oil",
+        "dirty strike",
+        "organic contamination",
+        "strike needs carbon",
+        "foam on the strike",
+      ],
     },
   ],
   fixes: [
@@ -174,7 +228,8 @@ export const dewetting: ShelfPart = {
         }),
         rinseToWaterBreak(),
         activate("Activate for the alloy", {
-          detail: "The activator and time on the line card, no longer: polished metal needs less. Read the water break once more after it.",
+          detail:
+            "The activator and time on the line card, no longer: polished metal needs less. Read the water break once more after it.",
         }),
         strike({ detail: "Within 30 s of the acid rinse. First copper should show in about 30 s (common practice)." }),
         photographAndTape(),
@@ -200,12 +255,14 @@ export const dewetting: ShelfPart = {
           cautionKeys: ["hot-alkali", "waste"],
         }),
         mend("clean", "Prove it on a dirty coupon", {
-          detail: "Oil a scrap panel, clean it at the usual time, rinse, acid-dip, rinse, read the water break. Log date and result.",
+          detail:
+            "Oil a scrap panel, clean it at the usual time, rinse, acid-dip, rinse, read the water break. Log date and result.",
           minutes: 10,
           cautionKeys: ["hot-alkali", "acid-splash", "acid-cyanide"],
         }),
       ],
-      whenNot: "Leave the cleaner alone when a fresh beaker of it breaks water too: then look at silicone, or at what came before the line.",
+      whenNot:
+        "Leave the cleaner alone when a fresh beaker of it breaks water too: then look at silicone, or at what came before the line.",
       materials: ["cleaner concentrate", "titration kit", "checked thermometer", "scrap panel"],
       sourceKeys: ["astm-b322", "common-practice", "from-memory"],
     },
@@ -215,15 +272,18 @@ export const dewetting: ShelfPart = {
       title: "Take the oil off the tanks",
       steps: [
         mend("rinse", "Skim cleaner and rinses", {
-          detail: "Blot or skim until white paper stays clean. Wipe the tank walls at the waterline, where oil waits for the next rack.",
+          detail:
+            "Blot or skim until white paper stays clean. Wipe the tank walls at the waterline, where oil waits for the next rack.",
           cautionKeys: ["hot-alkali", "waste"],
         }),
         mend("rinse", "Make the rinse leave over the top", {
-          detail: "Feed at the bottom, overflow along the whole weir, opposite side. Turn the flow up until floating dust moves off.",
+          detail:
+            "Feed at the bottom, overflow along the whole weir, opposite side. Turn the flow up until floating dust moves off.",
           minutes: 20,
         }),
         mend("rinse", "Find where it comes from", {
-          detail: "Hoist oil, blower, parts that skipped the degrease. Write the source in the log; skimming alone buys one shift.",
+          detail:
+            "Hoist oil, blower, parts that skipped the degrease. Write the source in the log; skimming alone buys one shift.",
           minutes: 20,
         }),
       ],
@@ -236,7 +296,10 @@ export const dewetting: ShelfPart = {
       causeSlugs: ["buffing-compound-left"],
       title: "Dig the compound out, then re-strike",
       steps: [
-        polishBack({ detail: "Only around the islands, wet and fine. Keep the abrasive out of the letters, it packs them again.", minutes: 5 }),
+        polishBack({
+          detail: "Only around the islands, wet and fine. Keep the abrasive out of the letters, it packs them again.",
+          minutes: 5,
+        }),
         {
           title: "Soften and brush the detail",
           detail:
@@ -248,10 +311,13 @@ export const dewetting: ShelfPart = {
         },
         clean("Electroclean", { detail: "1 min at the line's setting, to lift what the brush loosened.", minutes: 4 }),
         rinseToWaterBreak({
-          detail: "Rinse into the detail with a spray. Drain and watch the letters: a film that draws back from one letter means brush again.",
+          detail:
+            "Rinse into the detail with a spray. Drain and watch the letters: a film that draws back from one letter means brush again.",
         }),
         activate("Activate for the alloy", { detail: "Line card time. Rinse the detail twice: it holds acid." }),
-        strike({ detail: "Look into the letters as the first copper comes; that is where it will fail again if it fails." }),
+        strike({
+          detail: "Look into the letters as the first copper comes; that is where it will fail again if it fails.",
+        }),
       ],
       whenNot: "Not on soft plated-over detail that a brush would scratch; use ultrasonic and time.",
       materials: ["compound remover", "soft brush", "fine wet paper", "solvent swabs"],
@@ -272,10 +338,15 @@ export const dewetting: ShelfPart = {
           cautionKeys: ["solvent", "polishing-dust", "sheet"],
           station: null,
         },
-        clean("Soak and electroclean", { detail: "Full line times in a tank you can spare: what is left of the silicone goes into it.", minutes: 8 }),
+        clean("Soak and electroclean", {
+          detail: "Full line times in a tank you can spare: what is left of the silicone goes into it.",
+          minutes: 8,
+        }),
         rinseToWaterBreak(),
         activate("Activate for the alloy", { detail: "Line card time, then two rinses." }),
-        strike({ detail: "One part first. If the same places stay bare, stop and repeat the solvent; do not run the rack." }),
+        strike({
+          detail: "One part first. If the same places stay bare, stop and repeat the solvent; do not run the rack.",
+        }),
       ],
       whenNot: "Not in the common cleaner if the part is soaked in silicone: it seeds the tank for a week.",
       materials: ["lacquer stripper or thinner", "silicone remover", "lint-free rags", "fine wet paper"],
@@ -286,13 +357,21 @@ export const dewetting: ShelfPart = {
       causeSlugs: ["soap-set-by-acid"],
       title: "Rinse the cleaner off before the acid",
       steps: [
-        polishBack({ detail: "Wet and fine, the whole face: the film lies under copper that looks good as well.", minutes: 6 }),
-        clean("Clean again", { detail: "Line times. A free-rinsing, low-silicate cleaner if you have one.", minutes: 6 }),
+        polishBack({
+          detail: "Wet and fine, the whole face: the film lies under copper that looks good as well.",
+          minutes: 6,
+        }),
+        clean("Clean again", {
+          detail: "Line times. A free-rinsing, low-silicate cleaner if you have one.",
+          minutes: 6,
+        }),
         rinse("Warm rinse, then cold, both flowing", {
           detail: "30 s at about 40 °C with movement, then 30 s cold. Warm water lets go of soap that cold water sets.",
           minutes: 3,
         }),
-        activate("Activate in acid that is clear", { detail: "Cloudy or scummed acid is set soap: change it first. Line card time." }),
+        activate("Activate in acid that is clear", {
+          detail: "Cloudy or scummed acid is set soap: change it first. Line card time.",
+        }),
         rinseToWaterBreak({ detail: "The water break that counts is this one, after the acid." }),
         strike({ detail: "Straight on, wet." }),
       ],
@@ -306,7 +385,8 @@ export const dewetting: ShelfPart = {
       title: "Carbon-treat the strike and mend the air",
       steps: [
         mend("strike", "Prove it in a beaker", {
-          detail: "One litre with 2 to 4 g activated carbon, stir 30 min, filter, strike a clean coupon. Go on only if it comes out whole.",
+          detail:
+            "One litre with 2 to 4 g activated carbon, stir 30 min, filter, strike a clean coupon. Go on only if it comes out whole.",
           minutes: 25,
           cautionKeys: ["cyanide", "acid-cyanide"],
         }),
@@ -317,7 +397,8 @@ export const dewetting: ShelfPart = {
           cautionKeys: ["cyanide", "acid-cyanide", "waste"],
         }),
         mend("strike", "Mend the air", {
-          detail: "Low-pressure blower, not the shop compressor; a filter in the line; white paper in the stream stays clean.",
+          detail:
+            "Low-pressure blower, not the shop compressor; a filter in the line; white paper in the stream stays clean.",
           minutes: 30,
         }),
         strike({ detail: "Clean coupon first, then one part, then the rack." }),

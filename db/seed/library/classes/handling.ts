@@ -1,6 +1,14 @@
 /** Handling: what touched the part left its shape. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, mend, photographAndTape, polishBack, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  mend,
+  photographAndTape,
+  polishBack,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const handling: ShelfPart = {
   class: {
@@ -9,18 +17,67 @@ export const handling: ShelfPart = {
     short: "A finger, glove, rack or knock left its own shape.",
     atStrike:
       "Ridges of a finger, weave of a glove, a line where a wire lay, a bright dent, a scratch with copper pushed aside. At the height where a hand or hook holds, on one part, not all.",
-    inFinalPlate: "A finger mark etches in and shows as a ghost through gold; a scratch through the strike is where an acid final bath attacks.",
+    inFinalPlate:
+      "A finger mark etches in and shows as a ghost through gold; a scratch through the strike is where an acid final bath attacks.",
     tells: [
-      { versus: "dewetting", tell: "It has the outline of what touched: ridges, weave, a line. Islands are round and shapeless." },
-      { versus: "no-deposit", tell: "One part, or wherever the hand was. A contact point is bare at the same place on all." },
+      {
+        versus: "dewetting",
+        tell: "It has the outline of what touched: ridges, weave, a line. Islands are round and shapeless.",
+      },
+      {
+        versus: "no-deposit",
+        tell: "One part, or wherever the hand was. A contact point is bare at the same place on all.",
+      },
       { versus: "oxidation", tell: "Colour stays inside the mark. Tarnish spreads over the face." },
     ],
-    checks: ["Lay the glove, hook or your own hand beside it: it fits or it does not.", "Loupe: ridges mean skin, weave means cloth, a burr means metal.", "Ask who moved it last, and how."],
-    prevention: ["Clean nitrile gloves from the last polish on; new pair after the cleaner.", "Hold by the rack; one clean tray with a soft liner.", "Place contacts where the drawing does not care."],
+    checks: [
+      "Lay the glove, hook or your own hand beside it: it fits or it does not.",
+      "Loupe: ridges mean skin, weave means cloth, a burr means metal.",
+      "Ask who moved it last, and how.",
+    ],
+    prevention: [
+      "Clean nitrile gloves from the last polish on; new pair after the cleaner.",
+      "Hold by the rack; one clean tray with a soft liner.",
+      "Place contacts where the drawing does not care.",
+    ],
     stripNote: "At the strike one spot polishes out in a minute. Through final plate it is a scratch in all layers.",
     otherLikelihood: 0.07,
     sourceKeys: ["common-practice", "from-memory"],
-    synonyms: ["fingerprint", "fingerprints", "finger marks", "thumb print", "thumbprint", "glove mark", "glove smudge", "smudge", "rack mark", "rack marks", "hook mark", "wire mark", "scratch", "scratches", "ding", "dent", "touched", "somebody touched it", "clip mark", "contact mark"],
+    synonyms: [
+      "finger mark",
+      "hand print",
+      "dropped",
+      "smear",
+      "touch mark",
+      "scuff",
+      "scuffed",
+      "nick",
+      "gouge",
+      "tong mark",
+      "grip mark",
+      "dropped on the floor",
+      "bruised",
+      "fingerprint",
+      "fingerprints",
+      "finger marks",
+      "thumb print",
+      "thumbprint",
+      "glove mark",
+      "glove smudge",
+      "smudge",
+      "rack mark",
+      "rack marks",
+      "hook mark",
+      "wire mark",
+      "scratch",
+      "scratches",
+      "ding",
+      "dent",
+      "touched",
+      "somebody touched it",
+      "clip mark",
+      "contact mark",
+    ],
     position: 11,
   },
   causes: [
@@ -56,7 +113,18 @@ export const handling: ShelfPart = {
       why: "A contact leaves a bare or burnt point; a wire that slips leaves a line.",
       proof: "The hook fits the mark. Same place, same size on parts from that rack.",
       likelihood: 0.21,
-      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "silver", "gold", "zinc", "aluminium"],
+      baseMetals: [
+        "steel",
+        "stainless",
+        "brass",
+        "bronze",
+        "copper",
+        "nickel-silver",
+        "silver",
+        "gold",
+        "zinc",
+        "aluminium",
+      ],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: ["hook mark", "wire mark", "clip mark", "rack tip mark", "witness mark", "jig mark"],
     },
@@ -79,10 +147,16 @@ export const handling: ShelfPart = {
       causeSlugs: ["bare-hand-touch", "dirty-glove", "rack-mark", "knocked-or-stacked"],
       title: "Spot polish, clean, re-strike",
       steps: [
-        polishBack({ detail: "Only the mark, wet 1200, feathered out. A dent or deep scratch: the senior decides on the base metal.", minutes: 3 }),
+        polishBack({
+          detail:
+            "Only the mark, wet 1200, feathered out. A dent or deep scratch: the senior decides on the base metal.",
+          minutes: 3,
+        }),
         clean("Electroclean", { detail: "1 min, new gloves from here on.", minutes: 4 }),
         rinseToWaterBreak(),
-        activate("Activate, low end of the time", { detail: "Old copper and bare spot together: the least time that takes." }),
+        activate("Activate, low end of the time", {
+          detail: "Old copper and bare spot together: the least time that takes.",
+        }),
         strike({ detail: "Contacts moved to another place." }),
         photographAndTape(),
       ],
@@ -95,9 +169,20 @@ export const handling: ShelfPart = {
       causeSlugs: ["bare-hand-touch", "dirty-glove", "knocked-or-stacked"],
       title: "Gloves at the cleaner, liners in the trays",
       steps: [
-        mend("clean", "Gloves by the cleaner exit", { detail: "Powder-free nitrile, changed at each break. They keep the part clean; acid and cyanide need the shop's chemical gloves.", minutes: 5, cautionKeys: ["sheet"] }),
-        mend("inspect", "Soft liners, one layer", { detail: "Clean foam or paper changed daily; parts do not touch.", minutes: 10 }),
-        mend("inspect", "Prove it on a wet panel", { detail: "Press the new glove on a clean panel: the film stays whole.", minutes: 3 }),
+        mend("clean", "Gloves by the cleaner exit", {
+          detail:
+            "Powder-free nitrile, changed at each break. They keep the part clean; acid and cyanide need the shop's chemical gloves.",
+          minutes: 5,
+          cautionKeys: ["sheet"],
+        }),
+        mend("inspect", "Soft liners, one layer", {
+          detail: "Clean foam or paper changed daily; parts do not touch.",
+          minutes: 10,
+        }),
+        mend("inspect", "Prove it on a wet panel", {
+          detail: "Press the new glove on a clean panel: the film stays whole.",
+          minutes: 3,
+        }),
       ],
       whenNot: "Not a reason to wear thin gloves over a tank.",
       materials: ["powder-free nitrile gloves", "tray liners"],
@@ -108,9 +193,17 @@ export const handling: ShelfPart = {
       causeSlugs: ["rack-mark"],
       title: "Move the contact, or hide it",
       steps: [
-        mend(null, "Find a place that does not show", { detail: "Hole, back or thread relief; ask the customer for a contact point on the drawing.", minutes: 10 }),
-        mend(null, "Spring that holds without a bite", { detail: "Sharp tips dressed, two contacts lighter than one hard one.", minutes: 15 }),
-        strike({ detail: "Shift the part halfway on jobs with no free place: out, activate again, new contact, back." }),
+        mend(null, "Find a place that does not show", {
+          detail: "Hole, back or thread relief; ask the customer for a contact point on the drawing.",
+          minutes: 10,
+        }),
+        mend(null, "Spring that holds without a bite", {
+          detail: "Sharp tips dressed, two contacts lighter than one hard one.",
+          minutes: 15,
+        }),
+        strike({
+          detail: "Shift the part halfway on jobs with no free place: out, activate again, new contact, back.",
+        }),
       ],
       whenNot: "Not by shifting it in the tank: current cut and restored is the next peeling.",
       materials: ["rack springs"],

@@ -1,6 +1,15 @@
 /** Immersion deposit: copper that traded places with the base metal, with no grip. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, mend, photographAndTape, polishBack, rinse, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  mend,
+  photographAndTape,
+  polishBack,
+  rinse,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const immersionDeposit: ShelfPart = {
   class: {
@@ -11,7 +20,10 @@ export const immersionDeposit: ShelfPart = {
       "Matt, grainy, brick-red copper, quickly there and the same everywhere, recesses too, since no current shaped it. A thumb or cloth takes it off. Steel, iron, zinc and aluminium; not copper alloys.",
     inFinalPlate: "Everything above comes off with it, in sheets or as powder, at the first bend or in the bake.",
     tells: [
-      { versus: "underactivation", tell: "It is there before the current is on, and a thumb wipes it. Underactivated copper comes late and needs tape." },
+      {
+        versus: "underactivation",
+        tell: "It is there before the current is on, and a thumb wipes it. Underactivated copper comes late and needs tape.",
+      },
       { versus: "peeling", tell: "Grainy and loose. Peeling copper is bright foil." },
       { versus: "overactivation", tell: "The cloth turns copper-red. Smut turns it black." },
     ],
@@ -20,11 +32,42 @@ export const immersionDeposit: ShelfPart = {
       "The same nail in the activator finds copper there.",
       "Thumb test: rub a rinsed, gloved thumb on an edge.",
     ],
-    prevention: ["No acid copper on steel, zinc or aluminium without a strike first.", "Current on as or before steel and zinc go in.", "Free cyanide by analysis each week; red anodes or a pale blue bath mean it is out."],
-    stripNote: "It wipes or polishes off in moments at the strike. Under final plate the plate peels in sheets and takes hours to get even again.",
+    prevention: [
+      "No acid copper on steel, zinc or aluminium without a strike first.",
+      "Current on as or before steel and zinc go in.",
+      "Free cyanide by analysis each week; red anodes or a pale blue bath mean it is out.",
+    ],
+    stripNote:
+      "It wipes or polishes off in moments at the strike. Under final plate the plate peels in sheets and takes hours to get even again.",
     otherLikelihood: 0.07,
     sourceKeys: ["crc-potentials", "guidebook-copper", "common-practice", "from-memory"],
-    synonyms: ["wipes off", "rubs off", "wipes off with a thumb", "loose copper", "smears off", "displacement", "copper before power", "cement copper", "flash copper", "rubs off before power was on", "powdery red", "immersion copper", "chemical copper"],
+    synonyms: [
+      "doesn't stick",
+      "rubs off red",
+      "red dust",
+      "red mud",
+      "smears",
+      "spongy deposit",
+      "dusty copper",
+      "copper without current",
+      "plated without power",
+      "comes off on the finger",
+      "loose deposit",
+      "brick red",
+      "wipes off",
+      "rubs off",
+      "wipes off with a thumb",
+      "loose copper",
+      "smears off",
+      "displacement",
+      "copper before power",
+      "cement copper",
+      "flash copper",
+      "rubs off before power was on",
+      "powdery red",
+      "immersion copper",
+      "chemical copper",
+    ],
     position: 8,
   },
   causes: [
@@ -38,7 +81,13 @@ export const immersionDeposit: ShelfPart = {
       likelihood: 0.28,
       baseMetals: ["steel", "iron", "zinc", "aluminium"],
       sourceKeys: ["crc-potentials", "guidebook-copper", "from-memory"],
-      synonyms: ["acid copper on steel", "sulfate copper on steel", "wrong copper tank", "skipped the strike", "copper sulfate"],
+      synonyms: [
+        "acid copper on steel",
+        "sulfate copper on steel",
+        "wrong copper tank",
+        "skipped the strike",
+        "copper sulfate",
+      ],
     },
     {
       slug: "free-cyanide-low",
@@ -46,11 +95,20 @@ export const immersionDeposit: ShelfPart = {
       title: "Free cyanide too low in the strike",
       station: "strike",
       why: "Free cyanide holds copper back from displacing. It is used up by anodes, air and carbonate, and below its window (11 to 15 g/L, guidebook) the bath turns immersion-prone.",
-      proof: "Titrate. A nail without current reddens; a litre with cyanide added by a trained person no longer does it.",
+      proof:
+        "Titrate. A nail without current reddens; a litre with cyanide added by a trained person no longer does it.",
       likelihood: 0.26,
       baseMetals: ["steel", "iron", "zinc", "aluminium"],
       sourceKeys: ["guidebook-copper", "common-practice", "from-memory"],
-      synonyms: ["low cyanide", "low free cyanide", "strike out of cyanide", "red anodes", "blue strike"],
+      synonyms: [
+        "cyanide low",
+        "not enough cyanide",
+        "low cyanide",
+        "low free cyanide",
+        "strike out of cyanide",
+        "red anodes",
+        "blue strike",
+      ],
     },
     {
       slug: "dead-entry",
@@ -62,7 +120,14 @@ export const immersionDeposit: ShelfPart = {
       likelihood: 0.2,
       baseMetals: ["zinc", "aluminium", "steel", "iron", "pewter"],
       sourceKeys: ["astm-b252", "common-practice", "from-memory"],
-      synonyms: ["power off when it went in", "dead entry", "no current on entry", "forgot to switch on", "rectifier off", "no live entry"],
+      synonyms: [
+        "power off when it went in",
+        "dead entry",
+        "no current on entry",
+        "forgot to switch on",
+        "rectifier off",
+        "no live entry",
+      ],
     },
     {
       slug: "noncyanide-strike-ratio",
@@ -74,7 +139,14 @@ export const immersionDeposit: ShelfPart = {
       likelihood: 0.11,
       baseMetals: ["steel", "iron", "zinc", "aluminium"],
       sourceKeys: ["guidebook-copper", "from-memory"],
-      synonyms: ["pyro strike", "pyrophosphate", "non-cyanide copper", "complexant low", "alkaline copper ratio", "pH out"],
+      synonyms: [
+        "pyro strike",
+        "pyrophosphate",
+        "non-cyanide copper",
+        "complexant low",
+        "alkaline copper ratio",
+        "pH out",
+      ],
     },
   ],
   fixes: [
@@ -83,12 +155,21 @@ export const immersionDeposit: ShelfPart = {
       causeSlugs: ["acid-copper-direct", "dead-entry", "free-cyanide-low", "noncyanide-strike-ratio"],
       title: "Loose copper off, then a true strike with live entry",
       steps: [
-        rinse("Rinse until neutral", { detail: "From acid copper: no acid may reach the cyanide line. From cyanide: no cyanide may reach the acid.", minutes: 3, cautionKeys: ["acid-cyanide"] }),
+        rinse("Rinse until neutral", {
+          detail: "From acid copper: no acid may reach the cyanide line. From cyanide: no cyanide may reach the acid.",
+          minutes: 3,
+          cautionKeys: ["acid-cyanide"],
+        }),
         polishBack({ detail: "Pumice or wet abrasive until a white cloth shows no red.", minutes: 6 }),
         clean("Electroclean", { detail: "Steel anodic 1 min; zinc and aluminium by their own card.", minutes: 5 }),
         rinseToWaterBreak(),
-        activate("Clean, copper-free activator", { detail: "Nail-tested. Zinc: 0.25 to 1 % sulfuric; steel: line card." }),
-        strike({ detail: "In a bath that passed the nail test, current on before it touches.", cautionKeys: ["live-entry"] }),
+        activate("Clean, copper-free activator", {
+          detail: "Nail-tested. Zinc: 0.25 to 1 % sulfuric; steel: line card.",
+        }),
+        strike({
+          detail: "In a bath that passed the nail test, current on before it touches.",
+          cautionKeys: ["live-entry"],
+        }),
       ],
       whenNot: "Not in a bath that still reddens the nail.",
       materials: ["pumice", "steel nails", "nail-tested strike"],
@@ -99,9 +180,22 @@ export const immersionDeposit: ShelfPart = {
       causeSlugs: ["free-cyanide-low"],
       title: "Bring free cyanide back",
       steps: [
-        mend("strike", "Titrate", { detail: "Free cyanide and copper, and carbonate once a month.", minutes: 20, cautionKeys: ["cyanide", "sheet"] }),
-        mend("strike", "Add by the sheet", { detail: "Trained for cyanide only. Dissolved in alkali outside the tank, pH checked first, ventilation on, nobody alone.", minutes: 30, cautionKeys: ["cyanide", "acid-cyanide", "sheet"] }),
-        mend("strike", "Nail test and coupon", { detail: "No red without current in 10 s; a coupon with current holds on tape.", minutes: 10, cautionKeys: ["cyanide", "power"] }),
+        mend("strike", "Titrate", {
+          detail: "Free cyanide and copper, and carbonate once a month.",
+          minutes: 20,
+          cautionKeys: ["cyanide", "sheet"],
+        }),
+        mend("strike", "Add by the sheet", {
+          detail:
+            "Trained for cyanide only. Dissolved in alkali outside the tank, pH checked first, ventilation on, nobody alone.",
+          minutes: 30,
+          cautionKeys: ["cyanide", "acid-cyanide", "sheet"],
+        }),
+        mend("strike", "Nail test and coupon", {
+          detail: "No red without current in 10 s; a coupon with current holds on tape.",
+          minutes: 10,
+          cautionKeys: ["cyanide", "power"],
+        }),
       ],
       whenNot: "Not when the nail test is clean: look at dead entry and at the activator.",
       materials: ["titration kit", "steel nails"],
@@ -112,8 +206,17 @@ export const immersionDeposit: ShelfPart = {
       causeSlugs: ["dead-entry"],
       title: "Make live entry the only entry",
       steps: [
-        mend("strike", "Find the dead seconds", { detail: "Clamp meter on the rack lead: time from wet to amps, five racks.", minutes: 10, cautionKeys: ["power"] }),
-        mend("strike", "Lead or saddle that makes before wet", { detail: "Hook on bar first, or a flying lead. Timer off the entry. Electrical work by a licensed electrician.", minutes: 30, cautionKeys: ["power", "live-entry"] }),
+        mend("strike", "Find the dead seconds", {
+          detail: "Clamp meter on the rack lead: time from wet to amps, five racks.",
+          minutes: 10,
+          cautionKeys: ["power"],
+        }),
+        mend("strike", "Lead or saddle that makes before wet", {
+          detail:
+            "Hook on bar first, or a flying lead. Timer off the entry. Electrical work by a licensed electrician.",
+          minutes: 30,
+          cautionKeys: ["power", "live-entry"],
+        }),
         photographAndTape({ detail: "First zinc part of the day: thumb, then tape." }),
       ],
       whenNot: "Not by shortening the rinse before it.",
@@ -125,8 +228,17 @@ export const immersionDeposit: ShelfPart = {
       causeSlugs: ["noncyanide-strike-ratio"],
       title: "Correct ratio and pH of the pyrophosphate strike",
       steps: [
-        mend("strike", "Analyse", { detail: "Copper, pyrophosphate, orthophosphate, pH.", minutes: 30, cautionKeys: ["sheet"] }),
-        mend("strike", "Dilute or add complexant", { detail: "To a ratio of 10 or more for a strike, pH 8.0 to 8.7, 43 to 60 °C; above 60 °C it breaks down (guidebook).", minutes: 30, cautionKeys: ["sheet", "waste"] }),
+        mend("strike", "Analyse", {
+          detail: "Copper, pyrophosphate, orthophosphate, pH.",
+          minutes: 30,
+          cautionKeys: ["sheet"],
+        }),
+        mend("strike", "Dilute or add complexant", {
+          detail:
+            "To a ratio of 10 or more for a strike, pH 8.0 to 8.7, 43 to 60 °C; above 60 °C it breaks down (guidebook).",
+          minutes: 30,
+          cautionKeys: ["sheet", "waste"],
+        }),
         strike({ detail: "Nail without current first, coupon second, rack last." }),
       ],
       whenNot: "Not for a maker's non-cyanide bath: its own sheet and titration apply.",

@@ -1,6 +1,15 @@
 /** Oxidation: copper, or the steel under it, met air and water. Long because it is content: one class, whole. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, mend, photographAndTape, polishBack, rinse, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  mend,
+  photographAndTape,
+  polishBack,
+  rinse,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const oxidation: ShelfPart = {
   class: {
@@ -45,6 +54,22 @@ export const oxidation: ShelfPart = {
     otherLikelihood: 0.06,
     sourceKeys: ["leygraf-2019", "common-practice", "from-memory"],
     synonyms: [
+      "brown stain",
+      "brown film",
+      "stained brown",
+      "tea stain",
+      "corroded",
+      "corrosion",
+      "blueish",
+      "turning brown",
+      "changes colour",
+      "colour bands",
+      "dark copper",
+      "rust spots",
+      "rusting",
+      "aged",
+      "verdigris",
+      "copper turned",
       "brown",
       "tarnish",
       "tarnished",
@@ -78,11 +103,31 @@ export const oxidation: ShelfPart = {
       title: "Struck part left standing",
       station: "inspect",
       why: "Fresh copper is thin, active and wet. An hour in the open at inspection, or a night before nickel, is enough to colour it.",
-      proof: "Ask when it was struck. One part kept under clean water beside one in the air, for the same time, settles it.",
+      proof:
+        "Ask when it was struck. One part kept under clean water beside one in the air, for the same time, settles it.",
       likelihood: 0.28,
-      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium", "silver"],
+      baseMetals: [
+        "steel",
+        "stainless",
+        "brass",
+        "bronze",
+        "copper",
+        "nickel-silver",
+        "nickel",
+        "zinc",
+        "aluminium",
+        "silver",
+      ],
       sourceKeys: ["leygraf-2019", "common-practice", "from-memory"],
-      synonyms: ["left overnight", "sat over the weekend", "waiting for nickel", "too long before plate", "queue before plating", "left out", "waited after strike"],
+      synonyms: [
+        "left overnight",
+        "sat over the weekend",
+        "waiting for nickel",
+        "too long before plate",
+        "queue before plating",
+        "left out",
+        "waited after strike",
+      ],
     },
     {
       slug: "flash-rust",
@@ -90,11 +135,19 @@ export const oxidation: ShelfPart = {
       title: "Steel flash-rusted before the strike",
       station: "activate",
       why: "Acid-clean steel with chloride on it rusts in the time a rack needs to cross the aisle. The strike then grows on rust.",
-      proof: "Look at the part just before it goes in: straw to orange on drained edges. Dip it straight from acid by way of a quick rinse; no bloom proves it.",
+      proof:
+        "Look at the part just before it goes in: straw to orange on drained edges. Dip it straight from acid by way of a quick rinse; no bloom proves it.",
       likelihood: 0.2,
       baseMetals: ["steel", "iron"],
       sourceKeys: ["astm-b183", "common-practice", "from-memory"],
-      synonyms: ["flash rust", "flashed over", "rusted in the rinse", "orange edges", "steel rusted before strike", "rust under copper"],
+      synonyms: [
+        "flash rust",
+        "flashed over",
+        "rusted in the rinse",
+        "orange edges",
+        "steel rusted before strike",
+        "rust under copper",
+      ],
     },
     {
       slug: "acid-left-under-copper",
@@ -106,7 +159,14 @@ export const oxidation: ShelfPart = {
       likelihood: 0.15,
       baseMetals: ["steel", "iron", "brass", "bronze", "copper", "nickel-silver", "zinc"],
       sourceKeys: ["astm-b322", "common-practice", "from-memory"],
-      synonyms: ["acid left on", "poor rinse after acid", "not neutralised", "chloride left", "salts on the part", "green corners"],
+      synonyms: [
+        "acid left on",
+        "poor rinse after acid",
+        "not neutralised",
+        "chloride left",
+        "salts on the part",
+        "green corners",
+      ],
     },
     {
       slug: "strike-thin-or-porous",
@@ -114,11 +174,19 @@ export const oxidation: ShelfPart = {
       title: "Strike too thin or porous",
       station: "strike",
       why: "A flash of a few tenths of a micrometre (common practice 0.2 to 2.5) has pores down to the steel. Water finds them, and copper makes the steel rust faster.",
-      proof: "Count minutes and current: work out the thickness. Twice the time on one part and an hour's wait: no rust spots proves it.",
+      proof:
+        "Count minutes and current: work out the thickness. Twice the time on one part and an hour's wait: no rust spots proves it.",
       likelihood: 0.14,
       baseMetals: ["steel", "iron", "zinc"],
       sourceKeys: ["guidebook-copper", "common-practice", "from-memory"],
-      synonyms: ["thin strike", "flash too thin", "rust through pores", "porous copper", "pinhole rust", "short strike"],
+      synonyms: [
+        "thin strike",
+        "flash too thin",
+        "rust through pores",
+        "porous copper",
+        "pinhole rust",
+        "short strike",
+      ],
     },
     {
       slug: "hot-rinse-or-dryer",
@@ -142,7 +210,15 @@ export const oxidation: ShelfPart = {
       likelihood: 0.07,
       baseMetals: ["copper", "brass", "bronze", "silver", "steel", "nickel-silver"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["acid fumes", "sulfur", "liver of sulfur", "ammonia in the air", "rubber band mark", "bad air", "sulphur"],
+      synonyms: [
+        "acid fumes",
+        "sulfur",
+        "liver of sulfur",
+        "ammonia in the air",
+        "rubber band mark",
+        "bad air",
+        "sulphur",
+      ],
     },
   ],
   fixes: [
@@ -159,10 +235,21 @@ export const oxidation: ShelfPart = {
           cautionKeys: [],
           station: "inspect",
         },
-        clean("Short cathodic electroclean", { detail: "15 to 30 s: it strips the film; anodic would brown it more. High-strength steel: not cathodic, hold it.", minutes: 3, cautionKeys: ["embrittlement"] }),
+        clean("Short cathodic electroclean", {
+          detail:
+            "15 to 30 s: it strips the film; anodic would brown it more. High-strength steel: not cathodic, hold it.",
+          minutes: 3,
+          cautionKeys: ["embrittlement"],
+        }),
         rinseToWaterBreak(),
-        activate("5 % sulfuric, 5 to 15 s", { detail: "Until it is pink all over. Two rinses, well apart from the cyanide line." }),
-        strike({ detail: "A short fresh strike, half the usual time, over the revived copper, then to the plate without a stop.", minutes: 4 }),
+        activate("5 % sulfuric, 5 to 15 s", {
+          detail: "Until it is pink all over. Two rinses, well apart from the cyanide line.",
+        }),
+        strike({
+          detail:
+            "A short fresh strike, half the usual time, over the revived copper, then to the plate without a stop.",
+          minutes: 4,
+        }),
         photographAndTape(),
       ],
       whenNot: "Not where steel shows or rust has come through, and not brown-black film: polish back.",
@@ -174,10 +261,17 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["strike-left-standing", "acid-left-under-copper", "fumes-in-the-shop"],
       title: "Deep tarnish: polish back and run the line",
       steps: [
-        polishBack({ detail: "Wet, 1000 to 1200 grit, through the brown to pink or to base metal, evenly. Do not leave islands of old strike with feathered edges." }),
+        polishBack({
+          detail:
+            "Wet, 1000 to 1200 grit, through the brown to pink or to base metal, evenly. Do not leave islands of old strike with feathered edges.",
+        }),
         clean("Electroclean", { detail: "1 to 2 min, steel anodic.", minutes: 5 }),
-        rinseToWaterBreak({ detail: "Three rinses this time if salts were the cause; pH paper on the part reads neutral." }),
-        activate("Activate for the alloy", { detail: "Line card time: base metal and left-over copper are both bare now." }),
+        rinseToWaterBreak({
+          detail: "Three rinses this time if salts were the cause; pH paper on the part reads neutral.",
+        }),
+        activate("Activate for the alloy", {
+          detail: "Line card time: base metal and left-over copper are both bare now.",
+        }),
         strike({ detail: "Full time. To the plate without a stop, or under purified water." }),
         photographAndTape(),
       ],
@@ -190,13 +284,20 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["flash-rust"],
       title: "Flash rust: back to bright steel, then fast",
       steps: [
-        polishBack({ detail: "Wet abrasive with a little alkaline cleaner in the water, so that it does not rust as you work." }),
-        clean("Anodic electroclean", { detail: "2 min. Hold in the alkaline rinse until the acid is free: steel does not rust there.", minutes: 6 }),
+        polishBack({
+          detail: "Wet abrasive with a little alkaline cleaner in the water, so that it does not rust as you work.",
+        }),
+        clean("Anodic electroclean", {
+          detail: "2 min. Hold in the alkaline rinse until the acid is free: steel does not rust there.",
+          minutes: 6,
+        }),
         activate("Acid, then one quick rinse, then a cold second", {
-          detail: "Sulfuric 5 to 10 % in place of hydrochloric where you can: less chloride to carry. 10 s in each rinse.",
+          detail:
+            "Sulfuric 5 to 10 % in place of hydrochloric where you can: less chloride to carry. 10 s in each rinse.",
         }),
         strike({
-          detail: "Under 20 s from acid to current. A dip in weak alkali (sodium hydroxide about 10 g/L) after the last rinse buys time before a cyanide or alkaline strike.",
+          detail:
+            "Under 20 s from acid to current. A dip in weak alkali (sodium hydroxide about 10 g/L) after the last rinse buys time before a cyanide or alkaline strike.",
           cautionKeys: ["hot-alkali"],
         }),
         photographAndTape(),
@@ -210,16 +311,24 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["flash-rust", "strike-thin-or-porous"],
       title: "Rust through the strike on steel: strip the copper",
       steps: [
-        rinse("Rinse and neutralise", { detail: "No cyanide left on the part: three rinses, the last neutral on pH paper.", minutes: 3, cautionKeys: ["acid-cyanide", "cyanide"] }),
+        rinse("Rinse and neutralise", {
+          detail: "No cyanide left on the part: three rinses, the last neutral on pH paper.",
+          minutes: 3,
+          cautionKeys: ["acid-cyanide", "cyanide"],
+        }),
         {
           title: "Persulfate strip",
-          detail: "Ammonium persulfate 60 to 120 g/L with ammonia, pH 9 to 10, 20 to 30 °C. A flash goes in a minute or two (0.5 to 2 µm/min, from memory). Steel is left whole.",
+          detail:
+            "Ammonium persulfate 60 to 120 g/L with ammonia, pH 9 to 10, 20 to 30 °C. A flash goes in a minute or two (0.5 to 2 µm/min, from memory). Steel is left whole.",
           minutes: 6,
           perPart: false,
           cautionKeys: ["persulfate", "sheet", "waste"],
           station: null,
         },
-        clean("Derust and electroclean anodic", { detail: "Alkaline derust or anodic clean until no orange shows under a loupe.", minutes: 8 }),
+        clean("Derust and electroclean anodic", {
+          detail: "Alkaline derust or anodic clean until no orange shows under a loupe.",
+          minutes: 8,
+        }),
         rinseToWaterBreak(),
         activate("Quick acid dip", { detail: "5 to 10 % sulfuric, 10 to 20 s." }),
         strike({ detail: "Twice the usual time, so that the pores close; then straight to the plate.", minutes: 8 }),
@@ -233,9 +342,20 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["acid-left-under-copper"],
       title: "Rinse to neutral and mark the point",
       steps: [
-        mend("rinse", "pH paper on the part", { detail: "After the acid rinse and after the strike rinse, on the lowest edge and in a hole.", minutes: 5 }),
-        mend("rinse", "Second rinse, moving, and hole by hole", { detail: "Flow up until paper reads neutral on three racks in a row; tilt and flood each cavity.", minutes: 20, cautionKeys: ["acid-cyanide"] }),
-        mend("rinse", "Conductivity limit on the card", { detail: "The reading at which paper last stayed neutral becomes the change point.", minutes: 5, cautionKeys: ["waste"] }),
+        mend("rinse", "pH paper on the part", {
+          detail: "After the acid rinse and after the strike rinse, on the lowest edge and in a hole.",
+          minutes: 5,
+        }),
+        mend("rinse", "Second rinse, moving, and hole by hole", {
+          detail: "Flow up until paper reads neutral on three racks in a row; tilt and flood each cavity.",
+          minutes: 20,
+          cautionKeys: ["acid-cyanide"],
+        }),
+        mend("rinse", "Conductivity limit on the card", {
+          detail: "The reading at which paper last stayed neutral becomes the change point.",
+          minutes: 5,
+          cautionKeys: ["waste"],
+        }),
       ],
       whenNot: "Not by adding alkali to the rinse to make the paper look right.",
       materials: ["pH paper", "conductivity meter"],
@@ -246,8 +366,17 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["strike-thin-or-porous"],
       title: "Give the strike its thickness",
       steps: [
-        mend("strike", "Work the thickness out", { detail: "Current, area, time and efficiency (cyanide strike 30 to 60 %, guidebook). Put the plate estimate beside it.", minutes: 5 }),
-        mend("strike", "Set time and current, not voltage alone", { detail: "Inside 0.5 to 4 A/dm²; 30 s to 2 min is a strike, 3 to 5 µm is a strike-plate for parts that must wait (guidebook).", minutes: 10, cautionKeys: ["power", "cyanide", "acid-cyanide"] }),
+        mend("strike", "Work the thickness out", {
+          detail:
+            "Current, area, time and efficiency (cyanide strike 30 to 60 %, guidebook). Put the plate estimate beside it.",
+          minutes: 5,
+        }),
+        mend("strike", "Set time and current, not voltage alone", {
+          detail:
+            "Inside 0.5 to 4 A/dm²; 30 s to 2 min is a strike, 3 to 5 µm is a strike-plate for parts that must wait (guidebook).",
+          minutes: 10,
+          cautionKeys: ["power", "cyanide", "acid-cyanide"],
+        }),
         strike({ detail: "One part at the new time. An hour in damp air without a red point passes it.", minutes: 10 }),
       ],
       whenNot: "Not on fits and threads with no room for it: ask for the tolerance.",
@@ -259,10 +388,23 @@ export const oxidation: ShelfPart = {
       causeSlugs: ["hot-rinse-or-dryer", "strike-left-standing", "fumes-in-the-shop"],
       title: "A place for struck parts to wait",
       steps: [
-        mend("inspect", "Inspect wet, then plate", { detail: "A lamp and a rinse tank at the bench: ten seconds out, back under water.", minutes: 15 }),
-        mend("finish", "Dry cool when it must be dry", { detail: "Purified rinse, filtered air at room temperature, no oven. Bag with the hour on it.", minutes: 10, cautionKeys: ["compressed-air"] }),
-        mend("inspect", "Away from fumes", { detail: "A closed cupboard or another room than acid, ammonia and patina. No rubber bands, no newspaper.", minutes: 20 }),
-        mend("inspect", "A limit on the tag", { detail: "Hours from strike to plate that your own coupons stood; past it the weak-acid card applies.", minutes: 5 }),
+        mend("inspect", "Inspect wet, then plate", {
+          detail: "A lamp and a rinse tank at the bench: ten seconds out, back under water.",
+          minutes: 15,
+        }),
+        mend("finish", "Dry cool when it must be dry", {
+          detail: "Purified rinse, filtered air at room temperature, no oven. Bag with the hour on it.",
+          minutes: 10,
+          cautionKeys: ["compressed-air"],
+        }),
+        mend("inspect", "Away from fumes", {
+          detail: "A closed cupboard or another room than acid, ammonia and patina. No rubber bands, no newspaper.",
+          minutes: 20,
+        }),
+        mend("inspect", "A limit on the tag", {
+          detail: "Hours from strike to plate that your own coupons stood; past it the weak-acid card applies.",
+          minutes: 5,
+        }),
       ],
       whenNot: "Not water for steel with a thin strike: it rusts through the pores under it.",
       materials: ["purified water tank", "sealed bags", "struck coupons"],

@@ -1,6 +1,14 @@
 /** Peeling: copper that looks sound and has no grip. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, photographAndTape, polishBack, rinse, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  photographAndTape,
+  polishBack,
+  rinse,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const peeling: ShelfPart = {
   class: {
@@ -9,9 +17,13 @@ export const peeling: ShelfPart = {
     short: "Copper that looks whole but lifts in flakes, blisters or sheets in the tape test.",
     atStrike:
       "Bright, whole, pink copper. Then tape, a scribed grid or a bend takes it off in foil-like flakes with a clean back, or blisters rise as it warms. Lifted all over it speaks of the surface; lifted in layers with copper under it, of the current.",
-    inFinalPlate: "The final plate leaves with the strike: blisters in the bake, curls at a cut edge, sheets in the bend test. ASTM B571 counts failing any one of its tests as failing.",
+    inFinalPlate:
+      "The final plate leaves with the strike: blisters in the bake, curls at a cut edge, sheets in the bend test. ASTM B571 counts failing any one of its tests as failing.",
     tells: [
-      { versus: "underactivation", tell: "Copper is bright and even before the test. Underactivated copper is hazy and thin to the eye." },
+      {
+        versus: "underactivation",
+        tell: "Copper is bright and even before the test. Underactivated copper is hazy and thin to the eye.",
+      },
       { versus: "immersion-deposit", tell: "It takes tape or a knife. An immersion deposit rubs off with a thumb." },
       { versus: "overactivation", tell: "Back of the flake and base metal are clean. Black on both is smut." },
     ],
@@ -20,11 +32,52 @@ export const peeling: ShelfPart = {
       "Bend a spare over a mandrel of four times its thickness, or burnish about 15 s (ASTM B571). Blisters or lifting fail it.",
       "Look at the place that lifted: base metal bare means surface; copper under copper means the current was cut.",
     ],
-    prevention: ["Water break and timed acid on every rack.", "A nickel strike for stainless and nickel, double zincate for aluminium.", "Never lift a rack out of the strike and put it back without activating again."],
-    stripNote: "At the strike most of it comes off on tape, but take all of it: what held will be the edge of the next blister. Under final plate the sheets leave easily and the rest needs the full strip.",
+    prevention: [
+      "Water break and timed acid on every rack.",
+      "A nickel strike for stainless and nickel, double zincate for aluminium.",
+      "Never lift a rack out of the strike and put it back without activating again.",
+    ],
+    stripNote:
+      "At the strike most of it comes off on tape, but take all of it: what held will be the edge of the next blister. Under final plate the sheets leave easily and the rest needs the full strip.",
     otherLikelihood: 0.07,
     sourceKeys: ["astm-b571", "astm-d3359", "iso-2819", "common-practice", "from-memory"],
-    synonyms: ["peels", "flaking", "flakes", "flakes off like foil", "blister", "blisters", "blistering", "lifts", "lifts on tape", "lifting", "no adhesion", "poor adhesion", "fails tape", "tape test failed", "bubbles", "chips off", "sheets off", "delaminates", "exfoliates", "comes off in flakes"],
+    synonyms: [
+      "peeling",
+      "won't stick",
+      "doesn't stick",
+      "not sticking",
+      "no bond",
+      "bad adhesion",
+      "adhesion failure",
+      "lifts off",
+      "comes off with tape",
+      "comes off in sheets",
+      "pulls off",
+      "flaky",
+      "peels like foil",
+      "pops off",
+      "lets go",
+      "peels",
+      "flaking",
+      "flakes",
+      "flakes off like foil",
+      "blister",
+      "blisters",
+      "blistering",
+      "lifts",
+      "lifts on tape",
+      "lifting",
+      "no adhesion",
+      "poor adhesion",
+      "fails tape",
+      "tape test failed",
+      "bubbles",
+      "chips off",
+      "sheets off",
+      "delaminates",
+      "exfoliates",
+      "comes off in flakes",
+    ],
     position: 7,
   },
   causes: [
@@ -38,7 +91,14 @@ export const peeling: ShelfPart = {
       likelihood: 0.22,
       baseMetals: ["stainless", "nickel"],
       sourceKeys: ["astm-b254", "woods-columns", "from-memory"],
-      synonyms: ["no Woods strike", "peels off stainless", "peeling on 304", "peels off old nickel", "passive nickel", "replating over nickel"],
+      synonyms: [
+        "no Woods strike",
+        "peels off stainless",
+        "peeling on 304",
+        "peels off old nickel",
+        "passive nickel",
+        "replating over nickel",
+      ],
     },
     {
       slug: "zincate-poor",
@@ -50,7 +110,14 @@ export const peeling: ShelfPart = {
       likelihood: 0.16,
       baseMetals: ["aluminium"],
       sourceKeys: ["astm-b253", "guidebook-aluminium", "common-practice", "from-memory"],
-      synonyms: ["bad zincate", "single zincate", "zincate", "peeling on aluminum", "blisters on aluminium", "spongy zincate"],
+      synonyms: [
+        "bad zincate",
+        "single zincate",
+        "zincate",
+        "peeling on aluminum",
+        "blisters on aluminium",
+        "spongy zincate",
+      ],
     },
     {
       slug: "current-interrupted",
@@ -62,7 +129,15 @@ export const peeling: ShelfPart = {
       likelihood: 0.12,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["power cut", "lost contact", "laminated copper", "copper on copper", "double strike", "lifted out and put back", "current interrupted"],
+      synonyms: [
+        "power cut",
+        "lost contact",
+        "laminated copper",
+        "copper on copper",
+        "double strike",
+        "lifted out and put back",
+        "current interrupted",
+      ],
     },
     {
       slug: "old-plate-left",
@@ -74,7 +149,14 @@ export const peeling: ShelfPart = {
       likelihood: 0.09,
       baseMetals: ["steel", "brass", "copper", "zinc", "silver", "nickel-silver"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["chrome left on", "old nickel left", "incomplete strip", "replate over chrome", "restoration part", "not fully stripped"],
+      synonyms: [
+        "chrome left on",
+        "old nickel left",
+        "incomplete strip",
+        "replate over chrome",
+        "restoration part",
+        "not fully stripped",
+      ],
     },
     {
       slug: "zinc-casting-skin-trapped",
@@ -82,11 +164,21 @@ export const peeling: ShelfPart = {
       title: "Blisters over gas or acid in a die casting",
       station: "clean",
       why: "Pores just under the skin of zinc or aluminium castings take solution in or hold gas; warmth lifts the copper as a blister.",
-      proof: "Warm a struck part gently and cut a blister: a pore is under it, and it rises in the same region of the casting each time.",
+      proof:
+        "Warm a struck part gently and cut a blister: a pore is under it, and it rises in the same region of the casting each time.",
       likelihood: 0.08,
       baseMetals: ["zinc", "aluminium"],
       sourceKeys: ["astm-b252", "iso-2819", "common-practice", "from-memory"],
-      synonyms: ["blisters on zamak", "pot metal blisters", "casting blister", "cold shut", "die cast blister", "gas blister"],
+      synonyms: [
+        "pot metal bubbles",
+        "bubbles on die cast",
+        "blisters on zamak",
+        "pot metal blisters",
+        "casting blister",
+        "cold shut",
+        "die cast blister",
+        "gas blister",
+      ],
     },
   ],
   fixes: [
@@ -95,13 +187,21 @@ export const peeling: ShelfPart = {
       causeSlugs: ["passive-base-no-nickel-strike"],
       title: "All copper off, nickel strike first",
       steps: [
-        polishBack({ detail: "All of it, wet, also where it held. Break the base metal's shine.", minutes: 8, cautionKeys: ["nickel"] }),
+        polishBack({
+          detail: "All of it, wet, also where it held. Break the base metal's shine.",
+          minutes: 8,
+          cautionKeys: ["nickel"],
+        }),
         clean("Electroclean, end cathodic on nickel", { detail: "1 to 2 min.", minutes: 5 }),
         rinseToWaterBreak(),
-        activate("Hydrochloric dip", { detail: "20 to 50 % by volume, 30 to 60 s, on to the nickel strike wet.", minutes: 2 }),
+        activate("Hydrochloric dip", {
+          detail: "20 to 50 % by volume, 30 to 60 s, on to the nickel strike wet.",
+          minutes: 2,
+        }),
         {
           title: "Woods nickel strike",
-          detail: "Nickel chloride 225 to 240 g/L, hydrochloric acid 110 to 125 mL/L, 1 to 3 min, 21 to 32 °C (trade columns). Two full rinses: acid bath before an alkaline one.",
+          detail:
+            "Nickel chloride 225 to 240 g/L, hydrochloric acid 110 to 125 mL/L, 1 to 3 min, 21 to 32 °C (trade columns). Two full rinses: acid bath before an alkaline one.",
           minutes: 4,
           perPart: false,
           cautionKeys: ["nickel", "acid-cyanide", "acid-splash", "power", "embrittlement"],
@@ -118,10 +218,33 @@ export const peeling: ShelfPart = {
       causeSlugs: ["zincate-poor"],
       title: "Strip, zincate twice, live entry",
       steps: [
-        { title: "Strip copper and zincate in nitric", detail: "50 % by volume until bare and even.", minutes: 3, perPart: false, cautionKeys: ["nitric", "acid-cyanide", "acid-splash", "waste"], station: "activate" },
-        { title: "First zincate, strip it, second zincate", detail: "30 to 60 s; nitric until gone; 15 to 30 s. The second is thin and even grey-blue. Rinse hard after each.", minutes: 6, perPart: false, cautionKeys: ["nitric", "hot-alkali", "acid-cyanide"], station: "activate" },
-        strike({ detail: "Current on before it touches, low free cyanide (1.5 to 3 g/L, guidebook), mild temperature.", cautionKeys: ["live-entry"] }),
-        photographAndTape({ detail: "Tape, then warm a spare as ISO 2819 says for aluminium base (220 °C from memory) and quench: blisters fail it.", minutes: 4 }),
+        {
+          title: "Strip copper and zincate in nitric",
+          detail:
+            "Three rinses first: no cyanide of the strike may ride into the acid. 50 % by volume until bare and even.",
+          minutes: 3,
+          perPart: false,
+          cautionKeys: ["nitric", "acid-cyanide", "acid-splash", "waste"],
+          station: "activate",
+        },
+        {
+          title: "First zincate, strip it, second zincate",
+          detail:
+            "30 to 60 s; nitric until gone; 15 to 30 s. The second is thin and even grey-blue. Rinse hard after each.",
+          minutes: 6,
+          perPart: false,
+          cautionKeys: ["nitric", "hot-alkali", "acid-cyanide"],
+          station: "activate",
+        },
+        strike({
+          detail: "Current on before it touches, low free cyanide (1.5 to 3 g/L, guidebook), mild temperature.",
+          cautionKeys: ["live-entry"],
+        }),
+        photographAndTape({
+          detail:
+            "Tape, then warm a spare as ISO 2819 says for aluminium base (220 °C from memory) and quench: blisters fail it.",
+          minutes: 4,
+        }),
       ],
       whenNot: "Not on silicon castings before a fluoride desmut.",
       materials: ["nitric acid", "zincate", "low-cyanide strike"],
@@ -132,11 +255,19 @@ export const peeling: ShelfPart = {
       causeSlugs: ["current-interrupted", "old-plate-left", "cleaner-spent"],
       title: "All copper off, start at clean",
       steps: [
-        polishBack({ detail: "Every trace, and old plate where the edge shows a layer line. A senior chooses the strip for old nickel or chromium.", minutes: 10, cautionKeys: ["nickel", "hexavalent-chromium"] }),
+        polishBack({
+          detail:
+            "Every trace, and old plate where the edge shows a layer line. A senior chooses the strip for old nickel or chromium.",
+          minutes: 10,
+          cautionKeys: ["nickel", "hexavalent-chromium"],
+        }),
         clean("Soak and electroclean", { detail: "Fresh enough to hold a water break. Full times.", minutes: 8 }),
         rinseToWaterBreak(),
         activate("Activate for the alloy", { detail: "Line card time. Two rinses." }),
-        strike({ detail: "Contact checked, current steady from entry to exit. If it drops out: out, activate again, start again." }),
+        strike({
+          detail:
+            "Contact checked, current steady from entry to exit. If it drops out: out, activate again, start again.",
+        }),
         photographAndTape({ detail: "Tape at an edge and in the middle. One spare through a bend or burnish test." }),
       ],
       whenNot: "Not stainless, nickel or aluminium: their own routes.",
@@ -150,7 +281,15 @@ export const peeling: ShelfPart = {
       steps: [
         polishBack({ detail: "Lightly; stop if pores open and show it to the senior." }),
         rinse("Hot and cold rinse by turns", { detail: "Three rounds, to pump the pores. Dry warm.", minutes: 6 }),
-        { title: "Warm through to drive gas out", detail: "Up to 150 °C for zinc (ISO 2819's limit for zinc base, from memory), an hour, cool slowly. Rinsed and dried parts only.", minutes: 10, perPart: false, cautionKeys: ["hot-part"], station: "finish" },
+        {
+          title: "Warm through to drive gas out",
+          detail:
+            "Up to 150 °C for zinc (ISO 2819's limit for zinc base, from memory), an hour, cool slowly. Rinsed and dried parts only.",
+          minutes: 10,
+          perPart: false,
+          cautionKeys: ["hot-part"],
+          station: "finish",
+        },
         clean("Zinc-safe clean", { detail: "Short, mild.", minutes: 4 }),
         activate("0.25 to 1 % sulfuric to the first gas", { detail: "10 to 30 s, two rinses.", cautionKeys: [] }),
         strike({ detail: "Live entry, cover at once.", cautionKeys: ["live-entry"] }),

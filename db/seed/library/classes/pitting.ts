@@ -1,6 +1,14 @@
 /** Pitting and nodules: holes in the copper, or lumps on it. */
 import type { ShelfPart } from "@/lib/library/library-entry";
-import { activate, clean, mend, photographAndTape, polishBack, rinseToWaterBreak, strike } from "@/db/seed/library/steps";
+import {
+  activate,
+  clean,
+  mend,
+  photographAndTape,
+  polishBack,
+  rinseToWaterBreak,
+  strike,
+} from "@/db/seed/library/steps";
 
 export const pitting: ShelfPart = {
   class: {
@@ -9,7 +17,8 @@ export const pitting: ShelfPart = {
     short: "Pits or nodules: pinpoint holes in the copper, or lumps that the nail feels.",
     atStrike:
       "Pits are round and shiny inside (gas, often with a tail upwards) or ragged (base metal). Nodules are specks under copper, most on shelves and upward faces. A thin strike hides small ones: tilt it under one lamp.",
-    inFinalPlate: "Bright plate makes both larger: a nodule becomes a wart that catches, a pit a dark point where corrosion starts.",
+    inFinalPlate:
+      "Bright plate makes both larger: a nodule becomes a wart that catches, a pit a dark point where corrosion starts.",
     tells: [
       { versus: "burning", tell: "All over or on upward faces. Burning is at edges and points." },
       { versus: "dewetting", tell: "Pinpoints a nail can feel. Islands are millimetres wide and flat." },
@@ -20,11 +29,48 @@ export const pitting: ShelfPart = {
       "Hang one panel flat and one upright: roughness on the flat one only is particles.",
       "Look at the part before the strike with the same loupe.",
     ],
-    prevention: ["Filter all the time, a turnover or two an hour; bag the anodes.", "Agitation and wetting agent as the maker says.", "Inspect polish under a loupe before the line, not after it."],
-    stripNote: "A nodule sands off and a gas pit in a strike sands out. A pit in the base metal stays: more polishing or filling is the customer's choice.",
+    prevention: [
+      "Filter all the time, a turnover or two an hour; bag the anodes.",
+      "Agitation and wetting agent as the maker says.",
+      "Inspect polish under a loupe before the line, not after it.",
+    ],
+    stripNote:
+      "A nodule sands off and a gas pit in a strike sands out. A pit in the base metal stays: more polishing or filling is the customer's choice.",
     otherLikelihood: 0.08,
     sourceKeys: ["common-practice", "from-memory"],
-    synonyms: ["pits", "pitted", "pinholes", "lumps", "nodules", "nodular", "rough", "roughness", "rough deposit", "feels like sandpaper", "gritty", "bumps", "pimples", "specks", "warts", "orange peel", "sandy", "particles", "craters"],
+    synonyms: [
+      "pitting",
+      "bumpy",
+      "dimples",
+      "small holes",
+      "sand",
+      "sandy feel",
+      "scratchy feel",
+      "coarse",
+      "spikes",
+      "dirt in the copper",
+      "holes in the copper",
+      "grainy lumps",
+      "pits",
+      "pitted",
+      "pinholes",
+      "lumps",
+      "nodules",
+      "nodular",
+      "rough",
+      "roughness",
+      "rough deposit",
+      "feels like sandpaper",
+      "gritty",
+      "bumps",
+      "pimples",
+      "specks",
+      "warts",
+      "orange peel",
+      "sandy",
+      "particles",
+      "craters",
+    ],
     position: 10,
   },
   causes: [
@@ -38,7 +84,16 @@ export const pitting: ShelfPart = {
       likelihood: 0.32,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium", "silver"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["dirty bath", "anode sludge", "filter torn", "no filtration", "sediment", "carbonate crystals", "anode bag torn", "grit"],
+      synonyms: [
+        "dirty bath",
+        "anode sludge",
+        "filter torn",
+        "no filtration",
+        "sediment",
+        "carbonate crystals",
+        "anode bag torn",
+        "grit",
+      ],
     },
     {
       slug: "base-metal-pits",
@@ -62,7 +117,14 @@ export const pitting: ShelfPart = {
       likelihood: 0.19,
       baseMetals: ["steel", "stainless", "brass", "copper", "zinc", "nickel"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["hydrogen bubbles", "gas pits", "no wetting agent", "air sucked into the pump", "bubbles cling", "tails"],
+      synonyms: [
+        "hydrogen bubbles",
+        "gas pits",
+        "no wetting agent",
+        "air sucked into the pump",
+        "bubbles cling",
+        "tails",
+      ],
     },
     {
       slug: "acid-pitted-base",
@@ -84,10 +146,16 @@ export const pitting: ShelfPart = {
       title: "Sand flat, strike in filtered solution",
       steps: [
         polishBack({ detail: "Wet 800 then 1200 on a block, until the loupe shows neither lump nor pit.", minutes: 8 }),
-        clean("Soak and electroclean", { detail: "Grit in pits is the next nodule: rinse hard, ultrasonic if there is one.", minutes: 7 }),
+        clean("Soak and electroclean", {
+          detail: "Grit in pits is the next nodule: rinse hard, ultrasonic if there is one.",
+          minutes: 7,
+        }),
         rinseToWaterBreak(),
         activate("Activate for the alloy", { detail: "Line card time." }),
-        strike({ detail: "Filter on, agitation on, current off only after the rack is out. Tap the rack each 10 s if gas was the cause." }),
+        strike({
+          detail:
+            "Filter on, agitation on, current off only after the rack is out. Tap the rack each 10 s if gas was the cause.",
+        }),
         photographAndTape(),
       ],
       whenNot: "Not while the panel test still comes out rough.",
@@ -99,9 +167,21 @@ export const pitting: ShelfPart = {
       causeSlugs: ["particles-in-strike"],
       title: "Filter the strike and bag the anodes",
       steps: [
-        mend("strike", "Fish out what fell in", { detail: "Magnet and rake: parts, hooks, tape.", minutes: 15, cautionKeys: ["cyanide", "acid-cyanide", "power"] }),
-        mend("strike", "New cartridges, new bags", { detail: "5 µm cartridges (common practice), bags of a cloth that stands the bath, leached first.", minutes: 30, cautionKeys: ["cyanide", "acid-cyanide", "waste"] }),
-        mend("strike", "Three turnovers, then the shelf panel", { detail: "Smooth under the loupe passes.", minutes: 15, cautionKeys: ["cyanide", "power"] }),
+        mend("strike", "Fish out what fell in", {
+          detail: "Magnet and rake: parts, hooks, tape.",
+          minutes: 15,
+          cautionKeys: ["cyanide", "acid-cyanide", "power"],
+        }),
+        mend("strike", "New cartridges, new bags", {
+          detail: "5 µm cartridges (common practice), bags of a cloth that stands the bath, leached first.",
+          minutes: 30,
+          cautionKeys: ["cyanide", "acid-cyanide", "waste"],
+        }),
+        mend("strike", "Three turnovers, then the shelf panel", {
+          detail: "Smooth under the loupe passes.",
+          minutes: 15,
+          cautionKeys: ["cyanide", "power"],
+        }),
       ],
       whenNot: "Not before finding the torn bag: new cartridges block in a day.",
       materials: ["filter cartridges", "anode bags", "test panel"],
@@ -112,8 +192,16 @@ export const pitting: ShelfPart = {
       causeSlugs: ["gas-pits"],
       title: "Let the gas go",
       steps: [
-        mend("strike", "Pump and air", { detail: "Suction side tight, return below the surface, air coarse and even.", minutes: 20, cautionKeys: ["power"] }),
-        mend("strike", "Wetting agent by the maker's test", { detail: "Ring or drop test. The one made for this bath only.", minutes: 10, cautionKeys: ["sheet", "cyanide", "acid-cyanide"] }),
+        mend("strike", "Pump and air", {
+          detail: "Suction side tight, return below the surface, air coarse and even.",
+          minutes: 20,
+          cautionKeys: ["power"],
+        }),
+        mend("strike", "Wetting agent by the maker's test", {
+          detail: "Ring or drop test. The one made for this bath only.",
+          minutes: 10,
+          cautionKeys: ["sheet", "cyanide", "acid-cyanide"],
+        }),
         strike({ detail: "Lower half of the current window, rack moving. Downward faces under the loupe." }),
       ],
       whenNot: "Not with household detergent: it foams and dewets.",
@@ -125,11 +213,24 @@ export const pitting: ShelfPart = {
       causeSlugs: ["base-metal-pits", "acid-pitted-base"],
       title: "Refinish the base metal, or ask",
       steps: [
-        { title: "Measure what may come off", detail: "Drawing, fits, letters. Pits deeper than that: ask the customer before any polishing.", minutes: 3, perPart: true, cautionKeys: [], station: null },
-        polishBack({ detail: "Copper off, then base metal down through the grits until the loupe is clear.", minutes: 15, cautionKeys: ["lead-dust"] }),
+        {
+          title: "Measure what may come off",
+          detail: "Drawing, fits, letters. Pits deeper than that: ask the customer before any polishing.",
+          minutes: 3,
+          perPart: true,
+          cautionKeys: [],
+          station: null,
+        },
+        polishBack({
+          detail: "Copper off, then base metal down through the grits until the loupe is clear.",
+          minutes: 15,
+          cautionKeys: ["lead-dust"],
+        }),
         clean("Soak and electroclean", { detail: "Full times: there is compound on it.", minutes: 8 }),
         rinseToWaterBreak(),
-        activate("Short, chloride-free where it pits", { detail: "Sulfuric in place of hydrochloric on steel; stainless by its own route." }),
+        activate("Short, chloride-free where it pits", {
+          detail: "Sulfuric in place of hydrochloric on steel; stainless by its own route.",
+        }),
         strike({ detail: "Loupe before and after." }),
       ],
       whenNot: "Not die castings near the end of their skin.",

@@ -54,6 +54,24 @@ export const underactivation: ShelfPart = {
     otherLikelihood: 0.06,
     sourceKeys: ["astm-b322", "astm-b254", "iso-2819", "common-practice", "from-memory"],
     synonyms: [
+      "won't stick",
+      "doesn't stick",
+      "lazy",
+      "slow to start",
+      "slow to cover",
+      "fades out",
+      "faded",
+      "see-through",
+      "uneven",
+      "uneven coverage",
+      "passivated",
+      "won't activate",
+      "dull",
+      "whitish",
+      "grey haze",
+      "half plated",
+      "streaky haze",
+      "wishy washy",
       "won't take",
       "didn't take",
       "not taking",
@@ -88,9 +106,29 @@ export const underactivation: ShelfPart = {
       proof:
         "Titrate it, or run one part through a fresh beaker of the same make-up. If the beaker part strikes whole and the tank part does not, change it.",
       likelihood: 0.32,
-      baseMetals: ["steel", "stainless", "iron", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
+      baseMetals: [
+        "steel",
+        "stainless",
+        "iron",
+        "brass",
+        "bronze",
+        "copper",
+        "nickel-silver",
+        "nickel",
+        "zinc",
+        "aluminium",
+      ],
       sourceKeys: ["astm-b322", "common-practice", "from-memory"],
-      synonyms: ["tired acid", "old activator", "weak acid", "dead pickle", "acid too old", "worn out dip", "activator exhausted", "flat acid"],
+      synonyms: [
+        "tired acid",
+        "old activator",
+        "weak acid",
+        "dead pickle",
+        "acid too old",
+        "worn out dip",
+        "activator exhausted",
+        "flat acid",
+      ],
     },
     {
       slug: "activator-dwell-short",
@@ -103,7 +141,14 @@ export const underactivation: ShelfPart = {
       likelihood: 0.18,
       baseMetals: ["steel", "iron", "brass", "bronze", "copper", "nickel-silver", "nickel", "stainless"],
       sourceKeys: ["common-practice", "from-memory"],
-      synonyms: ["dwell too short", "pulled too soon", "rushed the dip", "not long enough in the acid", "quick dip", "short pickle"],
+      synonyms: [
+        "dwell too short",
+        "pulled too soon",
+        "rushed the dip",
+        "not long enough in the acid",
+        "quick dip",
+        "short pickle",
+      ],
     },
     {
       slug: "activator-wrong",
@@ -116,7 +161,14 @@ export const underactivation: ShelfPart = {
       likelihood: 0.14,
       baseMetals: ["stainless", "nickel", "aluminium", "nickel-silver", "iron"],
       sourceKeys: ["astm-b254", "astm-b253", "guidebook-aluminium", "woods-columns", "from-memory"],
-      synonyms: ["wrong acid", "wrong pickle", "wrong dip", "sulfuric on stainless", "no Woods strike", "wrong activator"],
+      synonyms: [
+        "wrong acid",
+        "wrong pickle",
+        "wrong dip",
+        "sulfuric on stainless",
+        "no Woods strike",
+        "wrong activator",
+      ],
     },
     {
       slug: "repassivated-in-transfer",
@@ -129,7 +181,14 @@ export const underactivation: ShelfPart = {
       likelihood: 0.12,
       baseMetals: ["stainless", "nickel", "aluminium", "nickel-silver"],
       sourceKeys: ["astm-b254", "common-practice", "from-memory"],
-      synonyms: ["dried in the walk", "slow transfer", "waited too long before strike", "repassivated", "long rinse", "sat on the bench after acid"],
+      synonyms: [
+        "dried in the walk",
+        "slow transfer",
+        "waited too long before strike",
+        "repassivated",
+        "long rinse",
+        "sat on the bench after acid",
+      ],
     },
     {
       slug: "scale-left",
@@ -153,9 +212,28 @@ export const underactivation: ShelfPart = {
       proof:
         "Meter the volts at the rack, not at the rectifier, and the total current against the area. Halve the load: copper at once proves it.",
       likelihood: 0.08,
-      baseMetals: ["steel", "stainless", "iron", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
+      baseMetals: [
+        "steel",
+        "stainless",
+        "iron",
+        "brass",
+        "bronze",
+        "copper",
+        "nickel-silver",
+        "nickel",
+        "zinc",
+        "aluminium",
+      ],
       sourceKeys: ["guidebook-copper", "common-practice", "from-memory"],
-      synonyms: ["low volts", "no amps", "weak current", "rectifier low", "voltage too low", "anodes polarized", "overloaded rack"],
+      synonyms: [
+        "low volts",
+        "no amps",
+        "weak current",
+        "rectifier low",
+        "voltage too low",
+        "anodes polarized",
+        "overloaded rack",
+      ],
     },
   ],
   fixes: [
@@ -164,7 +242,10 @@ export const underactivation: ShelfPart = {
       causeSlugs: ["activator-spent"],
       title: "Polish back, fresh activator, re-strike",
       steps: [
-        polishBack({ detail: "Wet, 1000 to 1200 grit, the whole patch and past it until bright base metal shows all round. Edges lightly." }),
+        polishBack({
+          detail:
+            "Wet, 1000 to 1200 grit, the whole patch and past it until bright base metal shows all round. Edges lightly.",
+        }),
         clean("Electroclean", { detail: "1 to 2 min, steel anodic. Polishing leaves grit and hand oil.", minutes: 5 }),
         rinseToWaterBreak(),
         activate("Fresh activator, timed", {
@@ -185,17 +266,19 @@ export const underactivation: ShelfPart = {
       title: "Change the activator and date it",
       steps: [
         mend("activate", "Empty to treatment", {
-          detail: "Pump the spent acid to the acid line, never where cyanide drains. Rinse the tank, look for sludge and parts.",
+          detail:
+            "Pump the spent acid to the acid line, never where cyanide drains. Rinse the tank, look for sludge and parts.",
           minutes: 20,
           cautionKeys: ["acid-cyanide", "acid-splash", "waste"],
         }),
         mend("activate", "Make up new", {
           detail: "Water first, acid into it slowly, stir, let it cool to room temperature. Write the date and who.",
           minutes: 20,
-          cautionKeys: ["acid-splash", "sheet"],
+          cautionKeys: ["acid-cyanide", "acid-splash", "sheet"],
         }),
         mend("activate", "Prove it", {
-          detail: "One coupon of the commonest alloy through the line. First copper inside the window goes in the log as day 0.",
+          detail:
+            "One coupon of the commonest alloy through the line. First copper inside the window goes in the log as day 0.",
           minutes: 8,
           cautionKeys: ["acid-cyanide", "acid-splash", "power"],
         }),
@@ -227,11 +310,18 @@ export const underactivation: ShelfPart = {
       causeSlugs: ["activator-wrong", "repassivated-in-transfer"],
       title: "Stainless or nickel: Woods strike, then copper, wet all the way",
       steps: [
-        polishBack({ detail: "Wet, fine; it also breaks the old film. Nickel dust: keep it wet.", cautionKeys: ["nickel"] }),
-        clean("Electroclean", { detail: "1 to 2 min. On nickel finish cathodic: anodic makes it passive.", minutes: 5 }),
+        polishBack({
+          detail: "Wet, fine; it also breaks the old film. Nickel dust: keep it wet.",
+          cautionKeys: ["nickel"],
+        }),
+        clean("Electroclean", {
+          detail: "1 to 2 min. On nickel finish cathodic: anodic makes it passive.",
+          minutes: 5,
+        }),
         rinseToWaterBreak(),
         activate("Hydrochloric dip, 30 to 60 s", {
-          detail: "20 to 50 % by volume. Go on to the nickel strike without drying; a short rinse only if the card says so.",
+          detail:
+            "20 to 50 % by volume. Go on to the nickel strike without drying; a short rinse only if the card says so.",
           minutes: 2,
         }),
         {
@@ -245,7 +335,8 @@ export const underactivation: ShelfPart = {
         },
         strike({ detail: "Straight from the rinse, under 15 s, still wet. Tape test each part of this rack." }),
       ],
-      whenNot: "Not aluminium or zinc die cast: the acid eats them. Not 400-series springs or hardened stainless without an engineer.",
+      whenNot:
+        "Not aluminium or zinc die cast: the acid eats them. Not 400-series springs or hardened stainless without an engineer.",
       materials: ["hydrochloric acid", "Woods nickel strike", "nickel anodes"],
       sourceKeys: ["astm-b254", "woods-columns", "common-practice", "from-memory"],
     },
@@ -256,13 +347,18 @@ export const underactivation: ShelfPart = {
       steps: [
         {
           title: "Take the copper and old zincate off",
-          detail: "Nitric acid 50 % by volume until the face is clean and even, usually under a minute. It takes copper and zinc and leaves aluminium.",
+          detail:
+            "Three rinses first, so that no cyanide of the strike rides into the acid. Then nitric acid 50 % by volume until the face is clean and even, usually under a minute. It takes copper and zinc and leaves aluminium.",
           minutes: 3,
           perPart: false,
           cautionKeys: ["nitric", "acid-cyanide", "acid-splash", "waste"],
           station: "activate",
         },
-        clean("Etch and rinse", { detail: "Inhibited or mild etch, 20 to 60 s by the alloy. Thin walls and polished faces: the least that works.", minutes: 4 }),
+        clean("Etch and rinse", {
+          detail:
+            "Inhibited or mild etch, 20 to 60 s by the alloy. Thin walls and polished faces: the least that works.",
+          minutes: 4,
+        }),
         {
           title: "Desmut for the alloy",
           detail:
@@ -274,14 +370,16 @@ export const underactivation: ShelfPart = {
         },
         {
           title: "Zincate, strip in nitric, zincate again",
-          detail: "30 to 60 s, strip in 50 % nitric, then 15 to 30 s for the second coat: thin, even, blue-grey. Rinse well after each.",
+          detail:
+            "30 to 60 s, strip in 50 % nitric, then 15 to 30 s for the second coat: thin, even, blue-grey. Rinse well after each.",
           minutes: 6,
           perPart: false,
           cautionKeys: ["nitric", "hot-alkali", "acid-cyanide"],
           station: "activate",
         },
         strike({
-          detail: "Live entry at low voltage, at once: low free cyanide (1.5 to 3 g/L in the guidebook's bath for zincate), or the shop's neutral nickel strike.",
+          detail:
+            "Live entry at low voltage, at once: low free cyanide (1.5 to 3 g/L in the guidebook's bath for zincate), or the shop's neutral nickel strike.",
           cautionKeys: ["live-entry"],
         }),
         photographAndTape(),
@@ -295,9 +393,13 @@ export const underactivation: ShelfPart = {
       causeSlugs: ["repassivated-in-transfer"],
       title: "Cut the time between acid and strike",
       steps: [
-        mend("rinse", "Time the walk", { detail: "From out of the acid to current on, five racks. Write the longest, not the mean.", minutes: 15 }),
+        mend("rinse", "Time the walk", {
+          detail: "From out of the acid to current on, five racks. Write the longest, not the mean.",
+          minutes: 15,
+        }),
         mend("rinse", "Move the rinse, not the person", {
-          detail: "One short cold spray or dip rinse between acid and a water rinse before cyanide. Cold and still holds better than warm and aired.",
+          detail:
+            "One short cold spray or dip rinse between acid and a water rinse before cyanide. Cold and still holds better than warm and aired.",
           minutes: 30,
           cautionKeys: ["acid-cyanide"],
         }),
@@ -318,16 +420,21 @@ export const underactivation: ShelfPart = {
       steps: [
         {
           title: "Take scale off by blast or abrasive",
-          detail: "Fine glass bead or wet abrasive until the face is one even colour under a loupe. Mask threads and fits; agree the change of surface with the customer.",
+          detail:
+            "Fine glass bead or wet abrasive until the face is one even colour under a loupe. Mask threads and fits; agree the change of surface with the customer.",
           minutes: 8,
           perPart: true,
           cautionKeys: ["polishing-dust", "lead-dust", "beryllium"],
           station: null,
         },
-        clean("Soak and electroclean", { detail: "Full times. Alternating or anodic for steel, to lift smut along with grit.", minutes: 8 }),
+        clean("Soak and electroclean", {
+          detail: "Full times. Alternating or anodic for steel, to lift smut along with grit.",
+          minutes: 8,
+        }),
         rinseToWaterBreak(),
         activate("Pickle, then activate", {
-          detail: "Inhibited hydrochloric for steel, no longer than the scale needs, brushing off smut; 5 to 10 % sulfuric for copper alloys.",
+          detail:
+            "Inhibited hydrochloric for steel, no longer than the scale needs, brushing off smut; 5 to 10 % sulfuric for copper alloys.",
           minutes: 5,
         }),
         strike({ detail: "At once, then look first at welds and at edges that were hot." }),
@@ -343,17 +450,25 @@ export const underactivation: ShelfPart = {
       title: "Bring the strike back into its window",
       steps: [
         mend("strike", "Measure at the rack", {
-          detail: "Volts from rack hook to anode, total amps, and amps per dm² of what hangs. Guidebook range for a cyanide strike: 0.5 to 4 A/dm².",
+          detail:
+            "Volts from rack hook to anode, total amps, and amps per dm² of what hangs. Guidebook range for a cyanide strike: 0.5 to 4 A/dm².",
           minutes: 10,
           cautionKeys: ["power"],
         }),
         mend("strike", "Clean contacts and anodes", {
-          detail: "Current off. Scour bar, hooks and rack tips. Brush white or green film off the anodes; if it returns, analyse free cyanide.",
+          detail:
+            "Current off. Scour bar, hooks and rack tips. Brush white or green film off the anodes; if it returns, analyse free cyanide.",
           minutes: 20,
           cautionKeys: ["power", "cyanide", "acid-cyanide"],
         }),
-        mend("strike", "Load to the rectifier, not to the bar", { detail: "Fewer parts per rack until first copper comes inside the window. Write the load on the card.", minutes: 5 }),
-        strike({ detail: "Re-activate the part first if it stood. Raise the voltage in small steps and stop before edges darken." }),
+        mend("strike", "Load to the rectifier, not to the bar", {
+          detail: "Fewer parts per rack until first copper comes inside the window. Write the load on the card.",
+          minutes: 5,
+        }),
+        strike({
+          detail:
+            "Re-activate the part first if it stood. Raise the voltage in small steps and stop before edges darken.",
+        }),
       ],
       whenNot: "Not by voltage alone when the contact is bad: the good parts burn and the bad stay bare.",
       materials: ["multimeter", "scouring pad", "anode brush"],
@@ -365,7 +480,8 @@ export const underactivation: ShelfPart = {
       title: "Copper alloy caught wet: dip again and re-strike",
       steps: [
         rinse("Off the strike, rinse three times", {
-          detail: "Still wet and seen within a minute. Three rinses, the last one not shared with the cyanide line, before any acid.",
+          detail:
+            "Still wet and seen within a minute. Three rinses, the last one not shared with the cyanide line, before any acid.",
           minutes: 3,
           cautionKeys: ["acid-cyanide"],
         }),
@@ -377,11 +493,15 @@ export const underactivation: ShelfPart = {
           cautionKeys: ["polishing-dust"],
           station: null,
         },
-        activate("Fresh activator, 20 to 30 s", { detail: "Fresh beaker or tank. Two rinses, no stop on the way.", cautionKeys: [] }),
+        activate("Fresh activator, 20 to 30 s", {
+          detail: "Fresh beaker or tank. Two rinses, no stop on the way.",
+          cautionKeys: [],
+        }),
         strike({ detail: "Current on at once. Copper whole in 30 s or it goes to the polish-back card." }),
         photographAndTape(),
       ],
-      whenNot: "Not steel, stainless or zinc, and not a part that has dried: the copper left on hides what is under it.",
+      whenNot:
+        "Not steel, stainless or zinc, and not a part that has dried: the copper left on hides what is under it.",
       materials: ["pumice", "fresh activator"],
       sourceKeys: ["astm-b281", "common-practice", "from-memory"],
     },
