@@ -160,7 +160,7 @@ export const burning: ShelfPart = {
   fixes: [
     {
       slug: "dress-edges-lower-current",
-      causeSlugs: ["strike-voltage-high", "anode-too-close", "agitation-stopped"],
+      causeSlugs: ["strike-voltage-high", "anode-too-close", "agitation-stopped", "bath-lean-or-cold"],
       title: "Dress the edges back and re-strike lower",
       steps: [
         polishBack({

@@ -142,7 +142,7 @@ export const pitting: ShelfPart = {
   fixes: [
     {
       slug: "sand-and-restrike-filtered",
-      causeSlugs: ["particles-in-strike", "gas-pits"],
+      causeSlugs: ["particles-in-strike", "gas-pits", "strike-organics"],
       title: "Sand flat, strike in filtered solution",
       steps: [
         polishBack({ detail: "Wet 800 then 1200 on a block, until the loupe shows neither lump nor pit.", minutes: 8 }),

@@ -465,9 +465,10 @@ export const underactivation: ShelfPart = {
           detail: "Fewer parts per rack until first copper comes inside the window. Write the load on the card.",
           minutes: 5,
         }),
+        polishBack({ detail: "Parts that carry haze: wet, fine, to bare metal. Bare ones need none.", minutes: 4 }),
+        activate("Activate again", { detail: "Line card time: the part stood while the tank was mended." }),
         strike({
-          detail:
-            "Re-activate the part first if it stood. Raise the voltage in small steps and stop before edges darken.",
+          detail: "Raise the voltage in small steps and stop before edges darken.",
         }),
       ],
       whenNot: "Not by voltage alone when the contact is bad: the good parts burn and the bad stay bare.",
