@@ -2,6 +2,7 @@ import "server-only";
 import type { NextRequest } from "next/server";
 import { createRouteHandler, createUploadthing, UTFiles } from "uploadthing/next";
 import { UploadThingError } from "uploadthing/server";
+import type { RouteHandlerConfig } from "uploadthing/types";
 import { getPhoto, getPhotoOwner, refusePhoto } from "@/db/queries/photos";
 import { getUploadedFile } from "@/db/queries/uploads";
 import type { SignedIn } from "@/db/queries/crew";
@@ -30,21 +31,22 @@ export function nameSender(request: NextRequest, member: SignedIn): void {
 
 /** The upload kit's handler with the one route that photos use, its slug `photo`. */
 export function photoHandler(desk: Desk): UploadDesk["kit"] {
+  return createRouteHandler({ router: photoRouter(desk), config: kitConfig(desk) }).POST;
+}
+
+/** What the kit is told, so that nothing is left to what it would guess. */
+export function kitConfig(desk: Desk): RouteHandlerConfig {
   const { token, callbackUrl, ingestUrl, isLocal } = desk.config;
-  const { POST } = createRouteHandler({
-    router: photoRouter(desk),
-    config: {
-      token,
-      callbackUrl,
-      // Not the development protocol, in development either: the stand-in speaks the real one.
-      isDev: false,
-      // One step lower the kit logs every signed address.
-      logLevel: "Warning",
-      ...(ingestUrl ? { ingestUrl } : {}),
-      ...(isLocal ? { fetch: (url, init) => answerKit(desk, url, init) } : {}),
-    },
-  });
-  return POST;
+  return {
+    token,
+    callbackUrl,
+    // Not the development protocol, in development either: the stand-in speaks the real one.
+    isDev: false,
+    // One step lower the kit logs every signed address.
+    logLevel: "Warning",
+    ...(ingestUrl ? { ingestUrl } : {}),
+    ...(isLocal ? { fetch: (url, init) => answerKit(desk, url, init) } : {}),
+  };
 }
 
 export function photoRouter(desk: Desk) {
