@@ -1,4 +1,4 @@
-import { sql } from "drizzle-orm";
+import { sql, type SQL } from "drizzle-orm";
 import {
   foreignKey,
   index,
@@ -8,6 +8,7 @@ import {
   text,
   unique,
   uniqueIndex,
+  type AnySQLiteColumn,
 } from "drizzle-orm/sqlite-core";
 import { BASE_METALS, CLOSINGS, DISPOSITIONS, METHODS, OUTCOMES, STAGES_FOUND } from "@/lib/cases/case-words";
 import type { Sureness, Symptom } from "@/lib/cases/case-words";
@@ -23,6 +24,20 @@ export const caseNumbers = sqliteTable(
   { shopId: ownerShopId(), yearMonth: text("year_month").notNull(), last: integer("last").notNull() },
   (t) => [primaryKey({ columns: [t.shopId, t.yearMonth] })],
 );
+
+interface ClassColumns {
+  state: AnySQLiteColumn;
+  calledClass: AnySQLiteColumn;
+  confirmedClass: AnySQLiteColumn;
+}
+
+/**
+ * The class that a case stands under: while it is held the newest call, else what the second look confirmed. One
+ * expression for index and queries, since the index answers only for exactly this one; without a comma, at which
+ * drizzle-kit would cut it in two.
+ */
+export const standingClass = (t: ClassColumns): SQL<string | null> =>
+  sql`(case when ${t.state} = 'held' and ${t.calledClass} is not null then ${t.calledClass} else ${t.confirmedClass} end)`;
 
 export const cases = sqliteTable(
   "cases",
@@ -87,6 +102,12 @@ export const cases = sqliteTable(
     index("cases_by_opener").on(t.shopId, t.openedById, t.openedAt),
     index("cases_queue").on(t.shopId, t.state, t.atRiskCents, t.heldAt, t.id),
     index("cases_closed").on(t.shopId, t.closedAt, t.confirmedCauseId, t.costCents),
+    // The casebook's filters: each leads straight to its cases in the order in which they are shown.
+    index("cases_by_standing_class").on(t.shopId, standingClass(t), t.openedAt, t.id),
+    index("cases_by_closing").on(t.shopId, t.closing, t.openedAt, t.id),
+    index("cases_by_stage").on(t.shopId, t.stageFound, t.openedAt, t.id),
+    index("cases_by_job").on(t.shopId, t.workOrderId, t.openedAt, t.id),
+    index("cases_by_closed_time").on(t.shopId, t.closedAt, t.id),
     foreignKey({ columns: [t.shopId, t.workOrderId], foreignColumns: [workOrders.shopId, workOrders.id] }),
     foreignKey({ columns: [t.shopId, t.runId], foreignColumns: [runs.shopId, runs.id] }),
     foreignKey({ columns: [t.shopId, t.foundStationId], foreignColumns: [stations.shopId, stations.id] }),

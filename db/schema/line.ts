@@ -45,6 +45,7 @@ export const workOrders = sqliteTable(
     unique("work_orders_shop_row").on(t.shopId, t.id),
     uniqueIndex("work_orders_number").on(t.shopId, t.number),
     index("work_orders_open").on(t.shopId, t.closedAt, t.openedAt),
+    index("work_orders_customer").on(t.shopId, t.customerId, t.id),
     foreignKey({ columns: [t.shopId, t.customerId], foreignColumns: [customers.shopId, customers.id] }),
   ],
 );
