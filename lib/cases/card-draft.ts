@@ -76,5 +76,10 @@ export function draftMinutes(steps: readonly DraftStep[]): number {
 
 /** The card as it is sent. */
 export function draftToSend(steps: readonly DraftStep[]) {
-  return steps.map(({ title, detail, minutes, cautionKeys }) => ({ title, detail, plannedMinutes: minutes, cautionKeys }));
+  return steps.map(({ title, detail, minutes, cautionKeys }) => ({
+    title,
+    detail,
+    plannedMinutes: minutes,
+    cautionKeys,
+  }));
 }

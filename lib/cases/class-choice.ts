@@ -24,7 +24,9 @@ export function chooseClasses({ classes, called, counts, most }: Choosing): { fi
   const bySlug = new Map(classes.map((each) => [each.slug, each]));
   const seenHere = classes.toSorted((a, b) => (counts.get(b.slug) ?? 0) - (counts.get(a.slug) ?? 0));
   const calledHere = called.filter((slug) => bySlug.has(slug));
-  const lookAlikes = calledHere.flatMap((slug) => bySlug.get(slug)?.lookAlikes ?? []).filter((slug) => bySlug.has(slug));
+  const lookAlikes = calledHere
+    .flatMap((slug) => bySlug.get(slug)?.lookAlikes ?? [])
+    .filter((slug) => bySlug.has(slug));
   const order = [...new Set([...calledHere, ...lookAlikes, ...seenHere.map((each) => each.slug)])];
   return { first: order.slice(0, most), rest: order.slice(most) };
 }

@@ -1,5 +1,6 @@
 import type { CaseState } from "./case-state";
 import type { Closing } from "./case-words";
+import { progressWords } from "./card-progress";
 import { waitWords } from "./moment-words";
 
 /** What a case's tag says: its tail by name, and the words beside the reference. */
@@ -14,8 +15,8 @@ interface Standing {
   round: number;
   /** UTC milliseconds since when it waits in this round. */
   heldAt: number;
-  /** Steps of the current card, where there is one. */
-  steps?: { ticked: number; all: number };
+  /** How far the current card has come, where there is one. */
+  card?: { steps: number; ticked: number };
 }
 
 const CLOSED: Record<Closing, (round: number) => TagStanding> = {
@@ -31,13 +32,10 @@ const CLOSED: Record<Closing, (round: number) => TagStanding> = {
  * @example tagStanding({ state: "held", closing: null, round: 2, heldAt: 0 }, 55 * 60_000).words === "Round 2, 55 min"
  */
 export function tagStanding(standing: Standing, now: number): TagStanding {
-  const { state, closing, round, heldAt, steps } = standing;
+  const { state, closing, round, heldAt, card } = standing;
   if (state === "closed") return CLOSED[closing ?? "sound"](round);
-  if (state === "confirmed") return { state, words: "Confirmed, card ready" };
-  if (state === "in-rework") {
-    if (!steps || steps.all === 0) return { state, words: "In rework" };
-    const words = steps.ticked === steps.all ? "Re-strike to photograph" : `Step ${steps.ticked + 1} of ${steps.all}`;
-    return { state, words };
+  if (state === "confirmed" || state === "in-rework") {
+    return { state, words: card ? progressWords(card) : state === "confirmed" ? "Confirmed" : "In rework" };
   }
   const waited = waitWords(now - heldAt);
   return { state, words: round > 1 ? `Round ${round}, ${waited}` : `Held ${waited}` };
