@@ -1,6 +1,7 @@
 import type { Metadata, Viewport } from "next";
 import { cookies } from "next/headers";
 import type { ReactNode } from "react";
+import { preload } from "react-dom";
 import { readTheme } from "@/components/shell/theme";
 import "./globals.css";
 
@@ -20,21 +21,11 @@ const FONTS = [
 
 /** The theme is read from the cookie here, so that the first paint already has it. */
 export default async function RootLayout({ children }: { children: ReactNode }) {
+  for (const font of FONTS)
+    preload(`/fonts/${font}.woff2`, { as: "font", type: "font/woff2", crossOrigin: "anonymous" });
   const theme = readTheme((await cookies()).get("theme")?.value);
   return (
     <html lang="en" data-theme={theme} suppressHydrationWarning>
-      <head>
-        {FONTS.map((font) => (
-          <link
-            key={font}
-            rel="preload"
-            href={`/fonts/${font}.woff2`}
-            as="font"
-            type="font/woff2"
-            crossOrigin="anonymous"
-          />
-        ))}
-      </head>
       <body>{children}</body>
     </html>
   );

@@ -21,7 +21,7 @@ function Places({ places, here }: Pick<BandProps, "places" | "here">) {
       {places.map((place) => (
         <Link key={place.slug} href={place.href} aria-current={place.slug === here ? "page" : undefined}>
           {place.title}
-          {place.count ? <span className="count">{place.count}</span> : null}
+          {place.count ? <span className="waits">{place.count}</span> : null}
         </Link>
       ))}
     </nav>

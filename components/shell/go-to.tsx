@@ -22,7 +22,7 @@ export function GoToSheet({ places, here }: { places: readonly PlaceView[]; here
               >
                 <Glyph name={place.glyph} size={28} />
                 {place.title}
-                {place.count ? <span className="count">{place.count}</span> : null}
+                {place.count ? <span className="waits">{place.count}</span> : null}
               </Link>
             </li>
           ))}

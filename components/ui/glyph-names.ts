@@ -1,4 +1,4 @@
-/** Every picture in /glyphs.svg. A test reads the sprite and this list against each other. */
+/** Every picture in glyphs.svg. A test reads the sprite and this list against each other. */
 export const GLYPH_NAMES = [
   "bleed-out",
   "burning",

@@ -1,4 +1,5 @@
 import type { GlyphName } from "@/components/ui/glyph-names";
+import sprite from "@/components/ui/glyphs.svg";
 
 export interface GlyphProps {
   name: GlyphName;
@@ -9,7 +10,10 @@ export interface GlyphProps {
   className?: string;
 }
 
-/** One picture out of the sprite, in the colour of the text around it. */
+/**
+ * One picture out of the sprite, in the colour of the text around it. The sprite is imported, not served from public,
+ * so that its address changes with its content and browsers keep it: pictures still show when the signal is gone.
+ */
 export function Glyph({ name, size, label, className }: GlyphProps) {
   const naming = label ? { role: "img", "aria-label": label } : { "aria-hidden": true };
   return (
@@ -18,7 +22,7 @@ export function Glyph({ name, size, label, className }: GlyphProps) {
       style={size ? { width: size, height: size } : undefined}
       {...naming}
     >
-      <use href={`/glyphs.svg#${name}`} />
+      <use href={`${sprite.src}#${name}`} />
     </svg>
   );
 }

@@ -11,7 +11,7 @@ import { GLYPH_NAMES } from "@/components/ui/glyph-names";
 import { SHELF_CLASSES } from "@/lib/cases/case-words";
 import type { StationView } from "@/lib/line/station-view";
 
-const sprite = readFileSync("public/glyphs.svg", "utf8");
+const sprite = readFileSync("components/ui/glyphs.svg", "utf8");
 const tailStyles = readFileSync("app/styles/tag-tails.css", "utf8");
 
 describe("glyphs", () => {
