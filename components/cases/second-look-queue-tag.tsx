@@ -43,7 +43,7 @@ export function QueueTag({ row, href, now, stake, photo, current }: QueueTagProp
       stateWords={standing.words}
       classSlug={row.calledClass ?? row.confirmedClass}
       classWords={classOf(row)}
-      meta={`${row.quantity} × ${row.partName}, ${metalWords(row.baseMetal, row.alloy).toLowerCase()}`}
+      meta={`${row.quantity} × ${row.partName}, ${metalWords(row.baseMetal, row.alloy)}`}
       stake={stake}
       photo={photo}
       current={current}

@@ -38,7 +38,7 @@ function StandingPareto({ rows, money, hrefFor, label }: ParetoChartProps) {
     <svg className="pareto__wide" viewBox={`0 0 ${width} ${height}`} role="group" aria-label={label}>
       <Hatch id="pareto-wide" />
       <path d={`M0 ${eighty}H${width}`} stroke="var(--edge)" strokeDasharray="2 5" />
-      <text className="chart-quiet" x={width} y={eighty - 7} textAnchor="end">
+      <text className="chart-quiet" x="0" y={eighty - 7}>
         80% of the money
       </text>
       {bars.map(({ row, middle, tall, y, isFew }, index) => (

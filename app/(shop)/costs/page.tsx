@@ -215,7 +215,8 @@ interface LedgerTableProps {
 
 function LedgerTable({ rows, by, money, totalCents, hrefFor }: LedgerTableProps) {
   return (
-    <Section title="The same as a table" className="ledger-table">
+    <details className="ledger-table">
+      <summary>The same as a table</summary>
       <DataTable
         caption={`Rework cost by ${LEDGER_GROUP_TITLES[by].toLowerCase()}`}
         columns={[
@@ -239,7 +240,7 @@ function LedgerTable({ rows, by, money, totalCents, hrefFor }: LedgerTableProps)
           totalCents > 0 ? "100%" : "0%",
         ]}
       />
-    </Section>
+    </details>
   );
 }
 

@@ -223,7 +223,11 @@ function chooseFix(
     )
     .where(and(eq(libraryClassCauses.shopId, stage.shopId), eq(libraryClassCauses.classSlug, classSlug)))
     .all();
-  const cause = pick(stage.random, causes);
+  // Most of what an activator past its window spoils is put down to just that, as in the demo shop's story.
+  const cause = pick(
+    stage.random,
+    causes.map((each) => (each.slug === "activator-spent" ? { ...each, weight: each.weight * 6 } : each)),
+  );
   const fix = tx
     .select({ id: libraryFixes.id, title: libraryFixes.title, steps: libraryFixes.steps })
     .from(libraryCauseFixes)
