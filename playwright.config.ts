@@ -16,7 +16,6 @@ export default defineConfig({
   forbidOnly: true,
   retries: 0,
   reporter: [["list"], ["json", { outputFile: process.env.PLAYWRIGHT_JSON_OUTPUT_NAME ?? "test-results/report.json" }]],
-  globalSetup: "./tests/e2e/prepare.ts",
   use: {
     baseURL: E2E_ORIGIN,
     trace: "retain-on-failure",
@@ -27,7 +26,11 @@ export default defineConfig({
     },
   },
   projects: [
-    { name: "phone", use: { ...devices["Pixel 7"], viewport: { width: 360, height: 780 }, channel: undefined }, testIgnore: /desk\./ },
+    {
+      name: "phone",
+      use: { ...devices["Pixel 7"], viewport: { width: 360, height: 780 }, channel: undefined },
+      testIgnore: /desk\./,
+    },
     { name: "desk", use: { viewport: { width: 1440, height: 900 } }, testMatch: /(desk|both)\./ },
   ],
   webServer: {

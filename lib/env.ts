@@ -32,7 +32,8 @@ export type Env = z.infer<typeof schema>;
  * @throws Error naming each variable that is wrong
  */
 export function readEnv(source: Record<string, string | undefined> = process.env): Env {
-  const result = schema.safeParse(source);
+  // `NAME=` in an .env means that it is not set.
+  const result = schema.safeParse(Object.fromEntries(Object.entries(source).filter(([, value]) => value !== "")));
   if (result.success) return result.data;
   const wrong = result.error.issues.map((issue) => `${issue.path.join(".")}: ${issue.message}`).join("; ");
   throw new Error(`The environment is not right. ${wrong}`);
