@@ -1,0 +1,319 @@
+import { randomUUID } from "node:crypto";
+import { NextRequest } from "next/server";
+import * as account from "@/app/(shop)/account/actions";
+import * as caseActions from "@/app/(shop)/cases/actions";
+import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
+import * as crew from "@/app/(shop)/crew/actions";
+import * as callsRoute from "@/app/api/cases/[ref]/calls/route";
+import * as confirmationRoute from "@/app/api/cases/[ref]/confirmation/route";
+import * as outcomeRoute from "@/app/api/cases/[ref]/outcome/route";
+import * as caseRoute from "@/app/api/cases/[ref]/route";
+import * as casesRoute from "@/app/api/cases/route";
+import * as ledgerRoute from "@/app/api/ledger/route";
+import * as photoSizeRoute from "@/app/api/photos/[id]/[size]/route";
+import * as photoRoute from "@/app/api/photos/[id]/route";
+import type { ActState } from "@/lib/act-state";
+import type { FaultCode } from "@/lib/fault";
+import type { Permission } from "@/lib/permissions";
+import { TEST_PASSWORD } from "@/tests/fixtures/crew-factory";
+import { makeConfirmation, makeSnap } from "@/tests/fixtures/shop-factory";
+import {
+  closedCase,
+  confirmedCase,
+  heldCase,
+  loosePhoto,
+  pendingInvite,
+  readyPhoto,
+  stepsOf,
+  tickedCase,
+  type Aim,
+} from "./targets";
+
+export const UPLOADS = process.env.UPLOADS_DIR ?? "uploads";
+
+/** How a call ended: "ok", or the fault's code. */
+export type Ending = "ok" | FaultCode;
+
+export interface Entry {
+  /** File and export, as the completeness check finds them. */
+  name: string;
+  permission: Permission;
+  /** `row`: aims at a row of a shop. `self`: only ever touches the caller. `shop`: lists or makes, aims at no row. */
+  aims: "row" | "self" | "shop";
+  /** Makes the row that the call aims at, and hands back the call. */
+  prepare: (aim: Aim) => () => Promise<Ending>;
+}
+
+type Action = (previous: ActState<never>, form: FormData) => Promise<ActState<unknown>>;
+type Route = (request: NextRequest, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
+
+function form(values: Record<string, unknown>): FormData {
+  const data = new FormData();
+  for (const [name, value] of Object.entries(values)) {
+    if (value === undefined || value === null) continue;
+    if (Array.isArray(value)) for (const each of value) data.append(`${name}[]`, String(each));
+    else data.append(name, String(value));
+  }
+  return data;
+}
+
+async function ending(action: unknown, values: Record<string, unknown>): Promise<Ending> {
+  const state = await (action as Action)(null, form(values));
+  if (!state) throw new Error("The action gave nothing back.");
+  return state.ok ? "ok" : state.fault.code;
+}
+
+async function answered(
+  route: unknown,
+  method: string,
+  path: string,
+  params: Record<string, string>,
+  body?: unknown,
+): Promise<Ending> {
+  const headers = body === undefined ? undefined : { "content-type": "application/json" };
+  const request = new NextRequest(`http://localhost:3000${path}`, {
+    method,
+    headers,
+    body: body === undefined ? undefined : JSON.stringify(body),
+  });
+  const response = await (route as Route)(request, { params: Promise.resolve(params) });
+  if (response.ok) {
+    await response.arrayBuffer();
+    return "ok";
+  }
+  return ((await response.json()) as { code: FaultCode }).code;
+}
+
+const CASES = "app/(shop)/cases/actions.ts";
+const CREW = "app/(shop)/crew/actions.ts";
+const ACCOUNT = "app/(shop)/account/actions.ts";
+
+/** Flattens a confirmation into what a form sends: the steps are one JSON field. */
+const confirmationForm = (aim: Aim, ref: string) => {
+  const { steps, ...rest } = makeConfirmation(aim.db, aim.shop, ref);
+  return { ...rest, steps: JSON.stringify(steps) };
+};
+
+const caseEntry = (name: string, permission: Permission, prepare: Entry["prepare"]): Entry => ({
+  name: `${CASES} ${name}`,
+  permission,
+  aims: "row",
+  prepare,
+});
+
+export const ENTRIES: readonly Entry[] = [
+  caseEntry("snapCase", "case.snap", (aim) => () => ending(caseActions.snapCase, { ...makeSnap(aim.shop) })),
+  caseEntry("addCall", "case.call", (aim) => {
+    const { ref } = heldCase(aim);
+    return () => ending(caseActions.addCall, { ref, calledClass: "dewetting", sure: 2 });
+  }),
+  caseEntry("confirmCase", "case.confirm", (aim) => {
+    const { ref } = heldCase(aim);
+    return () => ending(caseActions.confirmCase, confirmationForm(aim, ref));
+  }),
+  caseEntry("releaseCase", "case.confirm", (aim) => {
+    const { ref } = heldCase(aim);
+    return () => ending(caseActions.releaseCase, { ref, why: "only light" });
+  }),
+  caseEntry("tickStep", "card.work", (aim) => {
+    const { ref, id } = confirmedCase(aim);
+    const [stepId] = stepsOf(aim, id);
+    return () => ending(caseActions.tickStep, { ref, stepId, spentMinutes: 4 });
+  }),
+  caseEntry("recordOutcome", "card.work", (aim) => {
+    const { ref } = tickedCase(aim);
+    return () => ending(caseActions.recordOutcome, { ref, outcome: "sound", note: "tape clean" });
+  }),
+  caseEntry("disposeCase", "case.confirm", (aim) => {
+    const { ref } = confirmedCase(aim);
+    return () => ending(caseActions.disposeCase, { ref, disposition: "scrap", why: "eaten away" });
+  }),
+  caseEntry("takeBack", "case.confirm", (aim) => {
+    const { ref } = confirmedCase(aim);
+    return () => ending(caseActions.takeBack, { ref, why: "wrong class" });
+  }),
+  caseEntry("reopenCase", "case.confirm", (aim) => {
+    const { ref } = closedCase(aim);
+    return () => ending(caseActions.reopenCase, { ref, why: "came loose" });
+  }),
+  caseEntry("amendCase", "case.amend", (aim) => {
+    const { ref } = heldCase(aim);
+    return () =>
+      ending(caseActions.amendCase, { ref, quantity: 4, baseMetal: "brass", stageFound: "at-strike", note: "" });
+  }),
+  caseEntry("setExemplar", "exemplar.choose", (aim) => {
+    const { ref, photoId } = readyPhoto(aim, UPLOADS);
+    return () => ending(caseActions.setExemplar, { ref, photoId, chosen: "true" });
+  }),
+
+  {
+    name: `${CREW} invitePerson`,
+    permission: "crew.manage",
+    aims: "shop",
+    prepare: () => () =>
+      ending(crew.invitePerson, { email: `${randomUUID()}@new.example`, name: "New Person", roles: ["plater"] }),
+  },
+  {
+    name: `${CREW} sendInviteAgain`,
+    permission: "crew.manage",
+    aims: "row",
+    prepare: (aim) => {
+      const inviteId = pendingInvite(aim);
+      return () => ending(crew.sendInviteAgain, { inviteId });
+    },
+  },
+  {
+    name: `${CREW} takeInviteBack`,
+    permission: "crew.manage",
+    aims: "row",
+    prepare: (aim) => {
+      const inviteId = pendingInvite(aim);
+      return () => ending(crew.takeInviteBack, { inviteId });
+    },
+  },
+  {
+    name: `${CREW} changeMemberRoles`,
+    permission: "crew.manage",
+    aims: "row",
+    prepare: (aim) => () =>
+      ending(crew.changeMemberRoles, { memberId: aim.shop.members.otherPlater.memberId, roles: ["trainee"] }),
+  },
+  {
+    name: `${CREW} removeFromCrew`,
+    permission: "crew.manage",
+    aims: "row",
+    prepare: (aim) => () => ending(crew.removeFromCrew, { memberId: aim.shop.members.otherPlater.memberId }),
+  },
+
+  {
+    name: `${ACCOUNT} renameMe`,
+    permission: "account.edit",
+    aims: "self",
+    prepare: () => () => ending(account.renameMe, { name: "Another Name" }),
+  },
+  {
+    name: `${ACCOUNT} chooseMyMails`,
+    permission: "account.edit",
+    aims: "self",
+    prepare: () => () => ending(account.chooseMyMails, { kinds: ["case-confirmed"] }),
+  },
+  {
+    name: `${ACCOUNT} changeMyPassword`,
+    permission: "account.edit",
+    aims: "self",
+    prepare: () => () =>
+      ending(account.changeMyPassword, { currentPassword: TEST_PASSWORD, password: "nine green kettles sing" }),
+  },
+  {
+    name: `${ACCOUNT} signMeOut`,
+    permission: "account.edit",
+    aims: "self",
+    prepare: () => () => ending(account.signMeOut, {}),
+  },
+  {
+    name: `${ACCOUNT} signMeOutEverywhere`,
+    permission: "account.edit",
+    aims: "self",
+    prepare: () => () => ending(account.signMeOutEverywhere, {}),
+  },
+
+  {
+    name: "app/api/cases/route.ts GET",
+    permission: "case.see",
+    aims: "shop",
+    prepare: () => () => answered(casesRoute.GET, "GET", "/api/cases", {}),
+  },
+  {
+    name: "app/api/cases/route.ts POST",
+    permission: "case.snap",
+    aims: "row",
+    prepare: (aim) => () => answered(casesRoute.POST, "POST", "/api/cases", {}, makeSnap(aim.shop)),
+  },
+  {
+    name: "app/api/cases/[ref]/route.ts GET",
+    permission: "case.see",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = heldCase(aim);
+      return () => answered(caseRoute.GET, "GET", `/api/cases/${ref}`, { ref });
+    },
+  },
+  {
+    name: "app/api/cases/[ref]/calls/route.ts POST",
+    permission: "case.call",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = heldCase(aim);
+      return () =>
+        answered(callsRoute.POST, "POST", `/api/cases/${ref}/calls`, { ref }, { calledClass: "dewetting", sure: 2 });
+    },
+  },
+  {
+    name: "app/api/cases/[ref]/confirmation/route.ts POST",
+    permission: "case.confirm",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = heldCase(aim);
+      const body = makeConfirmation(aim.db, aim.shop, ref);
+      return () => answered(confirmationRoute.POST, "POST", `/api/cases/${ref}/confirmation`, { ref }, body);
+    },
+  },
+  {
+    name: "app/api/cases/[ref]/outcome/route.ts POST",
+    permission: "card.work",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = tickedCase(aim);
+      return () =>
+        answered(
+          outcomeRoute.POST,
+          "POST",
+          `/api/cases/${ref}/outcome`,
+          { ref },
+          { outcome: "sound", note: "tape clean" },
+        );
+    },
+  },
+  {
+    name: "app/(shop)/cases/[ref]/tag/code.svg/route.ts GET",
+    permission: "case.see",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = heldCase(aim);
+      return () => answered(tagCode.GET, "GET", `/cases/${ref}/tag/code.svg`, { ref });
+    },
+  },
+  {
+    name: "app/api/ledger/route.ts GET",
+    permission: "ledger.see",
+    aims: "shop",
+    prepare: () => () => answered(ledgerRoute.GET, "GET", "/api/ledger?by=cause", {}),
+  },
+  {
+    name: "app/api/photos/[id]/route.ts GET",
+    permission: "case.see",
+    aims: "row",
+    prepare: (aim) => {
+      const { photoId } = readyPhoto(aim, UPLOADS);
+      return () => answered(photoRoute.GET, "GET", `/api/photos/${photoId}`, { id: photoId });
+    },
+  },
+  {
+    name: "app/api/photos/[id]/route.ts DELETE",
+    permission: "photo.withdraw",
+    aims: "row",
+    prepare: (aim) => {
+      const id = loosePhoto(aim);
+      return () => answered(photoRoute.DELETE, "DELETE", `/api/photos/${id}`, { id });
+    },
+  },
+  {
+    name: "app/api/photos/[id]/[size]/route.ts GET",
+    permission: "case.see",
+    aims: "row",
+    prepare: (aim) => {
+      const { photoId } = readyPhoto(aim, UPLOADS);
+      return () => answered(photoSizeRoute.GET, "GET", `/api/photos/${photoId}/thumb`, { id: photoId, size: "thumb" });
+    },
+  },
+];
