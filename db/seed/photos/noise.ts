@@ -13,9 +13,7 @@ const LAST = SIDE - 1;
 
 /** Fills the lattice once, so that a pixel costs four look-ups a field and no allocation. */
 export function makeNoise(seed: number): Noise {
-  const random = seededRandom(seed);
-  const lattice = new Float32Array(SIDE * SIDE);
-  for (let i = 0; i < lattice.length; i++) lattice[i] = random();
+  const lattice = Float32Array.from({ length: SIDE * SIDE }, seededRandom(seed));
 
   function value(x: number, y: number, channel: number): number {
     // Truncating a shifted number is a cheaper floor; no photo reaches -4096.

@@ -21,7 +21,7 @@ export type PartTruth = {
   card?: Ring;
 };
 
-/** Counts the maps. A photo without a part pixel has shares of zero but for `copperShare`, which no reading can contradict: throws instead. */
+/** Counts the maps. Throws RangeError when no part pixel is in the photo: a share of nothing would mean nothing. */
 export function countTruth(frame: Frame): PartTruth {
   const { partMask, copperMap, darkMap, width, height } = frame;
   let part = 0;

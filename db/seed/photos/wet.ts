@@ -1,7 +1,7 @@
 import { ramp } from "./curves";
 import { surveyField } from "./survey";
 import { scatter, type Disc } from "./scatter";
-import { placeOn, type FaultScene, type Paint } from "./surface";
+import { placeOn, type FaultScene, type Paint, type Surface } from "./surface";
 
 /** What water adds to a point: 1 inside a drop, where the light flashes, else 0. */
 export type Water = { drop: number };
@@ -38,16 +38,20 @@ export function wetLook(scene: FaultScene, water: Water): Paint {
       const away = dx * dx + dy * dy;
       if (away > 1) continue;
       water.drop = 1;
-      // A lens: dark on the lit side, bright opposite, and a dark outline.
-      const lens = 0.9 + 0.16 * (dx * 0.5 + dy * 0.8) - 0.22 * ramp(0.72, 1, away);
-      surface.red *= lens;
-      surface.green *= lens;
-      surface.blue *= lens;
-      surface.tiltX = surface.tiltX * 0.3 + dx * 0.58;
-      surface.tiltY = surface.tiltY * 0.3 + dy * 0.58;
-      surface.gloss = Math.max(surface.gloss, 0.55);
+      lens(surface, dx, dy, away);
     }
   };
+}
+
+/** A drop is a lens: dark on the lit side, bright opposite, with a dark outline. */
+function lens(surface: Surface, dx: number, dy: number, away: number): void {
+  const shade = 0.9 + 0.16 * (dx * 0.5 + dy * 0.8) - 0.22 * ramp(0.72, 1, away);
+  surface.red *= shade;
+  surface.green *= shade;
+  surface.blue *= shade;
+  surface.tiltX = surface.tiltX * 0.3 + dx * 0.58;
+  surface.tiltY = surface.tiltY * 0.3 + dy * 0.58;
+  surface.gloss = Math.max(surface.gloss, 0.55);
 }
 
 function dropsOn(scene: FaultScene): Disc[] {

@@ -27,15 +27,7 @@ export const dewetting: Fault = (scene) => {
     const discs = near(x, y);
     if (discs.length === 0) return;
     const wobble = (noise.cloud(x * 6, y * 6, 110, 3) - 0.5) * 0.3 * reach;
-    let outside = 9;
-    for (let i = 0; i < discs.length; i++) {
-      const disc = discs[i];
-      if (!disc) continue;
-      const dx = x - disc.x;
-      const dy = (y - disc.y) * (0.85 + 0.4 * disc.kind);
-      const own = Math.sqrt(dx * dx + dy * dy) - disc.radius + wobble * Math.min(1, disc.radius * 8);
-      if (own < outside) outside = own;
-    }
+    const outside = nearestShore(discs, x, y, wobble);
     surface.copper -= ramp(0.009, -0.009, outside);
     if (outside > -0.01) tint(surface, 0.34, 0.13, 0.075, bell(outside - 0.014, 0.016) * 0.65);
     if (outside > 0) {
@@ -45,3 +37,17 @@ export const dewetting: Fault = (scene) => {
     }
   };
 };
+
+/** Distance to the nearest island's shore, below zero on bare metal. Small islands wobble less, or they would vanish. */
+function nearestShore(discs: readonly Disc[], x: number, y: number, wobble: number): number {
+  let nearest = 9;
+  for (let i = 0; i < discs.length; i++) {
+    const disc = discs[i];
+    if (!disc) continue;
+    const dx = x - disc.x;
+    const dy = (y - disc.y) * (0.85 + 0.4 * disc.kind);
+    const own = Math.sqrt(dx * dx + dy * dy) - disc.radius + wobble * Math.min(1, disc.radius * 8);
+    if (own < nearest) nearest = own;
+  }
+  return nearest;
+}

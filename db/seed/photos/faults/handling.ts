@@ -42,7 +42,7 @@ const fingerprint: Fault = (scene): Paint => {
     const core = Math.sqrt(u * u + (v - size * 0.2) * (v - size * 0.2) * (v > size * 0.2 ? loop : 1)) + blot * 0.09;
     const ridge = ramp(-0.15, 0.55, Math.sin(core * ridges));
     const broken = 0.3 + 0.7 * ramp(0.25, 0.6, noise.cloud(x * 16, y * 16, channel + 1, 2));
-    lay(surface, 0.17, 0.08, 0.05, Math.min(0.8, press * ridge * broken * strength * 0.78));
+    lay(surface, 0.17, 0.08, 0.05, Math.min(0.8, press * ridge * broken * strength * 0.92));
     tint(surface, 0.5, 0.27, 0.2, press * 0.5 * strength);
     surface.gloss *= 1 - press * 0.35;
   };
