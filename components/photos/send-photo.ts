@@ -41,7 +41,7 @@ export async function sendPhoto(
   const file = new File([photo.content], name, { type, lastModified: takenAt });
   const stall = watchStall(signal);
   try {
-    await uploadFiles("photo", {
+    const [sent] = await uploadFiles("photo", {
       files: [file],
       input: { photoId, purpose, ...(takenAt > 0 ? { takenAt } : {}) },
       signal: stall.signal,
@@ -50,7 +50,9 @@ export async function sendPhoto(
         onShare(Math.min(1, loaded / file.size));
       },
     });
-    return { kind: "kept" };
+    // Sent by way of the hosted service, a refusal comes back as the answer of an upload that went well.
+    const verdict = sent?.serverData;
+    return verdict?.state === "refused" ? { kind: "refused", words: verdict.sentence } : { kind: "kept" };
   } catch (error) {
     return signal.aborted ? { kind: "stopped" } : readFailure(error);
   } finally {

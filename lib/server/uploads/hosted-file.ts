@@ -29,9 +29,9 @@ export async function fetchHosted({ key, ufsUrl }: HostedFile, to: string): Prom
 }
 
 /** Removes a file from the hosted service, once it is safe here: photos live with the shop. */
-export async function removeHosted({ key }: HostedFile): Promise<void> {
+export async function removeHosted({ key }: HostedFile, token: string): Promise<void> {
   // Left behind it costs money and nothing else.
-  await new UTApi().deleteFiles(key).catch((error: unknown) => console.error("the upload service keeps a copy", error));
+  await new UTApi({ token }).deleteFiles(key).catch((error: unknown) => console.error("the upload service keeps a copy", error));
 }
 
 /** One byte more than a photo may have is let through, so that the check sees that it is too large. */

@@ -100,7 +100,7 @@ async function complete(desk: Desk, ticket: UploadTicket, hosted: HostedFile & {
   const isNew = state !== "processing" && state !== "ready";
   if (!config.isLocal && isNew) await fetchHosted(hosted, file);
   const verdict = await takeInPhoto(db, root, { ticket, fileName: hosted.name, file }, Date.now());
-  if (!config.isLocal && isNew) await removeHosted(hosted);
+  if (!config.isLocal && isNew) await removeHosted(hosted, config.token);
   return { ...verdict };
 }
 

@@ -26,10 +26,11 @@ export interface UploadConfig {
  */
 export function uploadConfig(env: Env): UploadConfig {
   const origin = new URL(env.NEXTAUTH_URL).origin;
-  const token = env.UPLOADTHING_TOKEN ?? localUploadToken(env.NEXTAUTH_SECRET ?? "");
+  // An empty line in .env means the same as none.
+  const token = env.UPLOADTHING_TOKEN || localUploadToken(env.NEXTAUTH_SECRET ?? "");
   const { apiKey, appId, regions } = readToken(token);
   const isLocal = regions.includes(LOCAL_REGION);
-  const ingestUrl = env.UPLOADTHING_INGEST_URL ?? (isLocal ? `${origin}/api/ingest` : undefined);
+  const ingestUrl = env.UPLOADTHING_INGEST_URL || (isLocal ? `${origin}/api/ingest` : undefined);
   return {
     token,
     apiKey,
