@@ -11,9 +11,6 @@ import { makePlaceholder } from "@/lib/server/images/placeholder";
 import { makeSizes } from "@/lib/server/images/sizes";
 import type { DemoShots } from "./demo-play";
 
-/** Photos rendered before any is stored: memory stays small, and both cores stay busy. */
-const CHUNK = 24;
-
 export interface Shot {
   id: string;
   shopId: number;
@@ -55,17 +52,11 @@ export async function storeShots(
   onDone: (done: number) => void,
 ): Promise<void> {
   await fs.mkdir(uploads, { recursive: true });
-  for (let from = 0; from < shots.length; from += CHUNK) {
-    const chunk = shots.slice(from, from + CHUNK);
-    const jpegs = await renderMany(
-      chunk.map((shot) => shot.spec),
-      { workers: 2 },
-    );
-    for (const [index, shot] of chunk.entries()) {
-      const jpeg = jpegs[index];
-      if (jpeg) await storeShot(db, uploads, shot, jpeg);
-    }
-    onDone(from + chunk.length);
+  const orders = shots.map((shot) => ({ ...shot.spec, capturedAt: shot.takenAt }));
+  const jpegs = await renderMany(orders, { workers: 2, onDone });
+  for (const [index, shot] of shots.entries()) {
+    const jpeg = jpegs[index];
+    if (jpeg) await storeShot(db, uploads, shot, jpeg);
   }
 }
 

@@ -56,7 +56,7 @@ export async function seedDemo(db: Db, options: DemoOptions): Promise<void> {
   );
   options.say(`Cases are in. Rendering ${shots.length} photos.`);
   await storeShots(db, options.uploads, shots, (done) => {
-    options.say(`${done} of ${shots.length} photos`);
+    if (done % 50 === 0) options.say(`${done} of ${shots.length} photos`);
   });
   db.transaction((tx) => chooseExemplars(tx));
 }
