@@ -11,6 +11,7 @@ const safetyHeaders = [
 /** @type {import("next").NextConfig} */
 const config = {
   poweredByHeader: false,
+  devIndicators: false,
   experimental: { authInterrupts: true },
   reactStrictMode: true,
   turbopack: { root: path.resolve(".") },
