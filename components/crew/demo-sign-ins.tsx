@@ -23,7 +23,7 @@ export function DemoSignIns({ groups, password, onPick }: DemoSignInsProps) {
       </p>
       {groups.map((group) => (
         <div key={group.shopName}>
-          <h2 className="small mid">{group.shopName}</h2>
+          <h2>{group.shopName}</h2>
           <ul>
             {group.people.map((person) => (
               <li key={person.email}>

@@ -28,14 +28,9 @@ export function PasswordField({ label, hint, error, ...native }: PasswordFieldPr
             maxLength={256}
             spellCheck={false}
           />
-          <button
-            type="button"
-            className={styles.show}
-            aria-pressed={isShown}
-            aria-label={`Show ${label.toLowerCase()}`}
-            onClick={() => setShown(!isShown)}
-          >
+          <button type="button" className={styles.show} onClick={() => setShown(!isShown)}>
             {isShown ? "Hide" : "Show"}
+            <span className="sr-only"> {label.toLowerCase()}</span>
           </button>
         </span>
       )}

@@ -2,6 +2,7 @@
 
 import Link from "next/link";
 import { useRef, useState, type FormEvent } from "react";
+import { flushSync } from "react-dom";
 import { Button } from "@/components/ui/button";
 import { Field } from "@/components/ui/field";
 import { signInWords } from "@/lib/crew/sign-in-words";
@@ -35,8 +36,11 @@ export function SignInForm({ to, code, demo }: SignInFormProps) {
     const refusal = await askSignIn(String(typed.get("email")), String(typed.get("password"))).catch(() => "no-signal");
     // A whole new page load: everything on it is rendered for the person who is now signed in.
     if (refusal === null) return window.location.assign(to);
-    setBusy(false);
-    setError(refusal === "no-signal" ? NO_SIGNAL : signInWords(refusal));
+    // At once, so that the sentence is there when the focus arrives and readers say both.
+    flushSync(() => {
+      setBusy(false);
+      setError(refusal === "no-signal" ? NO_SIGNAL : signInWords(refusal));
+    });
     focusOn(form.current, "password");
   }
 
@@ -51,9 +55,6 @@ export function SignInForm({ to, code, demo }: SignInFormProps) {
     <form ref={form} className="form" method="post" onSubmit={submit}>
       <Field label="E-mail" name="email" type="email" autoComplete="username" required maxLength={254} />
       <PasswordField label="Password" name="password" autoComplete="current-password" error={error} />
-      <p className="sr-only" role="alert">
-        {error}
-      </p>
       <Button variant="main" type="submit" wide busy={isBusy}>
         Sign in
       </Button>

@@ -5,17 +5,36 @@ export const AUDIT_WORDS = {
   "member.invited": "invited",
   "invite.sent-again": "sent the invite again to",
   "invite.revoked": "took back the invite of",
-  "member.joined": "joined the crew:",
+  "member.joined": "joined the crew",
   "member.roles": "changed the roles of",
   "member.removed": "removed from the crew",
   "account.renamed": "changed their own name to",
-  "account.password": "changed their own password:",
-  "account.password-reset": "set a new password by a mailed link:",
-  "account.signed-out-everywhere": "signed out everywhere:",
+  "account.password": "changed their own password",
+  "account.password-reset": "set a new password by a mailed link",
+  "account.signed-out-everywhere": "signed out everywhere",
   "rates.set": "set rates",
   "library.published": "published in the library",
 } as const satisfies Record<string, string>;
 export type AuditAction = keyof typeof AUDIT_WORDS;
+
+/** Done by somebody to themselves: the subject is their name at the time. */
+const OWN_ACTIONS: readonly string[] = [
+  "member.joined",
+  "account.password",
+  "account.password-reset",
+  "account.signed-out-everywhere",
+];
+
+/**
+ * What an entry says after the person's name.
+ * @example auditSentence({ action: "member.removed", subject: "Tobias", memberName: "Ruth" }) === "removed from the crew Tobias"
+ * @example auditSentence({ action: "member.joined", subject: "Ines", memberName: "Ines" }) === "joined the crew"
+ */
+export function auditSentence(entry: { action: string; subject: string; memberName: string | null }): string {
+  const words = auditWords(entry.action);
+  if (!OWN_ACTIONS.includes(entry.action)) return `${words} ${entry.subject}`;
+  return entry.subject === entry.memberName ? words : `${words}, then called ${entry.subject}`;
+}
 
 /** The words of an action; one that this version does not know is shown by its key, never hidden. */
 export function auditWords(action: string): string {

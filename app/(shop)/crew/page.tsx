@@ -47,11 +47,11 @@ export default async function CrewPage() {
           </ul>
         </Section>
         <div>
-          <Section title="Invite somebody" id="invite">
+          <Section title="Invite somebody" id="invite" aside={<Link href={routes.outbox()}>Outbox</Link>}>
             <InviteForm action={invitePerson} />
           </Section>
           {invites.length > 0 && (
-            <Section title="On the way" aside={<Link href={routes.outbox()}>Outbox</Link>}>
+            <Section title="On the way">
               <ul className={crewList.list}>
                 {invites.map((invite) => (
                   <InviteRow

@@ -34,7 +34,9 @@ export default async function OutboxPage({ searchParams }: { searchParams: Promi
         Outbox
       </Lead>
       {mails.length === 0 ? (
-        <Empty title="The outbox is empty">Invites, password links and notices about parts show here.</Empty>
+        <Empty level={2} title="The outbox is empty">
+          Invites, password links and notices about parts show here.
+        </Empty>
       ) : (
         <ul>
           {mails.map((mail, index) => (

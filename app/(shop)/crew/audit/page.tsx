@@ -6,7 +6,7 @@ import { Lead } from "@/components/ui/lead";
 import { Pager } from "@/components/ui/pager";
 import { getDb } from "@/db/client";
 import { listAudit, type AuditEntry } from "@/db/queries/audit";
-import { auditDetail, auditWords } from "@/lib/crew/audit-words";
+import { auditDetail, auditSentence } from "@/lib/crew/audit-words";
 import { clockWords } from "@/lib/crew/clock-words";
 import { pageBefore } from "@/lib/crew/page-before";
 import { routes } from "@/lib/routes";
@@ -23,12 +23,16 @@ const columnsIn = (timeZone: string): Column<AuditEntry>[] => [
     key: "what",
     head: "What",
     cell: (entry) => (
-      <>
-        <strong>{entry.memberName ?? "Coppertell"}</strong> {auditWords(entry.action)} {entry.subject}
-      </>
+      <span className="wrap-anywhere">
+        <strong>{entry.memberName ?? "Coppertell"}</strong> {auditSentence(entry)}
+      </span>
     ),
   },
-  { key: "detail", head: "Detail", cell: (entry) => auditDetail(entry.detail) },
+  {
+    key: "detail",
+    head: "Detail",
+    cell: (entry) => <span className="wrap-anywhere">{auditDetail(entry.detail)}</span>,
+  },
 ];
 
 export default async function AuditPage({ searchParams }: { searchParams: Promise<{ before?: string | string[] }> }) {
@@ -45,7 +49,9 @@ export default async function AuditPage({ searchParams }: { searchParams: Promis
         Who changed what
       </Lead>
       {entries.length === 0 ? (
-        <Empty title="Nothing yet">The first change to people or roles shows here.</Empty>
+        <Empty level={2} title="Nothing yet">
+          The first change to people or roles shows here.
+        </Empty>
       ) : (
         <DataTable
           caption="Changes, newest first"
