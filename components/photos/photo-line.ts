@@ -1,5 +1,5 @@
 import { changePhoto, putPhoto } from "./photo-store";
-import { sendPhoto, type SendOutcome } from "./send-photo";
+import type { SendOutcome } from "./send-photo";
 import { dropUnsent, isUnsent, type UnsentPhoto } from "./unsent-photos";
 
 /** A photo in line, with what is needed to send it. */
@@ -15,6 +15,11 @@ interface Waiting {
 const IN_FLIGHT = 2;
 const WAITS_MS = [2_000, 5_000, 15_000, 30_000] as const;
 const SIGNED_OUT = "You are signed out. Sign in again; the photo stays on this phone.";
+
+export const NO_SIGNAL = "No signal. It goes up by itself when the signal is back.";
+
+/** Most pages have nothing to send, so they do not load what sends. A form that takes photos loads it while the signal is there. */
+export const loadKit = () => import("./send-photo");
 
 const line = new Map<string, Waiting>();
 const inHand = new Set<string>();
@@ -89,8 +94,11 @@ function fill(): void {
 async function sendOne(waiting: Waiting): Promise<void> {
   const { photo, isKept, abort } = waiting;
   if (isKept && !(await isUnsent(photo.id))) return settle(waiting, { kind: "kept" });
+  if (!navigator.onLine) return settle(waiting, { kind: "later", words: NO_SIGNAL });
   changePhoto(photo.id, { state: "sending", words: null });
-  settle(waiting, await sendPhoto(photo, (share) => changePhoto(photo.id, { share }), abort.signal));
+  const kit = await loadKit().catch(() => null);
+  if (!kit) return settle(waiting, { kind: "later", words: NO_SIGNAL });
+  settle(waiting, await kit.sendPhoto(photo, (share) => changePhoto(photo.id, { share }), abort.signal));
 }
 
 function settle(waiting: Waiting, outcome: SendOutcome): void {

@@ -1,6 +1,7 @@
 import { genUploader } from "uploadthing/client";
 import type { FileRoute } from "uploadthing/types";
 import type { PhotoUploadInput, UploadVerdict } from "@/lib/photos/photo-upload.schema";
+import { NO_SIGNAL } from "./photo-line";
 import type { UnsentPhoto } from "./unsent-photos";
 
 /** What became of a try to send. */
@@ -24,7 +25,6 @@ const { uploadFiles } = genUploader<PhotoRoute & Record<string, PhotoRoute["phot
 
 /** A line on which nothing has moved for so long is dead, even if nobody has said so. */
 const STALLED_MS = 60_000;
-const NO_SIGNAL = "No signal. It goes up by itself when the signal is back.";
 const LATER = "The server could not take it yet. It is tried again by itself.";
 
 /**

@@ -19,8 +19,9 @@ export function UploadStatus({ memberId }: { memberId: number }) {
   const going = photos.filter((photo) => photo.state === "waiting" || photo.state === "sending");
   const refused = photos.filter((photo) => photo.state === "refused");
   return (
-    <>
-      <p className={going.length > 0 ? styles.status : "sr-only"} role="status">
+    <aside className={styles.status} aria-label="Photos on their way">
+      {/* Always there, so that a screen reader hears what comes into it. */}
+      <p role="status" className={styles.going}>
         {going.length > 0 && goingWords(going)}
       </p>
       {refused.map(({ id, words }) => (
@@ -31,7 +32,7 @@ export function UploadStatus({ memberId }: { memberId: number }) {
           </span>
         </Note>
       ))}
-    </>
+    </aside>
   );
 }
 

@@ -2,6 +2,7 @@
 
 import { useEffect, useState, useSyncExternalStore } from "react";
 import type { PhotoPurpose } from "@/lib/photos/photo-words";
+import { loadKit } from "./photo-line";
 import { addPhoto, retryPhoto, startSending, takeAway } from "./photo-queue";
 import { photoStore, showPhotos, type SentPhoto } from "./photo-store";
 
@@ -29,7 +30,11 @@ export function usePhotoUploads({ purpose, memberId, max, existing = [] }: Photo
   const [ids, setIds] = useState<readonly string[]>(existing);
   const shelf = useSyncExternalStore(photoStore.subscribe, photoStore.get, photoStore.getOnServer);
 
-  useEffect(() => void startSending(memberId), [memberId]);
+  useEffect(() => {
+    void startSending(memberId);
+    // Tried again at the first photo, should it fail here.
+    loadKit().catch(() => undefined);
+  }, [memberId]);
   useEffect(() => showPhotos(ids), [ids]);
 
   const photos = ids.map((id): SentPhoto => {

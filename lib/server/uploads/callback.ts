@@ -37,7 +37,10 @@ export async function tellComplete(desk: UploadDesk, upload: SignedUpload, file:
   const answer = { url, appUrl, ufsUrl, fileHash, serverData: verdict };
   if (verdict.state === "kept") return Response.json(answer);
   const { code, sentence } = verdict;
-  return Response.json({ ...answer, error: sentence, detail: sentence, code }, { status: statusOf(code) });
+  return Response.json(
+    { error: sentence, detail: sentence, code, serverData: verdict },
+    { status: statusOf(code) },
+  );
 }
 
 function describe({ config }: UploadDesk, { customId, key, name, size, type }: SignedUpload, fileHash: string) {
