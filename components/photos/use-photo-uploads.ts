@@ -1,10 +1,11 @@
 "use client";
 
-import { useEffect, useState, useSyncExternalStore } from "react";
+import { useEffect, useSyncExternalStore } from "react";
 import type { PhotoPurpose } from "@/lib/photos/photo-words";
 import { loadKit } from "./photo-line";
 import { addPhoto, retryPhoto, startSending, takeAway } from "./photo-queue";
 import { photoStore, showPhotos, type SentPhoto } from "./photo-store";
+import { usePickedIds } from "./use-picked-ids";
 
 interface PhotoUploadsOptions {
   purpose: PhotoPurpose;
@@ -27,7 +28,7 @@ export interface PhotoUploads {
 
 /** The photos of one form, and their way to the server, which goes on when the form is left. */
 export function usePhotoUploads({ purpose, memberId, max, existing = [] }: PhotoUploadsOptions): PhotoUploads {
-  const [ids, setIds] = useState<readonly string[]>(existing);
+  const [ids, setIds] = usePickedIds(`${memberId}:${purpose}`, existing);
   const shelf = useSyncExternalStore(photoStore.subscribe, photoStore.get, photoStore.getOnServer);
 
   useEffect(() => {
