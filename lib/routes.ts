@@ -15,8 +15,10 @@ export const routes = {
   reworkList: (query?: Record<string, string>) => withQuery("/cases/rework", query),
   rework: (ref: string) => `/cases/${ref}/rework`,
   reworkStep: (ref: string, step: number) => `/cases/${ref}/rework?step=${step}`,
-  library: () => "/library",
-  libraryClass: (slug: string) => `/library/${slug}`,
+  library: (query?: Record<string, string>) => withQuery("/library", query),
+  libraryClass: (slug: string, query?: Record<string, string>) => withQuery(`/library/${slug}`, query),
+  /** What the library's search is built from, in the browser. */
+  libraryEntries: () => "/api/library/entries",
   ledger: (query?: Record<string, string>) => withQuery("/costs", query),
   rates: () => "/costs/rates",
   crew: () => "/crew",

@@ -1,10 +1,24 @@
 /** Each class, cause and fix as the text that is searched. */
 import { ALLOY_NAMES } from "@/lib/library/alloy-names";
 import { BASE_METAL_TITLES, SYMPTOMS, type BaseMetal } from "@/lib/cases/case-words";
-import type { LibraryCause, LibraryClass, LibraryFix, Shelf } from "@/lib/library/library-entry";
+import type { FixStep, LibraryCause, LibraryClass, LibraryFix } from "@/lib/library/library-entry";
 import { searchWords } from "@/lib/library/search-words";
 
-export type LibraryEntries = Pick<Shelf, "classes" | "causes" | "fixes">;
+export type SearchedClass = Pick<LibraryClass, "slug" | "title" | "short" | "atStrike" | "inFinalPlate" | "synonyms">;
+export type SearchedCause = Pick<
+  LibraryCause,
+  "slug" | "title" | "classSlugs" | "why" | "proof" | "baseMetals" | "synonyms"
+>;
+export type SearchedFix = Pick<LibraryFix, "slug" | "title" | "causeSlugs" | "materials"> & {
+  steps: readonly Pick<FixStep, "title">[];
+};
+
+/** What of a library is searched, and all of it that the search needs. A whole shelf fits. */
+export interface LibraryEntries {
+  classes: readonly SearchedClass[];
+  causes: readonly SearchedCause[];
+  fixes: readonly SearchedFix[];
+}
 
 export interface SearchPhrase {
   said: string;
@@ -51,7 +65,7 @@ export function documentsOf({ classes, causes, fixes }: LibraryEntries): SearchD
   ];
 }
 
-function classDocument(entry: LibraryClass): SearchDocument {
+function classDocument(entry: SearchedClass): SearchDocument {
   const symptoms = Object.values(SYMPTOMS).flatMap((symptom) => (symptom.glyph === entry.slug ? [symptom.words] : []));
   return documentOf(entry.slug, entry.title, "class", [entry.slug], {
     also: [...entry.synonyms, ...symptoms],
@@ -60,7 +74,7 @@ function classDocument(entry: LibraryClass): SearchDocument {
   });
 }
 
-function causeDocument(entry: LibraryCause, classes: readonly LibraryClass[]): SearchDocument {
+function causeDocument(entry: SearchedCause, classes: readonly SearchedClass[]): SearchDocument {
   const titles = classes.flatMap((owner) => (entry.classSlugs.includes(owner.slug) ? [owner.title] : []));
   return documentOf(entry.slug, entry.title, "cause", entry.classSlugs, {
     also: entry.synonyms,
@@ -69,7 +83,7 @@ function causeDocument(entry: LibraryCause, classes: readonly LibraryClass[]): S
   });
 }
 
-function fixDocument(entry: LibraryFix, causes: readonly LibraryCause[]): SearchDocument {
+function fixDocument(entry: SearchedFix, causes: readonly SearchedCause[]): SearchDocument {
   return documentOf(entry.slug, entry.title, "fix", [...new Set(causes.flatMap((cause) => cause.classSlugs))], {
     also: entry.materials,
     metals: [],
