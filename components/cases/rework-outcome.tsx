@@ -88,7 +88,7 @@ export function ReworkOutcome(props: ReworkOutcomeProps) {
               hint: `Say which one next. Second look, round ${round + 1}.`,
             },
           ]}
-          error={fieldFault(state, "outcome")}
+          error={outcome ? undefined : fieldFault(state, "outcome")}
         />
       </Section>
       <TextAreaField

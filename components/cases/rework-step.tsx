@@ -11,7 +11,7 @@ export function ReworkStep({ step }: { step: WrittenStep }) {
         <div className="rw__cautions">
           {first.map((caution) => (
             <Caution key={caution.text} level={caution.level}>
-              {caution.text}
+              <b>{firstSentence(caution.text)}</b> {caution.text.slice(firstSentence(caution.text).length).trim()}
             </Caution>
           ))}
           <Rests>
@@ -24,4 +24,9 @@ export function ReworkStep({ step }: { step: WrittenStep }) {
       {step.detail && <p className="rw__how">{step.detail}</p>}
     </>
   );
+}
+
+/** "Acid. Gloves and face shield on." is read at a glance; the rest may take its time. */
+function firstSentence(text: string): string {
+  return /^.*?[.:](?=\s)/.exec(text)?.[0] ?? text;
 }

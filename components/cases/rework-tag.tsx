@@ -32,7 +32,7 @@ export function ReworkTag({ card, photo }: ReworkTagProps) {
       stateWords={`${progressWords(card)}${card.round > 1 ? `, round ${card.round}` : ""}`}
       classSlug={card.classSlug}
       classWords={card.classTitle ?? card.cardTitle}
-      meta={`${card.cardTitle}. ${parts}`}
+      meta={`${parts}. ${card.cardTitle}`}
       progress={card.steps === 0 ? 0 : card.ticked / card.steps}
       photo={photo}
     />

@@ -9,7 +9,7 @@ import { Glyph } from "@/components/ui/glyph";
 import { Note } from "@/components/ui/note";
 import { Slip, type SlipRow } from "@/components/ui/slip";
 import { STAGE_TITLES } from "@/lib/cases/case-words";
-import { callWords, firstCallWords, metalWords, partsOf } from "@/lib/cases/part-words";
+import { callWords, firstCallWords, metalInside, partsOf } from "@/lib/cases/part-words";
 import type { SnapChoices } from "@/lib/cases/same-as-last";
 import { timeOfDay } from "@/lib/cases/shop-clock";
 import { CANT_TELL, type SnapDraft } from "@/lib/cases/snap-draft";
@@ -20,7 +20,6 @@ import type { Held } from "./use-hang";
 export interface SnapHeldProps {
   draft: SnapDraft;
   choices: SnapChoices;
-  now: number;
   member: { name: string; timeZone: string };
   seniors: readonly string[];
   held: Held;
@@ -47,7 +46,7 @@ export function SnapHeld(props: SnapHeldProps) {
           <br />
           Do not plate.
         </h1>
-        <p role="status">{caseRef ? `Wire this tag to the rack. ${goesTo(seniors)}` : WITHOUT_NUMBER}</p>
+        <p role="status">{caseRef ? `Wire this tag to the rack. ${goesTo(seniors)}` : withoutNumber(held)}</p>
         {!caseRef && <WaitsNote held={held} />}
       </div>
       <HeldTag {...props} />
@@ -70,7 +69,11 @@ export function SnapHeld(props: SnapHeldProps) {
   );
 }
 
-const WITHOUT_NUMBER = "The tag gets its number when the signal is back; write HOLD on the rack tag now.";
+function withoutNumber({ waits }: Held): string {
+  const when =
+    waits === "no-signal" ? "when the signal is back" : waits === "slow" ? "as soon as it gets through" : "later";
+  return `The tag gets its number ${when}; write HOLD on the rack tag now.`;
+}
 
 /** Who gets it: by name in a small shop. */
 function goesTo(seniors: readonly string[]): string {
@@ -94,14 +97,17 @@ function WaitsNote({ held }: { held: Held }) {
     );
   }
   return (
-    <Note
-      glyph="ui-no-signal"
-      title={held.waits === "server" ? "The shop's server does not answer" : "No signal at this tank"}
-    >
-      {stays}. It goes up by itself{held.isKept ? " when the signal is back" : ""}.
+    <Note glyph="ui-no-signal" title={WAITS_TITLES[held.waits ?? "slow"]}>
+      {stays}. It goes up by itself, also while you snap the next part.
     </Note>
   );
 }
+
+const WAITS_TITLES = {
+  "no-signal": "No signal at this tank",
+  slow: "The signal is slow here",
+  server: "The shop's server does not answer",
+};
 
 function HeldTag({ draft, choices, member, held, caseRef }: SnapHeldProps) {
   const slug = draft.calledClass === CANT_TELL ? null : draft.calledClass;
@@ -132,7 +138,7 @@ function HeldTag({ draft, choices, member, held, caseRef }: SnapHeldProps) {
 function tagRows(draft: SnapDraft, choices: SnapChoices): SlipRow[] {
   const job = choices.jobs.find((each) => each.id === draft.workOrderId);
   const run = choices.runs.find((each) => each.id === draft.runId);
-  const metal = metalWords(draft.baseMetal, draft.alloy).toLowerCase();
+  const metal = metalInside(draft.baseMetal, draft.alloy);
   return [
     { label: "Job", value: job ? `${job.number} ${job.customer}` : "–" },
     { label: "Parts", value: `${partsOf(draft.quantity, run?.partsStruck ?? null)}, ${metal}` },

@@ -60,25 +60,33 @@ export async function listSnaps(memberId: number): Promise<KeptSnap[]> {
   }
 }
 
+/** A slow line may take its time behind the next snap; after this it is dead. */
+const PATIENCE_MS = 60_000;
+
+const underway = new Set<string>();
+
 /** Sends one kept snap. It leaves the phone only when the server has it; a refused one stays, with the reason. */
-export async function deliver(snap: KeptSnap, waitMs: number): Promise<SendAnswer> {
-  const answer = await sendSnap(snap.body, waitMs);
-  if (answer.kind === "hung") await dropSnap(snap.snapKey);
-  if (answer.kind === "refused") await keepSnap({ ...snap, fault: answer.fault });
-  return answer;
+export async function deliver(snap: KeptSnap): Promise<SendAnswer> {
+  underway.add(snap.snapKey);
+  try {
+    const answer = await sendSnap(snap.body, PATIENCE_MS);
+    if (answer.kind === "hung") await dropSnap(snap.snapKey);
+    if (answer.kind === "refused") await keepSnap({ ...snap, fault: answer.fault });
+    return answer;
+  } finally {
+    underway.delete(snap.snapKey);
+  }
 }
 
-const PATIENT_MS = 60_000;
-
 /**
- * Sends whatever waits, one after the other, and stops at the first that finds no signal.
+ * Sends whatever waits, one after the other, and stops at the first that does not get through.
  * @returns snapKey → answer, for those that were tried
  */
 export async function flushSnaps(memberId: number): Promise<Map<string, SendAnswer>> {
   const answers = new Map<string, SendAnswer>();
   for (const snap of await listSnaps(memberId)) {
-    if (snap.fault) continue;
-    const answer = await deliver(snap, PATIENT_MS);
+    if (snap.fault || underway.has(snap.snapKey)) continue;
+    const answer = await deliver(snap);
     answers.set(snap.snapKey, answer);
     if (answer.kind === "waits") break;
   }

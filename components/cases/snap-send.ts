@@ -11,9 +11,10 @@ export interface SnapFault {
  * `waits`: it did not get there, or the server could not take it now; the same snap may be sent again.
  */
 export type SendAnswer =
-  | { kind: "hung"; ref: string }
-  | { kind: "refused"; fault: SnapFault }
-  | { kind: "waits"; why: "no-signal" | "signed-out" | "server" };
+  { kind: "hung"; ref: string } | { kind: "refused"; fault: SnapFault } | { kind: "waits"; why: Waits };
+
+/** `slow`: no answer in time, though a line is there. */
+export type Waits = "no-signal" | "slow" | "signed-out" | "server";
 
 /** Answers that a second try would not change. */
 const REFUSALS = new Set([400, 403, 404, 409, 413]);
@@ -33,9 +34,10 @@ export async function sendSnap(body: SnapBody, waitMs: number): Promise<SendAnsw
       signal: AbortSignal.timeout(waitMs),
     });
     said = await response.json();
-  } catch {
-    // No signal, a broken line, or no answer in time: all the same to the person at the tank.
-    return { kind: "waits", why: "no-signal" };
+  } catch (error) {
+    // A line that breaks off and a Wi-Fi portal that answers with a page of its own are no signal too.
+    const isLate = error instanceof DOMException && error.name === "TimeoutError";
+    return { kind: "waits", why: isLate ? "slow" : "no-signal" };
   }
   const answer = isRecord(said) ? said : {};
   if (response.ok && typeof answer.ref === "string") return { kind: "hung", ref: answer.ref };

@@ -11,6 +11,9 @@ export interface SnapWaitingProps {
   onThrowAway: (snap: KeptSnap) => void;
 }
 
+const ONE_WAITS = "It gets its number when the signal is back. Keep the rack marked HOLD.";
+const SOME_WAIT = "They get their numbers when the signal is back. Keep the racks marked HOLD.";
+
 /** Snaps that have no number yet: those that wait for the signal, and those that the server would not take. */
 export function SnapWaiting({ kept, onOpen, onThrowAway }: SnapWaitingProps) {
   const refused = kept.filter((snap) => snap.fault);
@@ -22,8 +25,7 @@ export function SnapWaiting({ kept, onOpen, onThrowAway }: SnapWaitingProps) {
           glyph="ui-no-signal"
           title={waiting.length === 1 ? "One snap waits on this phone" : `${waiting.length} snaps wait on this phone`}
         >
-          {waiting.map((snap) => snap.title).join("; ")}. They get their numbers when the signal is back. Keep the racks
-          marked HOLD.
+          {waiting.map((snap) => snap.title).join("; ")}. {waiting.length === 1 ? ONE_WAITS : SOME_WAIT}
         </Note>
       )}
       {refused.map((snap) => (

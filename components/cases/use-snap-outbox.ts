@@ -51,11 +51,12 @@ async function flush(memberId: number): Promise<void> {
   await rereadOutbox(memberId);
   if (state.kept.every((snap) => snap.fault)) return;
   const answers = await flushSnaps(memberId);
-  for (const [snapKey, answer] of answers) announce(snapKey, answer);
+  for (const [snapKey, answer] of answers) noteAnswer(snapKey, answer);
   await rereadOutbox(memberId);
 }
 
-function announce(snapKey: string, answer: SendAnswer): void {
+/** Tells the person what became of a snap that they no longer look at. */
+export function noteAnswer(snapKey: string, answer: SendAnswer): void {
   if (answer.kind === "refused") say("A snap that waited was not taken. It is kept on the snap page.", "amber");
   if (answer.kind !== "hung") return;
   noteNumber(snapKey, answer.ref);

@@ -15,6 +15,12 @@ export function metalWords(baseMetal: BaseMetal, alloy: string | null): string {
   return alloy ? `${BASE_METAL_TITLES[baseMetal]} ${alloy}` : BASE_METAL_TITLES[baseMetal];
 }
 
+/** "brass C360": the same inside a sentence; the alloy keeps its capitals. */
+export function metalInside(baseMetal: BaseMetal, alloy: string | null): string {
+  const words = metalWords(baseMetal, alloy);
+  return words.charAt(0).toLowerCase() + words.slice(1);
+}
+
 /** "First call, fairly sure": how sure the caller was, in a sentence. Who can't tell claims nothing. */
 export function firstCallWords(calledClass: string | null, sure: Sureness): string {
   return calledClass === null ? "First call: can't tell" : `First call, ${SURENESS_TITLES[sure].toLowerCase()}`;

@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
+import { FocusHeading } from "@/components/cases/focus-heading";
 import { ReworkCard } from "@/components/cases/rework-card";
 import { ReworkDispose } from "@/components/cases/rework-dispose";
 import { LineStrip } from "@/components/line/line-strip";
@@ -73,6 +74,7 @@ export default async function CardPage({ params, searchParams }: CardPageProps) 
   if (!isOpen) {
     return (
       <ShopShell {...shell} back={routes.reworkList()}>
+        <FocusHeading on={`done ${card.round}`} />
         <DoneView card={card} photos={photos} member={member} />
       </ShopShell>
     );
@@ -85,6 +87,7 @@ export default async function CardPage({ params, searchParams }: CardPageProps) 
   return (
     // While the card is worked its form brings the thumb bar; who only reads gets the way back.
     <ShopShell {...shell} back={routes.reworkList()} thumb={canWork && shown === progress.openStep ? <></> : undefined}>
+      <FocusHeading on={`round ${card.round} step ${shown ?? "all"}`} />
       <ReworkCard
         caseRef={ref}
         caseHref={routes.case(ref)}

@@ -11,7 +11,7 @@ import { getDb } from "@/db/client";
 import { getHoldTag } from "@/db/queries/hold-tag";
 import { STAGE_TITLES } from "@/lib/cases/case-words";
 import { callWords, metalWords, partsOf } from "@/lib/cases/part-words";
-import { qrCode, qrViewBox } from "@/lib/cases/qr-code";
+import { qrCode } from "@/lib/cases/qr-code";
 import { dayAndTime } from "@/lib/cases/shop-clock";
 import { shortName } from "@/lib/crew/initials";
 import { readEnv } from "@/lib/env";
@@ -66,7 +66,8 @@ export default async function TagPage({ params }: TagPageProps) {
           caseRef={tag.ref}
           classWords={`Do not plate. ${callWords(tag.classTitle, tag.state !== "held")}`}
           lines={linesOf(tag, member.shop.timeZone)}
-          qr={<QrCode path={code.path} viewBox={qrViewBox(code.size)} label={`QR code of ${tag.ref}`} />}
+          // The tag is white for more than four modules round it, so the code itself gets the whole 30 mm.
+          qr={<QrCode path={code.path} viewBox={`0 0 ${code.size} ${code.size}`} label={`QR code of ${tag.ref}`} />}
         />
       </div>
     </ShopShell>
