@@ -14,6 +14,8 @@ const config = {
   devIndicators: false,
   experimental: { authInterrupts: true },
   reactStrictMode: true,
+  // Types are checked by `npm run check` and `npm run verify`; a build need not do it a second time.
+  typescript: { ignoreBuildErrors: true },
   turbopack: { root: path.resolve(".") },
   outputFileTracingExcludes: { "/*": ["./uploads/**/*", "./data/**/*", "./backups/**/*", "./tests/**/*"] },
   headers: async () => [{ source: "/:path*", headers: safetyHeaders }],

@@ -37,7 +37,8 @@ export default defineConfig({
     command: "node tests/e2e/serve.mjs",
     url: `${E2E_ORIGIN}/api/health`,
     timeout: 180_000,
-    reuseExistingServer: false,
+    // While a test is being written: serve once with `node tests/e2e/serve.mjs`, then E2E_REUSE=1.
+    reuseExistingServer: process.env.E2E_REUSE === "1",
     gracefulShutdown: { signal: "SIGTERM", timeout: 5_000 },
     env: e2eEnvironment(E2E_PORT),
   },

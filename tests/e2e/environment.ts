@@ -1,8 +1,10 @@
+import os from "node:os";
 import path from "node:path";
 
 export const E2E_PORT = 3207;
 export const E2E_ORIGIN = `http://localhost:${E2E_PORT}`;
-export const E2E_HOME = path.resolve("test-results/shop");
+/** Outside the folder that Playwright empties before each run. */
+export const E2E_HOME = path.join(os.tmpdir(), "coppertell-browser-tests");
 export const E2E_DATA = path.join(E2E_HOME, "data");
 export const E2E_UPLOADS = path.join(E2E_HOME, "uploads");
 
