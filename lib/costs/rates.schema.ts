@@ -1,0 +1,112 @@
+import { z } from "zod";
+import { priceFieldName, priceUnit, recoveredFieldName, type RateFigures } from "@/lib/costs/rate-fields";
+import { HIGHEST_RATE_CENTS } from "@/lib/costs/rates";
+import { DEPOSIT_METALS } from "@/lib/plating/metals";
+
+export const RATES_LIMITS = { sourceChars: 240 } as const;
+
+/** At most nine digits before the mark and four after it. A comma before three digits could be either, so it is neither. */
+const DECIMAL = /^\d{1,9}(?:\.\d{1,4}|,(?!\d{3}$)\d{1,4})?$/;
+
+/** A typed decimal number, with a point or a comma; undefined when it is none. */
+export function readDecimal(typed: string): number | undefined {
+  return DECIMAL.test(typed) ? Number(typed.replace(",", ".")) : undefined;
+}
+
+const NOT_A_NUMBER = "Write a number such as 56 or 56.50, without spaces or a thousands mark.";
+const MOST = HIGHEST_RATE_CENTS / 100;
+
+/** A typed amount of money: in whole units of the currency. */
+const amount = (what: string) =>
+  z
+    .string({ error: `Give ${what}.` })
+    .trim()
+    .min(1, `Give ${what}.`)
+    .transform((typed, context) => readWithin(typed, MOST, context));
+
+/** The same, where an empty field means that nothing is set. */
+const amountOrNone = (most: number) =>
+  z
+    .string()
+    .trim()
+    .optional()
+    .transform((typed, context) => (typed ? readWithin(typed, most, context) : undefined));
+
+function readWithin(typed: string, most: number, context: z.RefinementCtx): number {
+  const figure = readDecimal(typed);
+  if (figure === undefined) context.addIssue(NOT_A_NUMBER);
+  else if (figure > most) context.addIssue(`Write at most ${most.toLocaleString("en-US")}.`);
+  else return figure;
+  return z.NEVER;
+}
+
+const price = amountOrNone(MOST);
+const recovered = amountOrNone(100);
+// Object.fromEntries forgets its keys; they are exactly the metals'.
+const priceInputs = Object.fromEntries(DEPOSIT_METALS.map((metal) => [priceFieldName(metal), price])) as Record<
+  ReturnType<typeof priceFieldName>,
+  typeof price
+>;
+const recoveredInputs = Object.fromEntries(
+  DEPOSIT_METALS.map((metal) => [recoveredFieldName(metal), recovered]),
+) as Record<ReturnType<typeof recoveredFieldName>, typeof recovered>;
+
+const typedRates = z.object({
+  validFrom: z
+    .string({ error: "Give the day from which the rates hold." })
+    .regex(/^\d{4}-\d{2}-\d{2}$/, "Give the day from which the rates hold."),
+  source: z
+    .string({ error: "Say where the figures come from." })
+    .trim()
+    .min(1, "Say where the figures come from: an invoice, a price list, your own reckoning.")
+    .max(RATES_LIMITS.sourceChars, `Keep it to ${RATES_LIMITS.sourceChars} characters.`),
+  labour: amount("the labour rate"),
+  line: amount("the line burden"),
+  abrasive: amount("the price of abrasive"),
+  solution: amount("the price of strip solution"),
+  waste: amount("the price of hauled waste"),
+  ...priceInputs,
+  ...recoveredInputs,
+});
+
+/**
+ * What the owner types to set rates from a day on: money in whole units of the shop's currency, recovery in percent. Comes
+ * out as rates in cents and shares. An empty price or share is left out: not set.
+ */
+export const ratesInput = typedRates.transform(({ validFrom, source, ...typed }) => ({
+  validFrom,
+  source,
+  figures: figuresFrom(typed),
+}));
+export type RatesInput = z.output<typeof ratesInput>;
+
+type TypedFigures = Omit<z.output<typeof typedRates>, "validFrom" | "source">;
+
+function figuresFrom(typed: TypedFigures): RateFigures {
+  const metalCentsPerG: RateFigures["metalCentsPerG"] = Object.fromEntries(
+    DEPOSIT_METALS.flatMap((metal) => {
+      const figure = typed[priceFieldName(metal)];
+      return figure === undefined ? [] : [[metal, inCents(figure / priceUnit(metal).grams)]];
+    }),
+  );
+  const recoveryShare: RateFigures["recoveryShare"] = Object.fromEntries(
+    DEPOSIT_METALS.flatMap((metal) => {
+      const percent = typed[recoveredFieldName(metal)];
+      return percent === undefined ? [] : [[metal, percent / 100]];
+    }),
+  );
+  return {
+    labourCentsPerHour: inCents(typed.labour),
+    lineCentsPerHour: inCents(typed.line),
+    abrasiveCentsPerMinute: inCents(typed.abrasive),
+    solutionCentsPerL: inCents(typed.solution),
+    wasteCentsPerL: inCents(typed.waste),
+    metalCentsPerG,
+    recoveryShare,
+  };
+}
+
+/** Whole units to cents. Rounded far below the four decimals that may be typed for a kilogram, to shed binary dust. */
+function inCents(figure: number): number {
+  return Number((figure * 100).toFixed(8));
+}
