@@ -5,7 +5,17 @@ import tseslint from "typescript-eslint";
 
 export default tseslint.config(
   {
-    ignores: ["node_modules", ".next", "db/migrations", "public", "data", "uploads", "next-env.d.ts", "test-results", "playwright-report"],
+    ignores: [
+      "node_modules",
+      ".next",
+      "db/migrations",
+      "public",
+      "data",
+      "uploads",
+      "next-env.d.ts",
+      "test-results",
+      "playwright-report",
+    ],
   },
   js.configs.recommended,
   ...tseslint.configs.recommended,
@@ -26,5 +36,10 @@ export default tseslint.config(
       "no-console": "off",
     },
   },
-  { files: ["**/*.mjs"], languageOptions: { globals: { process: "readonly", console: "readonly", URL: "readonly", setTimeout: "readonly", fetch: "readonly" } } },
+  {
+    files: ["**/*.mjs"],
+    languageOptions: {
+      globals: { process: "readonly", console: "readonly", URL: "readonly", setTimeout: "readonly", fetch: "readonly" },
+    },
+  },
 );

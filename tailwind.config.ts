@@ -23,7 +23,13 @@ export default {
       xs: token("t-xs"), sm: token("t-sm"), md: token("t-md"), lg: token("t-lg"),
       xl: token("t-xl"), "2xl": token("t-2xl"), "3xl": token("t-3xl"), "4xl": token("t-4xl"),
     }, // prettier-ignore
-    borderRadius: { none: "0", sheet: token("r-sheet"), field: token("r-field"), button: token("r-button"), full: "9999px" },
+    borderRadius: {
+      none: "0",
+      sheet: token("r-sheet"),
+      field: token("r-field"),
+      button: token("r-button"),
+      full: "9999px",
+    },
     screens: { tablet: "720px", desk: "1080px" },
   },
 } satisfies Config;

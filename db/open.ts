@@ -49,7 +49,9 @@ function migrateSafely(db: Db, file: string, migrationsFolder: string): void {
   const broken = client.pragma("foreign_key_check") as unknown[];
   if (broken.length > 0) {
     client.close();
-    throw new Error(`The migration left ${broken.length} rows that point nowhere. The database as it was: ${copy ?? "none"}`);
+    throw new Error(
+      `The migration left ${broken.length} rows that point nowhere. The database as it was: ${copy ?? "none"}`,
+    );
   }
 }
 

@@ -2,9 +2,7 @@ import type { Fault } from "@/lib/fault";
 
 /** What a form gets back from its action: nothing yet, the result, or a fault with what was typed. */
 export type ActState<Result = unknown> =
-  | null
-  | { ok: true; value: Result }
-  | { ok: false; fault: Fault; values: Record<string, string | string[]> };
+  null | { ok: true; value: Result } | { ok: false; fault: Fault; values: Record<string, string | string[]> };
 
 /** What was typed into a field, or `otherwise`. Secrets are never sent back. */
 export function typed(state: ActState, name: string, otherwise = ""): string {

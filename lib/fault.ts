@@ -3,15 +3,7 @@
  * Detail for the log never travels in it.
  */
 export type FaultCode =
-  | "signed-out"
-  | "refused"
-  | "not-found"
-  | "invalid"
-  | "conflict"
-  | "too-many"
-  | "too-large"
-  | "unsupported"
-  | "broken";
+  "signed-out" | "refused" | "not-found" | "invalid" | "conflict" | "too-many" | "too-large" | "unsupported" | "broken";
 
 export interface Fault {
   code: FaultCode;

@@ -7,7 +7,11 @@ import { caseCosts, cases, reworkCards, reworkSteps, workOrders } from "../schem
 import { getRatesAt, type DatedRates } from "./rates";
 
 /** What the cost of a case rests on: its facts, the rates of its day, and the minutes that its cards recorded. */
-export function getCostFacts(db: Handle, shopId: number, caseId: number): (CaseCostInput & { rates: DatedRates }) | null {
+export function getCostFacts(
+  db: Handle,
+  shopId: number,
+  caseId: number,
+): (CaseCostInput & { rates: DatedRates }) | null {
   const row = db
     .select({
       quantity: cases.quantity,

@@ -24,7 +24,8 @@ export function requireSnapFacts(db: Handle, shopId: number, snap: Snap): void {
       .where(and(eq(runs.shopId, shopId), eq(runs.id, snap.runId)))
       .get();
     if (!run) fields.runId = "That run is not in this shop's list. Choose another or none.";
-    else if (run.workOrderId !== snap.workOrderId) fields.runId = "That run belongs to another job. Choose one of this job's runs.";
+    else if (run.workOrderId !== snap.workOrderId)
+      fields.runId = "That run belongs to another job. Choose one of this job's runs.";
   }
   const station = db
     .select({ id: stations.id })
@@ -42,7 +43,8 @@ export function requireSnapFacts(db: Handle, shopId: number, snap: Snap): void {
         .all().length
     : 0;
   if (inUse !== wanted.length) fields.solutionIds = "One of the solutions is no longer in use. Choose again.";
-  if (snap.calledClass && !hasClass(db, shopId, snap.calledClass)) fields.calledClass = "That class is not in this shop's library. Choose another.";
+  if (snap.calledClass && !hasClass(db, shopId, snap.calledClass))
+    fields.calledClass = "That class is not in this shop's library. Choose another.";
 
   const first = Object.values(fields)[0];
   if (first) throw fault("invalid", first, fields);

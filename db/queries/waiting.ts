@@ -23,5 +23,12 @@ export function countWaiting(db: Handle, shopId: number): Waiting {
 
 /** Whether the shop has any case at all: a new shop gets other words than a tidy one. */
 export function hasCases(db: Handle, shopId: number): boolean {
-  return db.select({ one: sql<number>`1` }).from(cases).where(eq(cases.shopId, shopId)).limit(1).get() !== undefined;
+  return (
+    db
+      .select({ one: sql<number>`1` })
+      .from(cases)
+      .where(eq(cases.shopId, shopId))
+      .limit(1)
+      .get() !== undefined
+  );
 }

@@ -45,7 +45,10 @@ export const STATE_WORDS: Record<CaseState, string> = {
 export function nextState(from: CaseState, event: keyof typeof TRANSITIONS): CaseState {
   const transition = TRANSITIONS[event];
   if (!transition.from.includes(from)) {
-    throw fault("conflict", `That was not saved: this case is ${STATE_WORDS[from]} by now. Reload to see what changed.`);
+    throw fault(
+      "conflict",
+      `That was not saved: this case is ${STATE_WORDS[from]} by now. Reload to see what changed.`,
+    );
   }
   return transition.to;
 }

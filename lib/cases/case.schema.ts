@@ -27,7 +27,10 @@ const wholeNumber = (from: number, to: number, what: string) =>
 const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 const rowNumber = (what: string) => wholeNumber(1, Number.MAX_SAFE_INTEGER, what);
-const optionalRowNumber = z.preprocess((raw) => (raw === "" || raw === null ? undefined : raw), rowNumber("the number").optional());
+const optionalRowNumber = z.preprocess(
+  (raw) => (raw === "" || raw === null ? undefined : raw),
+  rowNumber("the number").optional(),
+);
 
 const note = z.string().trim().max(LIMITS.noteChars, `Keep the note under ${LIMITS.noteChars} characters.`).default("");
 const reason = z
@@ -42,7 +45,10 @@ const slug = z
   .max(60);
 
 /** "" or "cant-tell" is an honest answer: the person looked and could not tell. */
-const calledClass = z.preprocess((raw) => (raw === "" || raw === "cant-tell" || raw === undefined ? null : raw), slug.nullable());
+const calledClass = z.preprocess(
+  (raw) => (raw === "" || raw === "cant-tell" || raw === undefined ? null : raw),
+  slug.nullable(),
+);
 
 const sureness = z.preprocess(
   (raw) => (typeof raw === "string" ? Number(raw) : raw),
@@ -50,7 +56,10 @@ const sureness = z.preprocess(
 ) as z.ZodType<Sureness>;
 
 const list = <Item extends z.ZodType>(item: Item, most: number, words: string) =>
-  z.preprocess((raw) => (raw === undefined || raw === "" ? [] : Array.isArray(raw) ? raw : [raw]), z.array(item).max(most, words));
+  z.preprocess(
+    (raw) => (raw === undefined || raw === "" ? [] : Array.isArray(raw) ? raw : [raw]),
+    z.array(item).max(most, words),
+  );
 
 const photoIds = list(
   z.uuid("A photo has no proper number. Take it again."),

@@ -23,5 +23,11 @@ export function solutionAge(madeUpAt: number, windowDays: number, now: number): 
   const day = Math.floor(days) + 1;
   const daysOver = Math.max(0, Math.floor(days) - windowDays);
   const words = daysOver > 0 ? `${daysOver} ${daysOver === 1 ? "day" : "days"} over` : `day ${day} of ${windowDays}`;
-  return { day, windowDays, daysOver, share: days / windowDays, words: day > windowDays && daysOver === 0 ? "change due" : words };
+  return {
+    day,
+    windowDays,
+    daysOver,
+    share: days / windowDays,
+    words: day > windowDays && daysOver === 0 ? "change due" : words,
+  };
 }

@@ -23,7 +23,8 @@ export function stationView(facts: StationFacts, now: number): StationView {
   const base = { slug, name, kind, held };
   if (kind === "rinse") return { ...base, note: "running", level: 0.92, age: 0, flowing: true };
   if (kind === "inspect") {
-    const note = facts.waiting === 0 ? "nothing waits" : `${facts.waiting} ${facts.waiting === 1 ? "case waits" : "cases wait"}`;
+    const note =
+      facts.waiting === 0 ? "nothing waits" : `${facts.waiting} ${facts.waiting === 1 ? "case waits" : "cases wait"}`;
     return { ...base, note, level: 0, age: 0 };
   }
   if (kind === "finish") return { ...base, note: "dry, pack", level: 0, age: 0 };

@@ -46,5 +46,9 @@ export function parseInput<Schema extends z.ZodType>(schema: Schema, raw: unknow
   const fields: Record<string, string> = {};
   for (const issue of result.error.issues) fields[issue.path.join(".") || "form"] ??= issue.message;
   const first = Object.entries(fields)[0];
-  throw fault("invalid", first ? `Not saved. ${first[0] === "form" ? "" : `${first[0]}: `}${first[1]}` : "Not saved.", fields);
+  throw fault(
+    "invalid",
+    first ? `Not saved. ${first[0] === "form" ? "" : `${first[0]}: `}${first[1]}` : "Not saved.",
+    fields,
+  );
 }

@@ -15,7 +15,10 @@ export function insertCustomer(tx: Handle, shopId: number, name: string): number
 }
 
 /** A work order: brass shells unless told otherwise. */
-export function insertJob(tx: Handle, job: Partial<WorkOrder> & Pick<WorkOrder, "shopId" | "customerId" | "number">): number {
+export function insertJob(
+  tx: Handle,
+  job: Partial<WorkOrder> & Pick<WorkOrder, "shopId" | "customerId" | "number">,
+): number {
   return tx
     .insert(workOrders)
     .values({

@@ -18,7 +18,11 @@ export const USUAL_LINE: readonly { slug: string; kind: StationKind; name: strin
 export function insertLine(tx: Handle, shopId: number, line = USUAL_LINE): Map<string, number> {
   const ids = new Map<string, number>();
   for (const [position, station] of line.entries()) {
-    const { id } = tx.insert(stations).values({ shopId, position, ...station }).returning({ id: stations.id }).get();
+    const { id } = tx
+      .insert(stations)
+      .values({ shopId, position, ...station })
+      .returning({ id: stations.id })
+      .get();
     ids.set(station.slug, id);
   }
   return ids;

@@ -20,20 +20,28 @@ export function insertShelf(tx: Handle, shopId: number, shelf: Shelf, now: numbe
       .run();
 
   for (const source of shelf.sources) {
-    tx.insert(librarySources).values({ shopId, ...source }).run();
+    tx.insert(librarySources)
+      .values({ shopId, ...source })
+      .run();
     keep("source", source.key, source);
   }
   for (const caution of shelf.cautions) {
-    tx.insert(libraryCautions).values({ shopId, ...caution }).run();
+    tx.insert(libraryCautions)
+      .values({ shopId, ...caution })
+      .run();
     keep("caution", caution.key, caution);
   }
   for (const each of shelf.classes) {
-    tx.insert(libraryClasses).values({ shopId, ...each }).run();
+    tx.insert(libraryClasses)
+      .values({ shopId, ...each })
+      .run();
     keep("class", each.slug, each);
   }
   for (const cause of shelf.causes) {
     const { classSlugs, station, ...columns } = cause;
-    tx.insert(libraryCauses).values({ shopId, stationKind: station, ...columns }).run();
+    tx.insert(libraryCauses)
+      .values({ shopId, stationKind: station, ...columns })
+      .run();
     for (const [position, classSlug] of classSlugs.entries()) {
       tx.insert(libraryClassCauses).values({ shopId, classSlug, causeSlug: cause.slug, position }).run();
     }
@@ -41,7 +49,9 @@ export function insertShelf(tx: Handle, shopId: number, shelf: Shelf, now: numbe
   }
   for (const fix of shelf.fixes) {
     const { causeSlugs, ...columns } = fix;
-    tx.insert(libraryFixes).values({ shopId, ...columns }).run();
+    tx.insert(libraryFixes)
+      .values({ shopId, ...columns })
+      .run();
     for (const [position, causeSlug] of causeSlugs.entries()) {
       tx.insert(libraryCauseFixes).values({ shopId, causeSlug, fixSlug: fix.slug, position }).run();
     }

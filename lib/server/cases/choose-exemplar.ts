@@ -31,7 +31,10 @@ export function chooseExemplar(
   if (!row.classSlug) throw fault("conflict", "A photo becomes an exemplar once the class is confirmed.");
   const key = { shopId: member.shopId, classSlug: row.classSlug, photoId: input.photoId };
   if (input.chosen) {
-    db.insert(exemplars).values({ ...key, chosenById: member.memberId, at: now }).onConflictDoNothing().run();
+    db.insert(exemplars)
+      .values({ ...key, chosenById: member.memberId, at: now })
+      .onConflictDoNothing()
+      .run();
   } else {
     db.delete(exemplars)
       .where(
