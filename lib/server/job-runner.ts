@@ -1,10 +1,18 @@
 import type { Db, Handle } from "@/db/open";
-import { claimNextJob, failJob, finishJob, postponeJob, pruneDoneJobs, requeueRunningJobs, type Job } from "@/db/queries/jobs";
+import {
+  claimNextJob,
+  failJob,
+  finishJob,
+  postponeJob,
+  pruneDoneJobs,
+  requeueRunningJobs,
+  type Job,
+} from "@/db/queries/jobs";
 import { FaultError } from "@/lib/fault";
 
 /** What a kind of job does. It may be killed anywhere and run again, so it must bear that. */
 export interface JobHandler {
-  run: (db: Db, payload: Job["payload"], now: number) => Promise<void>;
+  run: (db: Db, payload: Job["payload"], now: number) => Promise<void> | void;
   /** In the transaction that gives the job up: tells whoever waits for it. */
   giveUp?: (tx: Handle, payload: Job["payload"], sentence: string) => void;
 }

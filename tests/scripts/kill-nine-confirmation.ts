@@ -1,6 +1,6 @@
 import { randomUUID } from "node:crypto";
 import { makeConfirmation, makeSnap } from "@/tests/fixtures/shop-factory";
-import { killWithin, type PhaseResult, type World } from "./kill-nine-world";
+import { killWithin, spanOf, type PhaseResult, type World } from "./kill-nine-world";
 
 const CASES_A_ROUND = 6;
 
@@ -8,17 +8,19 @@ const CASES_A_ROUND = 6;
 export async function killDuringConfirmation(world: World): Promise<PhaseResult> {
   const counts = { sent: 0, "answered before the kill": 0, "whole though unanswered": 0, untouched: 0 };
   const result: PhaseResult = { faults: [], counts };
+  const first = confirmations(world, await snapCases(world));
+  const spanMs = await spanOf(() => Promise.all(first.map((body) => confirm(world, body))));
   for (let round = 0; round < world.kills; round++) {
     const refs = await snapCases(world);
     const bodies = confirmations(world, refs);
     const answered = new Set<string>();
     const sending = bodies.map((body) =>
-      post(world, `/api/cases/${body.ref}/confirmation`, world.cookies.senior, body).then(
+      confirm(world, body).then(
         (status) => status < 300 && answered.add(body.ref),
         () => false,
       ),
     );
-    await killWithin(world, 120);
+    await killWithin(world, spanMs);
     await Promise.all(sending);
     for (const ref of refs) {
       const state = wholeness(world, ref);
@@ -55,6 +57,10 @@ function confirmations(world: World, refs: string[]) {
   return bodies;
 }
 
+function confirm(world: World, body: ReturnType<typeof makeConfirmation>): Promise<number> {
+  return post(world, `/api/cases/${body.ref}/confirmation`, world.cookies.senior, body);
+}
+
 async function post({ server }: World, path: string, cookie: string, body: unknown): Promise<number> {
   const headers = { cookie, "content-type": "application/json" };
   const answer = await fetch(`${server.origin}${path}`, { method: "POST", headers, body: JSON.stringify(body) });
@@ -85,7 +91,7 @@ async function finish(world: World, bodies: ReturnType<typeof confirmations>): P
   const faults: string[] = [];
   for (const body of bodies) {
     const before = wholeness(world, body.ref);
-    const status = await post(world, `/api/cases/${body.ref}/confirmation`, world.cookies.senior, body);
+    const status = await confirm(world, body);
     const isRight = before === "whole" ? status === 409 : status < 300;
     if (!isRight) faults.push(`case ${body.ref}, ${before} before, answered ${status}`);
     if (wholeness(world, body.ref) !== "whole") faults.push(`case ${body.ref} is not whole after a second try`);

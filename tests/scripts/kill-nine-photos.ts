@@ -3,9 +3,9 @@ import fs from "node:fs";
 import path from "node:path";
 import sharp from "sharp";
 import { uploadClient } from "@/tests/fixtures/upload-client";
-import { killWithin, until, type PhaseResult, type World } from "./kill-nine-world";
+import { killWithin, spanOf, until, type PhaseResult, type World } from "./kill-nine-world";
 
-const PHOTOS_A_ROUND = 4;
+const PHOTOS_A_ROUND = 3;
 const SIZES = ["thumb", "view", "original"] as const;
 
 /** Photos go up while the server is killed. What it accepted must be there; the rest goes on from where it stopped. */
@@ -14,11 +14,12 @@ export async function killDuringUpload(world: World): Promise<PhaseResult> {
     faults: [],
     counts: { sent: 0, "accepted before the kill": 0, "gone on afterwards": 0 },
   };
+  const spanMs = await spanOf(() => Promise.all(newIds().map((id) => send(world, id))));
   for (let round = 0; round < world.kills; round++) {
-    const ids = Array.from({ length: PHOTOS_A_ROUND }, () => randomUUID());
+    const ids = newIds();
     const accepted = new Set<string>();
     const sending = ids.map((id) => send(world, id).then((isKept) => isKept && accepted.add(id)));
-    await killWithin(world, 700);
+    await killWithin(world, spanMs);
     await Promise.all(sending);
     await restart(world, ids, accepted, result);
     count(result, "sent", ids.length);
@@ -38,11 +39,14 @@ export async function killDuringThumbnailing(world: World): Promise<PhaseResult>
     faults: [],
     counts: { accepted: 0, "ready before the kill": 0, "finished afterwards": 0 },
   };
+  const first = newIds();
+  await Promise.all(first.map((id) => send(world, id)));
+  const spanMs = await spanOf(() => checkReady(world, first, result));
   for (let round = 0; round < world.kills; round++) {
-    const ids = Array.from({ length: PHOTOS_A_ROUND }, () => randomUUID());
+    const ids = newIds();
     const kept = await Promise.all(ids.map((id) => send(world, id)));
     if (kept.includes(false)) result.faults.push(`thumbnailing ${round}: a photo was not accepted`);
-    await killWithin(world, 900);
+    await killWithin(world, spanMs);
     const ready = readyInDatabase(world, ids);
     await restart(world, ids, new Set(ids), result);
     await checkReady(world, ids, result);
@@ -52,6 +56,8 @@ export async function killDuringThumbnailing(world: World): Promise<PhaseResult>
   }
   return result;
 }
+
+const newIds = () => Array.from({ length: PHOTOS_A_ROUND }, () => randomUUID());
 
 function count({ counts }: PhaseResult, what: string, by: number): void {
   counts[what] = (counts[what] ?? 0) + by;

@@ -22,6 +22,13 @@ export async function killWithin({ server }: World, spanMs: number): Promise<num
   return afterMs;
 }
 
+/** How long a task takes undisturbed, ms: the span within which its kills fall, so that they hit its start, middle and end. */
+export async function spanOf(task: () => Promise<unknown>): Promise<number> {
+  const start = performance.now();
+  await task();
+  return performance.now() - start;
+}
+
 /** Asks until the answer is there. @throws Error naming what never came */
 export async function until<T>(what: string, ask: () => Promise<T | null>, mostMs = 60_000): Promise<T> {
   const end = Date.now() + mostMs;

@@ -20,8 +20,8 @@ async function main(): Promise<void> {
     await server.start();
     const { plater, senior } = server.shop.members;
     const cookies = { plater: await server.signIn(plater.email), senior: await server.signIn(senior.email) };
-    // About 3 megapixels and 2 MB: long enough on its way, and in the making, to be hit.
-    const world: World = { server, cookies, content: await goodJpeg(2_000, 1_500), kills };
+    // About 2 megapixels: long enough on its way, and in the making, to be hit.
+    const world: World = { server, cookies, content: await goodJpeg(1_600, 1_200), kills };
     const phases = {
       upload: killDuringUpload,
       thumbnailing: killDuringThumbnailing,
