@@ -1,6 +1,6 @@
 "use client";
 
-import { useEffect, useRef, useState } from "react";
+import { useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
 import type { KeyboardEvent, SubmitEvent } from "react";
 import { SearchHits, type ClassTitles } from "@/components/library/search-hits";
 import { useLibrarySearch } from "@/components/library/use-library-search";
@@ -40,8 +40,9 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
     load();
   }, [query, load]);
 
-  const asked = typed.trim();
-  const found = search ? search(asked) : asked === query ? hits : null;
+  // The field shows each letter first; the hits follow, and on a slow phone may skip one.
+  const asked = useDeferredValue(typed).trim();
+  const found = useMemo(() => (search ? search(asked) : asked === query ? hits : null), [search, asked, query, hits]);
   const keepInAddress = (words: string) => {
     const next = { ...(words ? { q: words } : {}), ...(station ? { station } : {}) };
     window.history.replaceState(null, "", routes.library(next));

@@ -21,7 +21,7 @@ export interface ShareHere {
  * @param cases cases of the class that were put down to this cause
  * @param of cases of the class with any named cause
  *
- * Example: 8 of 10 is a share of 0.8, with a range of 0.490 to 0.943.
+ * Example: 18 of 20 is a share of 0.9, with a range of 0.699 to 0.972.
  */
 export function shareHere(cases: number, of: number): ShareHere | NotEnough {
   const { low, high } = wilsonInterval(cases, of);
