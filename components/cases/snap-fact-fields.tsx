@@ -1,5 +1,6 @@
 "use client";
 
+import Link from "next/link";
 import { CheckField } from "@/components/ui/check-field";
 import { Field, SelectField } from "@/components/ui/field";
 import { PickGroup } from "@/components/ui/pick";
@@ -14,6 +15,7 @@ import {
 } from "@/lib/cases/case-words";
 import { factsOfJob, solutionsFor } from "@/lib/cases/same-as-last";
 import { solutionAge } from "@/lib/line/solution-age";
+import { routes } from "@/lib/routes";
 import type { SnapFactsProps } from "./snap-facts";
 
 type FieldsProps = Pick<SnapFactsProps, "choices" | "facts" | "now" | "onChange" | "faults">;
@@ -46,6 +48,9 @@ export function SnapFactFields(props: FieldsProps) {
         }}
         error={faults.workOrderId}
       />
+      <Link className="solo" href={routes.jobs({ from: "snap" })}>
+        Job not in the list? Open it
+      </Link>
       <div className="form__pair">
         <SelectField
           label="Base metal"

@@ -1,13 +1,16 @@
 "use client";
 
+import Link from "next/link";
 import type { ChangeEvent } from "react";
 import { Slip, type SlipRow } from "@/components/ui/slip";
 import { Button } from "@/components/ui/button";
+import { Note } from "@/components/ui/note";
 import { Section } from "@/components/ui/section";
 import { METHOD_TITLES, STAGE_TITLES } from "@/lib/cases/case-words";
 import { metalWords } from "@/lib/cases/part-words";
 import type { SnapChoices } from "@/lib/cases/same-as-last";
 import type { SnapFacts as Facts } from "@/lib/cases/snap-draft";
+import { routes } from "@/lib/routes";
 import { solutionAge } from "@/lib/line/solution-age";
 import { SnapFactFields } from "./snap-fact-fields";
 
@@ -32,7 +35,12 @@ export function SnapFacts(props: SnapFactsProps) {
   if (choices.jobs.length === 0) {
     return (
       <Section title="The part" className="snap-block">
-        <p>No job is open, and a hold tag needs one. The owner opens a job; your photos stay here.</p>
+        <Note tone="amber" title="Open the first job">
+          No job is open, and a hold tag needs one. Your photos stay here.
+          <Link className="solo" href={routes.jobs({ from: "snap" })}>
+            Open a job
+          </Link>
+        </Note>
       </Section>
     );
   }

@@ -48,13 +48,13 @@ export async function sendSnap(body: SnapBody, waitMs: number): Promise<SendAnsw
 
 /** Reads a problem+json answer. */
 function faultIn(answer: Record<string, unknown>): SnapFault {
-  const fields = isRecord(answer.fields) ? answer.fields : {};
-  return {
-    message: typeof answer.title === "string" ? answer.title : "The snap was not taken. Check what is filled in.",
-    fields: Object.fromEntries(
-      Object.entries(fields).filter((entry): entry is [string, string] => typeof entry[1] === "string"),
-    ),
-  };
+  const given = isRecord(answer.fields) ? answer.fields : {};
+  const fields = Object.fromEntries(
+    Object.entries(given).filter((entry): entry is [string, string] => typeof entry[1] === "string"),
+  );
+  const title = typeof answer.title === "string" ? answer.title : "The snap was not taken. Check what is filled in.";
+  // The sentence of the first field says it without the field's inner name.
+  return { message: Object.values(fields)[0] ?? title, fields };
 }
 
 function isRecord(value: unknown): value is Record<string, unknown> {

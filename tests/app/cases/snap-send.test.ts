@@ -61,7 +61,7 @@ describe("sending a snap", () => {
     });
     expect(await sendSnap(snapBody(draft), 1000)).toEqual({
       kind: "refused",
-      fault: { message: "Not saved.", fields: { runId: "That run belongs to another job." } },
+      fault: { message: "That run belongs to another job.", fields: { runId: "That run belongs to another job." } },
     });
   });
 

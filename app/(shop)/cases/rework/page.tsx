@@ -77,14 +77,14 @@ export default async function ReworkListPage({ searchParams }: ListPageProps) {
           You can read every card here.
         </Note>
       )}
-      {all === 0 && (
-        <Empty title="The rack is clear.">
-          {station
-            ? "No card traces back to this station."
-            : "A card comes here when a senior tech has confirmed a part."}
-        </Empty>
-      )}
       <div className="rw-list">
+        {all === 0 && (
+          <Empty title="The rack is clear." level={2}>
+            {station
+              ? "No card traces back to this station."
+              : "A card comes here when a senior tech has confirmed a part."}
+          </Empty>
+        )}
         {mine.length > 0 && <CardList title="Begun by you" cards={mine} photos={photos} />}
         {shown.length > 0 && (
           <CardList title={mine.length > 0 ? "The others" : "Cards, oldest first"} cards={shown} photos={photos} />

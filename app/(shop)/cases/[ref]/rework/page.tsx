@@ -64,7 +64,9 @@ export default async function CardPage({ params, searchParams }: CardPageProps) 
     return (
       <ShopShell {...shell} back={routes.case(ref)}>
         <h1>Rework of {ref}</h1>
-        <Empty title="No card yet">A senior tech sends one with the second look.</Empty>
+        <Empty title="No card yet" level={2}>
+          A senior tech sends one with the second look.
+        </Empty>
       </ShopShell>
     );
   }
