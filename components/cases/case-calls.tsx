@@ -1,7 +1,7 @@
 import { classGlyph } from "@/components/cases/class-glyph";
 import { DataTable } from "@/components/ui/data-table";
 import { Glyph } from "@/components/ui/glyph";
-import { SURENESS_TITLES, type Sureness } from "@/lib/cases/case-words";
+import { SURENESS, type Sureness } from "@/lib/cases/case-words";
 
 export interface CallRow {
   id: number;
@@ -14,39 +14,51 @@ export interface CallRow {
   sure: Sureness;
 }
 
-function who(call: CallRow): string {
-  const mark = call.kind === "second-look" ? ", second look" : call.asTrainee ? ", trainee" : "";
-  return `${call.by}${mark}`;
+/** What a reader should know of the caller: the round, whether it was the senior's second look, or a trainee's eye. */
+function marks(call: CallRow, hasRounds: boolean): string {
+  const part = call.kind === "second-look" ? "second look" : call.asTrainee ? "trainee" : "";
+  return [hasRounds ? `round ${call.round}` : "", part].filter(Boolean).join(", ");
+}
+
+function Caller({ call, hasRounds }: { call: CallRow; hasRounds: boolean }) {
+  const words = marks(call, hasRounds);
+  return (
+    <>
+      {call.by}
+      {words && <small className="step-who">{words}</small>}
+    </>
+  );
 }
 
 /** Who called what, and how sure they were. */
 export function CallsTable({ calls, caption }: { calls: readonly CallRow[]; caption: string }) {
   const hasRounds = calls.some((call) => call.round > 1);
   return (
-    <DataTable
-      caption={caption}
-      rows={calls}
-      rowKey={(call) => String(call.id)}
-      columns={[
-        ...(hasRounds ? [{ key: "round", head: "Round", cell: (call: CallRow) => call.round }] : []),
-        { key: "who", head: "Who", cell: who },
-        {
-          key: "call",
-          head: "Call",
-          cell: (call: CallRow) => (
-            <span className="call-cell">
-              <Glyph name={classGlyph(call.classSlug)} size={22} />
-              {call.classTitle ?? "Can't tell"}
-            </span>
-          ),
-        },
-        {
-          key: "sure",
-          head: "How sure",
-          numeric: true,
-          cell: (call: CallRow) => (call.classSlug === null ? "" : SURENESS_TITLES[call.sure]),
-        },
-      ]}
-    />
+    <div className="keeps-table">
+      <DataTable
+        caption={caption}
+        rows={calls}
+        rowKey={(call) => String(call.id)}
+        columns={[
+          { key: "who", head: "Who", cell: (call) => <Caller call={call} hasRounds={hasRounds} /> },
+          {
+            key: "call",
+            head: "Call",
+            cell: (call) => (
+              <span className="call-cell">
+                <Glyph name={classGlyph(call.classSlug)} size={22} />
+                {call.classTitle ?? "Can't tell"}
+              </span>
+            ),
+          },
+          {
+            key: "sure",
+            head: "Sure",
+            numeric: true,
+            cell: (call) => (call.classSlug === null ? "" : `${call.sure} of ${SURENESS.length}`),
+          },
+        ]}
+      />
+    </div>
   );
 }

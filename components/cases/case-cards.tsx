@@ -2,6 +2,7 @@ import { Caution } from "@/components/ui/caution";
 import { DataTable } from "@/components/ui/data-table";
 import { OUTCOME_TITLES, type Outcome } from "@/lib/cases/case-words";
 import { cardProgress } from "@/lib/cases/card-progress";
+import { counted } from "@/lib/cases/part-words";
 
 interface CardStep {
   position: number;
@@ -26,7 +27,7 @@ export interface CardView {
 function Card({ card }: { card: CardView }) {
   const progress = cardProgress(card.steps.map((step) => ({ id: step.position, ...step })));
   return (
-    <div className="round-card">
+    <div className="round-card keeps-table">
       <h3>
         Round {card.round}. {card.title}
       </h3>
@@ -36,11 +37,10 @@ function Card({ card }: { card: CardView }) {
         rowKey={(step) => String(step.position)}
         columns={[
           { key: "step", head: "Step", cell: (step) => <StepCell step={step} /> },
-          { key: "who", head: "Who", cell: (step) => step.tickedBy ?? "" },
-          { key: "card", head: "Card, min", numeric: true, cell: (step) => step.plannedMinutes },
-          { key: "took", head: "Took, min", numeric: true, cell: (step) => step.spentMinutes ?? "open" },
+          { key: "card", head: "Card", numeric: true, cell: (step) => step.plannedMinutes },
+          { key: "took", head: "Took", numeric: true, cell: (step) => step.spentMinutes ?? "open" },
         ]}
-        foot={[`${progress.ticked} of ${progress.steps} ticked`, null, progress.plannedMinutes, progress.spentMinutes]}
+        foot={[`${progress.ticked} of ${progress.steps} ticked`, progress.plannedMinutes, progress.spentMinutes]}
       />
       {card.outcome && (
         <p className="small">
@@ -54,16 +54,22 @@ function Card({ card }: { card: CardView }) {
   );
 }
 
-/** A step and its cautions: they stand beside it here too. */
+/** A step and its cautions: this card is a record, so they are folded, but they stand beside their step here too. */
 function StepCell({ step }: { step: CardStep }) {
   return (
     <>
       {step.title}
-      {step.cautions.map((caution) => (
-        <Caution key={caution.text} level={caution.level}>
-          {caution.text}
-        </Caution>
-      ))}
+      {step.tickedBy && <small className="step-who">{step.tickedBy}</small>}
+      {step.cautions.length > 0 && (
+        <details className="card-cautions">
+          <summary>{counted(step.cautions.length, "caution")}</summary>
+          {step.cautions.map((caution) => (
+            <Caution key={caution.text} level={caution.level}>
+              {caution.text}
+            </Caution>
+          ))}
+        </details>
+      )}
     </>
   );
 }

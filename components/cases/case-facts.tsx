@@ -60,7 +60,7 @@ export function partRows(facts: FactsOfCase): SlipRow[] {
     { label: "Job", value: `${job.number} ${job.customer}` },
     { label: "Parts", value: `${partsOf(facts.quantity, run?.partsStruck ?? null)} ${job.partName}` },
     { label: "Base metal", value: metalWords(facts.baseMetal, facts.alloy) },
-    { label: "Plate to come", value: stackWords(job.finalStack) },
+    { label: "Plate", value: stackWords(job.finalStack) },
   ];
 }
 

@@ -40,7 +40,7 @@ export function CaseMoneyTable(props: CaseMoneyProps) {
   const range = (figure: { low90Cents: number; high90Cents: number }) =>
     `${formatMoney(figure.low90Cents, currency, { whole: true })} to ${formatMoney(figure.high90Cents, currency, { whole: true })}`;
   return (
-    <>
+    <div className="keeps-table">
       <DataTable
         caption="Cost of the case"
         rows={linesOf(estimate, recorded)}
@@ -62,6 +62,6 @@ export function CaseMoneyTable(props: CaseMoneyProps) {
         Rates of {ratesFrom}. {estimate && `Estimate ${range(estimate)}, 90% range. `}
         Had it gone on and failed later: {range(atRisk)}. {assumed.join(" ")}
       </Rests>
-    </>
+    </div>
   );
 }

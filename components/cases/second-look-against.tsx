@@ -1,5 +1,6 @@
 import Link from "next/link";
 import { classGlyph } from "@/components/cases/class-glyph";
+import { classWords } from "@/components/cases/class-words";
 import { Glyph } from "@/components/ui/glyph";
 import { KeyCap } from "@/components/ui/key-cap";
 import { PhotoFrame } from "@/components/ui/photo-frame";
@@ -53,7 +54,9 @@ export function Against({ classes }: { classes: readonly AgainstClass[] }) {
 
 export interface AlikeView {
   caseRef: string;
-  words: string;
+  classTitle: string;
+  /** "sound in round 2" */
+  end: string;
   photo: { id: string; placeholder?: string; isRendered: boolean } | null;
 }
 
@@ -75,7 +78,7 @@ export function MostAlike({ cases, allHref }: { cases: readonly AlikeView[]; all
                   placeholder={each.photo?.placeholder}
                 />
                 <b className="ref">{each.caseRef.replace(/^CT-/, "")}</b>
-                {each.words}
+                {classWords(each.classTitle)}, {each.end}
               </Link>
             </li>
           ))}

@@ -31,7 +31,7 @@ export function SecondLookCard({ form, offer, onChange, error }: CardProps) {
   const fix = chosenFix(form, offer);
   const aside =
     form.causeId === null ? undefined : (
-      <Button variant="quiet" keyCap="E" aria-pressed={isEditing} onClick={() => setEditing(!isEditing)}>
+      <Button variant="quiet" keyCap="C" aria-pressed={isEditing} onClick={() => setEditing(!isEditing)}>
         {isEditing ? "Done" : "Edit steps"}
       </Button>
     );
@@ -103,10 +103,14 @@ function StepRow({ steps, cautions }: StepRowProps) {
     <ol className="step-row">
       {steps.map((step) => (
         <li key={step.key}>
-          <span className="fig step-row__minutes">{step.minutes || 0} min</span>
-          <b>{step.title || "Step without a name"}</b>
-          {step.detail && <p>{step.detail}</p>}
-          <StepCautions keys={step.cautionKeys} cautions={cautions} />
+          <div>
+            <b>{step.title || "Step without a name"}</b>
+            <span className="fig">{step.minutes || 0} min</span>
+            {step.detail && <p>{step.detail}</p>}
+          </div>
+          <div className="step-row__cautions">
+            <StepCautions keys={step.cautionKeys} cautions={cautions} />
+          </div>
         </li>
       ))}
     </ol>

@@ -77,7 +77,14 @@ export function SecondLookForm(props: SecondLookFormProps) {
       {!releases && form.disposition === "rework" && (
         <SecondLookCard form={form} offer={offer} onChange={onChange} error={problems.steps} />
       )}
-      <form ref={element} className="sl-form" aria-label={`Second look of ${caseRef}`} onSubmit={submit} noValidate>
+      <form
+        ref={element}
+        id="second-look-form"
+        className="sl-form"
+        aria-label={`Second look of ${caseRef}`}
+        onSubmit={submit}
+        noValidate
+      >
         <TagUpright caseRef={caseRef} state="held" stateWords={props.stateWords} headingLevel={1} sub={props.sub}>
           <ClassChoice
             {...{ form, offer, onChange }}

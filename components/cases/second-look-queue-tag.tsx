@@ -1,6 +1,6 @@
 import { Tag, type TagPhoto } from "@/components/cases/tag";
 import type { BaseMetal } from "@/lib/cases/case-words";
-import { metalWords } from "@/lib/cases/part-words";
+import { metalInSentence } from "@/lib/cases/metal-words";
 import { tagStanding } from "@/lib/cases/tag-standing";
 
 export interface QueueTagCase {
@@ -43,7 +43,7 @@ export function QueueTag({ row, href, now, stake, photo, current }: QueueTagProp
       stateWords={standing.words}
       classSlug={row.calledClass ?? row.confirmedClass}
       classWords={classOf(row)}
-      meta={`${row.quantity} × ${row.partName}, ${metalWords(row.baseMetal, row.alloy)}`}
+      meta={`${row.quantity} × ${row.partName}, ${metalInSentence(row.baseMetal, row.alloy)}`}
       stake={stake}
       photo={photo}
       current={current}

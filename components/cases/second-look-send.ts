@@ -2,7 +2,7 @@
 
 import { useRouter } from "next/navigation";
 import { startTransition, useActionState } from "react";
-import { say } from "@/components/ui/toast";
+import { sayOnNextPage } from "@/components/cases/second-look-said";
 import type { ActState } from "@/lib/act-state";
 
 export type SecondLookAction = (
@@ -37,7 +37,7 @@ export function useSecondLookSend(nextHref: string) {
       return LOST;
     }
     if (result?.ok) {
-      say(sending.words);
+      sayOnNextPage(sending.words);
       router.push(nextHref);
     }
     return result;

@@ -69,6 +69,7 @@ export function PhotoStage({ photos, startAt = 0, hideFilm }: PhotoStageProps) {
           {view.zoom > 1 ? `${view.zoom.toFixed(view.zoom % 1 === 0 ? 0 : 1)}×` : "2×"}
         </Button>
         <Button
+          className="stage-tools__closer"
           aria-label="Closer"
           disabled={view.zoom >= MOST_ZOOM}
           glyph="ui-plus"

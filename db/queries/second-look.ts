@@ -1,6 +1,7 @@
 import { and, asc, count, desc, eq, gt, inArray, isNotNull, lt, ne, or, sql, sum } from "drizzle-orm";
 import type { BaseMetal, Symptom } from "@/lib/cases/case-words";
 import type { Handle } from "../open";
+import { preparedOnce } from "../prepared";
 import {
   cases,
   exemplars,
@@ -28,7 +29,7 @@ const waiting = (shopId: number, stationId: number | null) =>
     stationId === null ? undefined : eq(cases.tracedStationId, stationId),
   );
 
-const behind = (place: QueuePlace) =>
+const behind = (place: QueuePlace | ReturnType<typeof placeNamed>) =>
   or(
     lt(cases.atRiskCents, place.atRiskCents),
     and(eq(cases.atRiskCents, place.atRiskCents), gt(cases.heldAt, place.heldAt)),
@@ -75,33 +76,45 @@ export type QueueRow = ReturnType<typeof listQueue>[number];
 
 /**
  * Cases that wait for a second look.
- * @param page `after`: the last one that was shown; `stationId`: only those that trace back to it
+ * @param page `after`: the last one that was shown; `from`: begin with this one; `stationId`: only those that trace
+ *   back to it
  */
 export function listQueue(
   db: Handle,
   shopId: number,
-  page: { stationId: number | null; after?: QueuePlace | null; limit: number },
+  page: { stationId: number | null; after?: QueuePlace | null; from?: QueuePlace; limit: number },
 ) {
-  return queueRows(db)
-    .where(and(waiting(shopId, page.stationId), page.after ? behind(page.after) : undefined))
-    .orderBy(desc(cases.atRiskCents), asc(cases.heldAt), asc(cases.id))
-    .limit(page.limit)
-    .all();
+  const { stationId, after, from, limit } = page;
+  const shape = `second-look queue ${stationId !== null} ${Boolean(after)} ${Boolean(from)}`;
+  const query = preparedOnce(db, shape, () =>
+    queueRows(db)
+      .where(
+        and(
+          eq(cases.shopId, sql.placeholder("shopId")),
+          eq(cases.state, "held"),
+          stationId === null ? undefined : eq(cases.tracedStationId, sql.placeholder("stationId")),
+          after ? behind(placeNamed("after")) : undefined,
+          from ? or(eq(cases.id, placeNamed("from").id), behind(placeNamed("from"))) : undefined,
+        ),
+      )
+      .orderBy(desc(cases.atRiskCents), asc(cases.heldAt), asc(cases.id))
+      .limit(sql.placeholder("limit"))
+      .prepare(),
+  );
+  return query.all({ shopId, stationId, limit, ...valuesOf("after", after), ...valuesOf("from", from) });
 }
 
-/** The few that stand just in front of a place, in queue order. */
-export function listQueueAhead(
-  db: Handle,
-  shopId: number,
-  page: { stationId: number | null; of: QueuePlace; limit: number },
-): QueueRow[] {
-  return queueRows(db)
-    .where(and(waiting(shopId, page.stationId), aheadOf(page.of)))
-    .orderBy(asc(cases.atRiskCents), desc(cases.heldAt), desc(cases.id))
-    .limit(page.limit)
-    .all()
-    .reverse();
-}
+/** A place that is only known when the prepared query runs. */
+const placeNamed = (name: string) => ({
+  atRiskCents: sql.placeholder(`${name}.atRiskCents`),
+  heldAt: sql.placeholder(`${name}.heldAt`),
+  id: sql.placeholder(`${name}.id`),
+});
+
+const valuesOf = (name: string, place: QueuePlace | null | undefined) =>
+  place
+    ? { [`${name}.atRiskCents`]: place.atRiskCents, [`${name}.heldAt`]: place.heldAt, [`${name}.id`]: place.id }
+    : {};
 
 /** How many cases and parts wait, all of them or those that trace back to a station; with `before`, those in front of it. */
 export function countQueue(

@@ -12,7 +12,6 @@ import {
   listAlike,
   listExemplars,
   listQueue,
-  listQueueAhead,
   type QueuePlace,
 } from "@/db/queries/second-look";
 import { cases, exemplars, photos } from "@/db/schema";
@@ -99,10 +98,9 @@ describe("the queue for a second look", () => {
     expect(countQueue(db, shop.shopId, { stationId: null, before: placeOf(third) }).cases).toBe(2);
   });
 
-  it("shows those just in front of a case, in queue order", () => {
-    const [first, second, third] = [waiting(900, 1), waiting(800, 1), waiting(700, 1)];
-    const ahead = listQueueAhead(db, shop.shopId, { stationId: null, of: placeOf(third), limit: 2 });
-    expect(refs(ahead)).toEqual([first.ref, second.ref]);
+  it("can begin with the open case, for the rail on top of it", () => {
+    const [, second, third] = [waiting(900, 1), waiting(800, 1), waiting(700, 1)];
+    expect(refs(listQueue(db, shop.shopId, { ...all, from: placeOf(second) }))).toEqual([second.ref, third.ref]);
   });
 
   it("goes on to the next case, from the last one to the first, and nowhere when no other waits", () => {

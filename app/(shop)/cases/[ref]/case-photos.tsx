@@ -22,6 +22,11 @@ function pairOf(shots: readonly CaseShot[]): { before: CaseShot; after: CaseShot
   return before && after ? { before, after } : null;
 }
 
+/** The class stands: a case that is held again may turn out to be another. */
+function isSettled(facts: CaseFacts): boolean {
+  return facts.confirmedClass !== null && facts.state !== "held";
+}
+
 /** Before and after, then all photos by round. A part that was not struck again shows its snap large instead. */
 export function CasePhotos({ member, facts, shots }: CasePhotosProps) {
   const photos = stagePhotos(facts.ref, shots);
@@ -30,10 +35,7 @@ export function CasePhotos({ member, facts, shots }: CasePhotosProps) {
     const photo = photos[shots.indexOf(shot)];
     return { id: shot.id, caption, placeholder: photo?.placeholder, isRendered: shot.isRendered };
   };
-  const firstReady = Math.max(
-    0,
-    shots.findIndex((shot) => shot.state === "ready"),
-  );
+  const firstReady = shots.findIndex((shot) => shot.state === "ready");
   return (
     <Section title={pair ? "Before and after" : "Photos"}>
       {pair ? (
@@ -42,7 +44,7 @@ export function CasePhotos({ member, facts, shots }: CasePhotosProps) {
           after={of(pair.after, `Round ${pair.after.round}, re-strike`)}
         />
       ) : (
-        <PhotoStage photos={photos} startAt={firstReady} hideFilm />
+        firstReady >= 0 && <PhotoStage photos={photos} startAt={firstReady} hideFilm />
       )}
       <CaseFilm
         caseRef={facts.ref}
@@ -50,7 +52,7 @@ export function CasePhotos({ member, facts, shots }: CasePhotosProps) {
           const photo = photos[index];
           return photo ? { photo, round: shot.round, isExemplar: shot.exemplarOf !== null } : [];
         })}
-        onExemplar={facts.confirmedClass !== null && can(member, "exemplar.choose") ? setExemplar : undefined}
+        onExemplar={isSettled(facts) && can(member, "exemplar.choose") ? setExemplar : undefined}
       />
     </Section>
   );

@@ -131,9 +131,12 @@ function mainAction(member: SignedIn, facts: CaseFacts): MainAction | null {
   return { label: "Snap a suspect part", href: routes.snap(), glyph: "ui-camera", keyCap: "N" };
 }
 
-/** While it is held the tag says what was called; after that, what was confirmed. */
+/** While it is held the tag says what was called, or what it was taken for in the round before; after that, what was confirmed. */
 function shownClass(facts: CaseFacts): { slug: string | null; words: string } {
   if (facts.state !== "held") return { slug: facts.confirmedClass, words: callWords(facts.confirmedTitle, true) };
+  if (facts.calledClass === null && facts.confirmedTitle !== null) {
+    return { slug: facts.confirmedClass, words: `Was ${facts.confirmedTitle.toLowerCase()}` };
+  }
   return { slug: facts.calledClass, words: callWords(facts.calledTitle, false) };
 }
 

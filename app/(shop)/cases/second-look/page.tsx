@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { QueueTag } from "@/components/cases/second-look-queue-tag";
+import { SaidBefore } from "@/components/cases/second-look-said";
 import { TagWire } from "@/components/cases/tag-wire";
 import { LineStrip } from "@/components/line/line-strip";
 import { NarrowedBar } from "@/components/line/narrowed-bar";
@@ -83,20 +84,23 @@ export default async function QueuePage({ searchParams }: QueuePageProps) {
         )
       }
     >
-      <Lead main={main} below={here.cases > 0 ? `${ORDER}. ${counted(here.parts, "part")} on hold.` : undefined}>
-        {leadWords(here.cases)}
-      </Lead>
-      {shown.length === 0 ? (
-        <ClearRack isNarrowed={station !== null} />
-      ) : (
-        <div className="queue">
-          <TagWire label="Waiting for a second look">
-            {shown.map((row) => (
-              <QueueTag key={row.id} now={now} {...queueTagProps(member, row, photos.get(row.id), query)} />
-            ))}
-          </TagWire>
-        </div>
-      )}
+      <SaidBefore />
+      <div className="queue-cols">
+        <Lead main={main} below={here.cases > 0 ? `${ORDER}. ${counted(here.parts, "part")} on hold.` : undefined}>
+          {leadWords(here.cases)}
+        </Lead>
+        {shown.length === 0 ? (
+          <ClearRack isNarrowed={station !== null} />
+        ) : (
+          <div className="queue">
+            <TagWire label="Waiting for a second look">
+              {shown.map((row) => (
+                <QueueTag key={row.id} now={now} {...queueTagProps(member, row, photos.get(row.id), query)} />
+              ))}
+            </TagWire>
+          </div>
+        )}
+      </div>
       {(last || cursor) && (
         <Pager
           label="Waiting cases"

@@ -92,7 +92,8 @@ function alike(db: Db, shopId: number, of: Parameters<typeof listAlike>[2], now:
     const photo = photos.get(row.id);
     return {
       caseRef: row.ref,
-      words: alikeWords(row, now),
+      classTitle: row.classTitle,
+      end: endWords(row, now),
       photo:
         photo?.state === "ready"
           ? { id: photo.id, placeholder: placeholderUrl(photo.placeholder), isRendered: photo.isRendered }
@@ -101,9 +102,8 @@ function alike(db: Db, shopId: number, of: Parameters<typeof listAlike>[2], now:
   });
 }
 
-/** "Underactivation, sound in round 2" */
-function alikeWords(row: AlikeCase, now: number): string {
+/** "sound in round 2" */
+function endWords(row: AlikeCase, now: number): string {
   const standing = tagStanding({ state: "closed", closing: row.closing, round: row.round, heldAt: row.openedAt }, now);
-  const end = standing.words.replace(/^Closed, /, "").toLowerCase();
-  return `${row.classTitle}, ${end}`;
+  return standing.words.replace(/^Closed, /, "").toLowerCase();
 }

@@ -17,7 +17,8 @@ import { getStation } from "@/db/queries/line";
 import { CASE_REF_PATTERN } from "@/lib/cases/case-ref";
 import { opinionWords } from "@/lib/cases/history-words";
 import { dayWords } from "@/lib/cases/moment-words";
-import { metalWords, partsOf } from "@/lib/cases/part-words";
+import { metalInSentence } from "@/lib/cases/metal-words";
+import { partsOf } from "@/lib/cases/part-words";
 import { tagStanding } from "@/lib/cases/tag-standing";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
@@ -121,7 +122,7 @@ function SubLines({ facts, firstCall }: { facts: CaseFacts; firstCall: CaseCall 
   const parts = `${partsOf(facts.quantity, facts.run?.partsStruck ?? null)} ${facts.job.partName}`;
   return (
     <>
-      {facts.job.customer}, {parts}, {metalWords(facts.baseMetal, facts.alloy).toLowerCase()}
+      {facts.job.customer}, {parts}, {metalInSentence(facts.baseMetal, facts.alloy)}
       {firstCall && (
         <>
           <br />

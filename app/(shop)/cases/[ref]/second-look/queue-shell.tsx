@@ -1,26 +1,20 @@
 import type { ReactNode } from "react";
 import { QueueTag } from "@/components/cases/second-look-queue-tag";
+import { SaidBefore } from "@/components/cases/second-look-said";
 import { TagWire } from "@/components/cases/tag-wire";
 import { LineStrip } from "@/components/line/line-strip";
 import { NarrowedBar } from "@/components/line/narrowed-bar";
 import { ShopShell } from "@/components/shell/shop-shell";
+import { ThumbBar } from "@/components/shell/thumb-bar";
+import { LinkButton } from "@/components/ui/button";
 import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
-import {
-  countQueue,
-  getNextInQueue,
-  getQueuePlace,
-  listQueue,
-  listQueueAhead,
-  type QueuePlace,
-  type QueueRow,
-} from "@/db/queries/second-look";
+import { countQueue, getNextInQueue, getQueuePlace, listQueue, type QueuePlace } from "@/db/queries/second-look";
 import { counted } from "@/lib/cases/part-words";
 import { routes } from "@/lib/routes";
 import { shellFor } from "@/lib/server/shell-data";
 import { queueTagProps } from "../../second-look/queue-tag-props";
 
-const AHEAD = 1;
 const ON_RAIL = 8;
 
 interface QueueShellProps {
@@ -51,7 +45,15 @@ export function QueueShell({ member, caseId, isOpen, station, now, children }: Q
       counts={counts}
       here="second-look"
       width="bleed"
-      back={routes.queue(query)}
+      thumb={
+        <ThumbBar back={routes.queue(query)}>
+          {isOpen && (
+            <LinkButton className="sl-to-tag" href="#second-look-form" glyph="ui-hold-tag">
+              Fill in the tag
+            </LinkButton>
+          )}
+        </ThumbBar>
+      }
       strip={
         <LineStrip
           mode="thin"
@@ -71,6 +73,7 @@ export function QueueShell({ member, caseId, isOpen, station, now, children }: Q
         )
       }
     >
+      <SaidBefore key={caseId} />
       {place && here.cases > 0 && (
         <div className="sl-rail">
           <Rail
@@ -99,14 +102,10 @@ interface RailProps {
   now: number;
 }
 
-/** The open case on the wire, the one before it and those that follow. */
+/** The open case on the wire, and those that follow it. */
 function Rail({ member, place, isOpen, stationId, query, waiting, now }: RailProps) {
   const db = getDb();
-  const ahead = listQueueAhead(db, member.shopId, { stationId, of: place, limit: AHEAD });
-  // Standing one behind the last in front, the list begins with the open case itself.
-  const from = ahead.at(-1) ?? null;
-  const following = listQueue(db, member.shopId, { stationId, after: from, limit: ON_RAIL - ahead.length });
-  const rows: QueueRow[] = [...ahead, ...following];
+  const rows = listQueue(db, member.shopId, { stationId, from: place, limit: ON_RAIL });
   const inFront = countQueue(db, member.shopId, { stationId, before: place }).cases;
   const isHere = rows.some((row) => row.id === place.id);
   const words = isOpen && isHere ? `${inFront + 1} of ${waiting}` : `${rows.length} of ${waiting}`;
