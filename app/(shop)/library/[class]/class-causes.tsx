@@ -6,6 +6,7 @@ import { Section } from "@/components/ui/section";
 import { TooFew } from "@/components/ui/too-few";
 import { dayWords } from "@/lib/cases/moment-words";
 import { counted } from "@/lib/cases/part-words";
+import { BASELINE_CLASS } from "@/lib/library/shelf-words";
 import { LEAST_CASES } from "@/lib/library/shop-share";
 import type { LoadedClass } from "./load-class";
 
@@ -65,7 +66,7 @@ export function Fixes({ loaded: { fixes, allCauses, sources } }: { loaded: Loade
 /** What keeps it from coming back. */
 export function Prevention({ loaded: { entry, sources } }: { loaded: LoadedClass }) {
   return (
-    <Section title="So that it stays away" id="prevention">
+    <Section title={entry.slug === BASELINE_CLASS ? "So that it stays so" : "So that it stays away"} id="prevention">
       <ul className="lib-list lib-list--cols">
         {entry.prevention.map((line) => (
           <li key={line}>{line}</li>
