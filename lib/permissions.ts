@@ -12,6 +12,8 @@ export const PERMISSIONS = [
   "case.confirm",
   "card.work",
   "exemplar.choose",
+  "job.keep",
+  "job.change",
   "photo.add",
   "photo.withdraw",
   "library.see",
@@ -43,6 +45,10 @@ export const MATRIX = {
   "case.confirm": { plater: "no", trainee: "no", senior: "any", owner: "any" },
   "card.work": { plater: "any", trainee: "no", senior: "any", owner: "any" },
   "exemplar.choose": { plater: "no", trainee: "no", senior: "any", owner: "any" },
+  // Opening a job: a plater whose parts belong to none must not be stuck at the snap.
+  "job.keep": { plater: "any", trainee: "no", senior: "any", owner: "any" },
+  // What later prices rest on, and whether a job is still open.
+  "job.change": { plater: "no", trainee: "no", senior: "any", owner: "any" },
   "photo.add": { plater: "any", trainee: "any", senior: "any", owner: "any" },
   // Taking back a photo that no case holds yet.
   "photo.withdraw": { plater: "own", trainee: "own", senior: "own", owner: "own" },

@@ -12,6 +12,7 @@ export const routes = {
   case: (ref: string) => `/cases/${ref}`,
   tag: (ref: string) => `/cases/${ref}/tag`,
   tagCode: (ref: string) => `/cases/${ref}/tag/code.svg`,
+  jobs: (query?: Record<string, string>) => withQuery("/cases/jobs", query),
   reworkList: (query?: Record<string, string>) => withQuery("/cases/rework", query),
   rework: (ref: string) => `/cases/${ref}/rework`,
   reworkStep: (ref: string, step: number) => `/cases/${ref}/rework?step=${step}`,

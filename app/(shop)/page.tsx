@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import Link from "next/link";
 import { LineStrip } from "@/components/line/line-strip";
 import type { MainAction } from "@/components/shell/main-action";
 import { ShopShell } from "@/components/shell/shop-shell";
@@ -8,6 +9,7 @@ import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
 import { listQueue } from "@/db/queries/second-look";
 import { countWaiting, hasCases } from "@/db/queries/waiting";
+import { countOpenJobs } from "@/db/queries/work-orders";
 import { countWords } from "@/lib/cases/part-words";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
@@ -54,6 +56,11 @@ export default async function TodayPage() {
         <Note glyph="ui-camera" title="The casebook begins with the first part">
           A plater photographs a suspect part at the strike. It gets a hold tag here, a senior takes a second look, and
           what was learned stays.
+          {can(member, "job.keep") && countOpenJobs(db, member.shopId) === 0 && (
+            <Link className="solo" href={routes.jobs({ open: "1" })}>
+              Open the first job
+            </Link>
+          )}
         </Note>
       )}
       <div className="today">

@@ -13,6 +13,10 @@ export const AUDIT_WORDS = {
   "account.password-reset": "set a new password by a mailed link",
   "account.signed-out-everywhere": "signed out everywhere",
   "rates.set": "set rates",
+  "job.opened": "opened job",
+  "job.changed": "changed job",
+  "job.closed": "closed job",
+  "job.reopened": "opened again job",
   "library.published": "published in the library",
 } as const satisfies Record<string, string>;
 export type AuditAction = keyof typeof AUDIT_WORDS;

@@ -26,6 +26,8 @@ export const SCREENS: readonly Screen[] = [
   { path: "/cases/{held}/second-look", as: "senior" },
   { path: "/cases/rework", as: "plater" },
   { path: "/cases/{card}/rework", as: "plater" },
+  { path: "/cases/jobs", as: "senior" },
+  { path: "/cases/jobs?open=1", as: "plater" },
   { path: "/library", as: "trainee" },
   { path: "/library/underactivation", as: "trainee" },
   { path: "/library/sound", as: "plater" },

@@ -2,6 +2,7 @@ import { randomUUID } from "node:crypto";
 import { NextRequest } from "next/server";
 import * as account from "@/app/(shop)/account/actions";
 import * as caseActions from "@/app/(shop)/cases/actions";
+import * as jobActions from "@/app/(shop)/cases/jobs/actions";
 import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
 import * as crew from "@/app/(shop)/crew/actions";
 import * as callsRoute from "@/app/api/cases/[ref]/calls/route";
@@ -19,6 +20,7 @@ import { TEST_PASSWORD } from "@/tests/fixtures/crew-factory";
 import { makeConfirmation, makeSnap } from "@/tests/fixtures/shop-factory";
 import {
   closedCase,
+  closedJob,
   confirmedCase,
   heldCase,
   loosePhoto,
@@ -85,6 +87,7 @@ async function answered(
 }
 
 const CASES = "app/(shop)/cases/actions.ts";
+const JOBS = "app/(shop)/cases/jobs/actions.ts";
 const CREW = "app/(shop)/crew/actions.ts";
 const ACCOUNT = "app/(shop)/account/actions.ts";
 
@@ -145,6 +148,43 @@ export const ENTRIES: readonly Entry[] = [
     const { ref, photoId } = readyPhoto(aim, UPLOADS);
     return () => ending(caseActions.setExemplar, { ref, photoId, chosen: "true" });
   }),
+
+  {
+    name: `${JOBS} openJob`,
+    permission: "job.keep",
+    aims: "shop",
+    prepare: () => () =>
+      ending(jobActions.openJob, {
+        number: randomUUID(),
+        customer: "New Customer",
+        partName: "rotor",
+        baseMetal: "steel",
+        quantity: 12,
+        areaDm2: "2.5",
+      }),
+  },
+  {
+    name: `${JOBS} changeJob`,
+    permission: "job.change",
+    aims: "row",
+    prepare: (aim) => () =>
+      ending(jobActions.changeJob, { jobId: aim.shop.jobId, quantity: 60, areaDm2: "1.5", partValue: "40" }),
+  },
+  {
+    name: `${JOBS} closeJob`,
+    permission: "job.change",
+    aims: "row",
+    prepare: (aim) => () => ending(jobActions.closeJob, { jobId: aim.shop.jobId }),
+  },
+  {
+    name: `${JOBS} reopenJob`,
+    permission: "job.change",
+    aims: "row",
+    prepare: (aim) => {
+      const jobId = closedJob(aim);
+      return () => ending(jobActions.reopenJob, { jobId });
+    },
+  },
 
   {
     name: `${CREW} invitePerson`,

@@ -7,7 +7,7 @@ import type { Db } from "@/db/open";
 import { requireCase } from "@/db/queries/cases";
 import type { SignedIn } from "@/db/queries/crew";
 import { insertInvite } from "@/db/queries/invites";
-import { invites, photos, photoSizes, reworkCards, reworkSteps } from "@/db/schema";
+import { invites, photos, photoSizes, reworkCards, reworkSteps, workOrders } from "@/db/schema";
 import { photoPath } from "@/lib/photos/photo-path";
 import { TEST_NOW } from "@/tests/fixtures/crew-factory";
 import { confirmFor, makeCase, type TestShop } from "@/tests/fixtures/shop-factory";
@@ -94,6 +94,12 @@ export function loosePhoto({ db, shop, by }: Aim): string {
     })
     .run();
   return id;
+}
+
+/** The shop's job, closed. */
+export function closedJob({ db, shop }: Aim): number {
+  db.update(workOrders).set({ closedAt: TEST_NOW }).where(eq(workOrders.id, shop.jobId)).run();
+  return shop.jobId;
 }
 
 export function pendingInvite({ db, shop }: Aim): number {

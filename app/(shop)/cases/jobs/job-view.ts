@@ -1,0 +1,36 @@
+import type { JobFigures } from "@/components/cases/job-cost-fields";
+import type { JobView } from "@/components/cases/job-table";
+import type { SignedIn } from "@/db/queries/crew";
+import type { JobRow } from "@/db/queries/work-orders";
+import { layersWords } from "@/lib/cases/job-words";
+import { metalWords } from "@/lib/cases/part-words";
+import { formatMoney } from "@/lib/money";
+import { can } from "@/lib/permissions";
+import { routes } from "@/lib/routes";
+
+/** A job for its list: the value only for those who may see money, the way in only for those who may change it. */
+export function jobView(job: JobRow, member: SignedIn): JobView {
+  const { partValueCents, closedAt } = job;
+  const value = partValueCents === 0 ? "not set" : formatMoney(partValueCents, member.shop.currency);
+  return {
+    id: job.id,
+    number: job.number,
+    customer: job.customer,
+    partName: job.partName,
+    metal: metalWords(job.baseMetal, job.alloy),
+    quantity: job.quantity,
+    layers: layersWords(job.finalStack),
+    held: job.heldCases === 0 ? "" : `${job.heldCases} on hold`,
+    ...(can(member, "money.case") ? { value } : {}),
+    ...(can(member, "job.change")
+      ? { changeHref: routes.jobs({ change: String(job.id), ...(closedAt === null ? {} : { closed: "1" }) }) }
+      : {}),
+  };
+}
+
+/** A job's figures for its form. */
+export function jobFigures(job: JobRow, member: SignedIn): JobFigures {
+  const { quantity, areaDm2, finalStack, partValueCents } = job;
+  const partValue = partValueCents === 0 ? "" : (partValueCents / 100).toFixed(2);
+  return { quantity, areaDm2, finalStack, ...(can(member, "money.case") ? { partValue } : {}) };
+}

@@ -1,0 +1,31 @@
+"use client";
+
+import { useActionState } from "react";
+import { FormAnswer } from "@/components/crew/form-answer";
+import { SubmitButton } from "@/components/ui/submit-button";
+import type { ActState } from "@/lib/act-state";
+import { JobCostFields, type JobFigures } from "./job-cost-fields";
+
+export interface JobChangeFormProps {
+  /** The thumb bar's button sends it by this id. */
+  id: string;
+  jobId: number;
+  figures: JobFigures;
+  currencySign: string | null;
+  action: (previous: ActState<{ number: string }>, form: FormData) => Promise<ActState<{ number: string }>>;
+}
+
+/** Changes what the prices of a job's later cases rest on. */
+export function JobChangeForm({ id, jobId, figures, currencySign, action }: JobChangeFormProps) {
+  const [state, send] = useActionState(action, null);
+  return (
+    <form className="form" id={id} action={send}>
+      <FormAnswer state={state} done={{ title: "The job is changed", words: "Cases priced from now on rest on it." }} />
+      <input type="hidden" name="jobId" value={jobId} />
+      <JobCostFields state={state} figures={figures} currencySign={currencySign} />
+      <div className="desk-only">
+        <SubmitButton variant="main">Save the job</SubmitButton>
+      </div>
+    </form>
+  );
+}
