@@ -1,4 +1,4 @@
-import { sql, type SQL } from "drizzle-orm";
+import { desc, sql, type SQL } from "drizzle-orm";
 import {
   foreignKey,
   index,
@@ -100,7 +100,8 @@ export const cases = sqliteTable(
     index("cases_by_traced").on(t.shopId, t.tracedStationId, t.openedAt, t.id),
     index("cases_by_metal").on(t.shopId, t.baseMetal, t.openedAt, t.id),
     index("cases_by_opener").on(t.shopId, t.openedById, t.openedAt),
-    index("cases_queue").on(t.shopId, t.state, t.atRiskCents, t.heldAt, t.id),
+    // In the queue's own order: most money first, then who waits longest.
+    index("cases_queue").on(t.shopId, t.state, desc(t.atRiskCents), t.heldAt, t.id),
     // The casebook's filters: each leads straight to its cases in the order in which they are shown.
     index("cases_by_standing_class").on(t.shopId, standingClass(t), t.openedAt, t.id),
     index("cases_by_closing").on(t.shopId, t.closing, t.openedAt, t.id),
