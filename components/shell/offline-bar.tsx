@@ -46,7 +46,7 @@ export function BusBar({ open, words }: { open: boolean; words?: string }) {
         {open && (
           <p className="offline">
             <NoSignal />
-            {words ?? "No signal. What is on this screen stays. Send it again when the signal is back."}
+            {words ?? "No signal. What is on this screen stays. Snaps and photos go up by themselves when it is back."}
           </p>
         )}
       </div>

@@ -1,5 +1,6 @@
 import "server-only";
 import { getDb } from "@/db/client";
+import { watchPeers } from "./address";
 import { onWake } from "./job-clock";
 import { jobHandlers } from "./job-handlers";
 import { startJobRunner, type JobRunner } from "./job-runner";
@@ -11,6 +12,7 @@ const holder = globalThis as typeof globalThis & { coppertellRunner?: JobRunner 
 /** What a server does before its first request: the database is brought up to date, left-overs go, work goes on. */
 export async function startUp(): Promise<void> {
   if (holder.coppertellRunner) return;
+  watchPeers();
   const db = getDb();
   const removed = await sweepUploads(db, uploadsRoot(), Date.now());
   if (removed > 0) console.info(`Removed ${removed} left-over files from the uploads folder.`);

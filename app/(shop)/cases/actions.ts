@@ -9,7 +9,6 @@ import {
   exemplarSchema,
   outcomeSchema,
   releaseSchema,
-  snapSchema,
   tickSchema,
 } from "@/lib/cases/case.schema";
 import { routes } from "@/lib/routes";
@@ -19,14 +18,6 @@ import { chooseExemplar } from "@/lib/server/cases/choose-exemplar";
 
 /** Pages that show a case or count it. */
 const showing = ({ ref }: { ref: string }) => [routes.today(), routes.case(ref), routes.queue(), routes.reworkList()];
-
-/** The snap stays on its page and shows the tag; photos go on uploading behind it. */
-export const snapCase = act({
-  permission: "case.snap",
-  input: snapSchema,
-  run: ({ input, ...doing }) => changes.snap(doing, input),
-  revalidate: showing,
-});
 
 export const addCall = act({
   permission: "case.call",

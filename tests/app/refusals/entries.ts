@@ -4,6 +4,7 @@ import * as account from "@/app/(shop)/account/actions";
 import * as caseActions from "@/app/(shop)/cases/actions";
 import * as jobActions from "@/app/(shop)/cases/jobs/actions";
 import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
+import * as costActions from "@/app/(shop)/costs/actions";
 import * as crew from "@/app/(shop)/crew/actions";
 import * as callsRoute from "@/app/api/cases/[ref]/calls/route";
 import * as confirmationRoute from "@/app/api/cases/[ref]/confirmation/route";
@@ -11,8 +12,12 @@ import * as outcomeRoute from "@/app/api/cases/[ref]/outcome/route";
 import * as caseRoute from "@/app/api/cases/[ref]/route";
 import * as casesRoute from "@/app/api/cases/route";
 import * as ledgerRoute from "@/app/api/ledger/route";
+import * as libraryClassRoute from "@/app/api/library/[class]/route";
+import * as libraryEntriesRoute from "@/app/api/library/entries/route";
+import * as libraryRoute from "@/app/api/library/route";
 import * as photoSizeRoute from "@/app/api/photos/[id]/[size]/route";
 import * as photoRoute from "@/app/api/photos/[id]/route";
+import { priceFieldName } from "@/lib/costs/rate-fields";
 import type { ActState } from "@/lib/act-state";
 import type { FaultCode } from "@/lib/fault";
 import type { Permission } from "@/lib/permissions";
@@ -105,7 +110,6 @@ const caseEntry = (name: string, permission: Permission, prepare: Entry["prepare
 });
 
 export const ENTRIES: readonly Entry[] = [
-  caseEntry("snapCase", "case.snap", (aim) => () => ending(caseActions.snapCase, { ...makeSnap(aim.shop) })),
   caseEntry("addCall", "case.call", (aim) => {
     const { ref } = heldCase(aim);
     return () => ending(caseActions.addCall, { ref, calledClass: "dewetting", sure: 2 });
@@ -322,6 +326,42 @@ export const ENTRIES: readonly Entry[] = [
       const { ref } = heldCase(aim);
       return () => answered(tagCode.GET, "GET", `/cases/${ref}/tag/code.svg`, { ref });
     },
+  },
+  {
+    name: "app/(shop)/costs/actions.ts addRates",
+    permission: "rates.set",
+    aims: "shop",
+    prepare: () => () =>
+      ending(costActions.addRates, {
+        validFrom: new Intl.DateTimeFormat("en-CA").format(Date.now() + 2 * 86_400_000),
+        source: "price list of the week",
+        labour: "61",
+        line: "40",
+        abrasive: "0.1",
+        solution: "6",
+        waste: "4",
+        [priceFieldName("Ni")]: "20",
+        [priceFieldName("Au")]: "130",
+        [priceFieldName("Cu")]: "10",
+      }),
+  },
+  {
+    name: "app/api/library/route.ts GET",
+    permission: "library.see",
+    aims: "shop",
+    prepare: () => () => answered(libraryRoute.GET, "GET", "/api/library?q=smut", {}),
+  },
+  {
+    name: "app/api/library/entries/route.ts GET",
+    permission: "library.see",
+    aims: "shop",
+    prepare: () => () => answered(libraryEntriesRoute.GET, "GET", "/api/library/entries", {}),
+  },
+  {
+    name: "app/api/library/[class]/route.ts GET",
+    permission: "library.see",
+    aims: "shop",
+    prepare: () => () => answered(libraryClassRoute.GET, "GET", "/api/library/dewetting", { class: "dewetting" }),
   },
   {
     name: "app/api/ledger/route.ts GET",
