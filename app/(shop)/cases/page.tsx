@@ -1,8 +1,9 @@
 import type { Metadata } from "next";
 import { redirect } from "next/navigation";
 import { CasebookBar } from "@/components/cases/casebook-bar";
-import { CasebookChips, type FilterChip } from "@/components/cases/casebook-chips";
+import { CasebookChips } from "@/components/cases/casebook-chips";
 import { CasebookForm } from "@/components/cases/casebook-form";
+import { LeftOut, NoCase } from "@/components/cases/casebook-none";
 import { CasebookReading } from "@/components/cases/casebook-reading";
 import { CasebookSentence } from "@/components/cases/casebook-sentence";
 import { CasebookTable } from "@/components/cases/casebook-table";
@@ -12,16 +13,14 @@ import { LineStrip } from "@/components/line/line-strip";
 import { NarrowedBar } from "@/components/line/narrowed-bar";
 import type { MainAction } from "@/components/shell/main-action";
 import { ShopShell } from "@/components/shell/shop-shell";
-import { LinkButton } from "@/components/ui/button";
-import { Empty } from "@/components/ui/empty";
-import { Note } from "@/components/ui/note";
 import { Pager } from "@/components/ui/pager";
 import { Rests } from "@/components/ui/rests";
 import { casebookAddress, readCasebookAddress } from "@/lib/cases/casebook-address";
-import { cappedWords, casesWords, dropWords } from "@/lib/cases/casebook-words";
+import { cappedWords, casesWords } from "@/lib/cases/casebook-words";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
+import { barProps, turned } from "./casebook-bar-props";
 import { loadCasebook, type LoadedCasebook } from "./load-casebook";
 
 export const metadata: Metadata = { title: "Casebook" };
@@ -92,7 +91,7 @@ export default async function CasebookPage({ searchParams }: CasebookPageProps) 
       ) : (
         <>
           <CasebookChips chips={chips} clearHref={clearHref} label="Filters that are set" />
-          <CasebookBar {...barOf(book, to)} />
+          <CasebookBar {...barProps(book, to)} />
           <Cases book={book} turnHref={to({ order: turned(book) })} />
           {(book.next || book.previous) && (
             <Pager
@@ -107,6 +106,8 @@ export default async function CasebookPage({ searchParams }: CasebookPageProps) 
     </ShopShell>
   );
 }
+
+const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 function Cases({ book, turnHref }: { book: LoadedCasebook; turnHref: string }) {
   const { items, terms, query } = book;
@@ -128,72 +129,6 @@ function Cases({ book, turnHref }: { book: LoadedCasebook; turnHref: string }) {
           <CasebookTag key={item.ref} item={item} terms={terms} eager={index < EAGER} />
         ))}
       </TagWire>
-    </div>
-  );
-}
-
-const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
-
-/** The order that a press on "sort" asks for. */
-function turned(book: LoadedCasebook): "newest" | "oldest" {
-  return book.time.sorted === "descending" ? "oldest" : "newest";
-}
-
-function barOf(book: LoadedCasebook, to: (change: Parameters<typeof casebookAddress>[1]) => string) {
-  const { query, time } = book;
-  const words =
-    time.column === "closed" ? ["Last closed first", "First closed first"] : ["Newest first", "Oldest first"];
-  const [newest = "", oldest = ""] = words;
-  const best = book.search?.isCapped ? "The 200 best matches" : "Best match first";
-  return {
-    view: query.view ?? ("grid" as const),
-    gridHref: to({ view: null, cursor: query.cursor }),
-    tableHref: to({ view: "table", cursor: query.cursor }),
-    orderWords: time.sorted === undefined ? best : time.sorted === "descending" ? newest : oldest,
-    turnWords: time.sorted === "descending" ? oldest : newest,
-    turnHref: to({ order: turned(book) }),
-    isRendered: book.items.some((item) => item.before?.isRendered || item.after?.isRendered),
-  };
-}
-
-function LeftOut({ names }: { names: string[] }) {
-  if (names.length === 0) return null;
-  return (
-    <Note tone="amber" title="Part of this link was left out" className="mt-4">
-      This shop has nothing that fits {names.join(", ")} as the link says it. Choose it anew in the words.
-    </Note>
-  );
-}
-
-function NoCase({ chips, clearHref, isEmptyBook }: { chips: FilterChip[]; clearHref: string; isEmptyBook: boolean }) {
-  if (isEmptyBook) {
-    return (
-      <div className="mt-8">
-        <Empty
-          title="The casebook is empty."
-          level={2}
-          action={<LinkButton href={routes.snap()}>Snap a suspect part</LinkButton>}
-        >
-          A case comes in here as soon as somebody hangs a hold tag.
-        </Empty>
-      </div>
-    );
-  }
-  return (
-    <div className="mt-8">
-      <Empty
-        title="No case matches."
-        level={2}
-        action={
-          chips.length > 0 ? (
-            <CasebookChips chips={chips} clearHref={clearHref} label="Filters to drop" />
-          ) : (
-            <LinkButton href={clearHref}>Back to the first page</LinkButton>
-          )
-        }
-      >
-        {dropWords(chips.length)}
-      </Empty>
     </div>
   );
 }
