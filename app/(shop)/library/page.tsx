@@ -12,7 +12,7 @@ import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
 import { countCasesByClass, listClassCards, type ClassCardRow } from "@/db/queries/library";
 import { getStation } from "@/db/queries/line";
-import { listExemplars } from "@/db/queries/second-look";
+import { listExemplars } from "@/db/queries/second-look-against";
 import { shelfWords } from "@/lib/library/shelf-words";
 import { libraryQuerySchema } from "@/lib/library/library-query.schema";
 import { routes } from "@/lib/routes";

@@ -3,7 +3,7 @@ import { Section } from "@/components/ui/section";
 import { TooFew } from "@/components/ui/too-few";
 import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
-import { listLibraryTitles } from "@/db/queries/case-page";
+import { listLibraryTitles } from "@/db/queries/case-records";
 import { listCallsAgainstConfirmed } from "@/db/queries/today";
 import { agreementOf } from "@/lib/cases/agreement-words";
 import { routes } from "@/lib/routes";

@@ -3,17 +3,15 @@ import { beforeEach, describe, expect, it } from "vitest";
 import { addCall } from "@/db/changes/add-call";
 import { recordOutcome, tickStep } from "@/db/changes/do-rework";
 import type { Db } from "@/db/open";
+import { getCaseFacts, getNeighbours, requireCaseFacts } from "@/db/queries/case-page";
 import {
-  getCaseFacts,
-  getNeighbours,
   listCaseCalls,
   listCaseCards,
   listCaseEvents,
   listCaseShots,
   listCaseSolutions,
   listLibraryTitles,
-  requireCaseFacts,
-} from "@/db/queries/case-page";
+} from "@/db/queries/case-records";
 import { requireCase } from "@/db/queries/cases";
 import { photos, reworkSteps } from "@/db/schema";
 import { caseTimeline } from "@/lib/cases/case-timeline";

@@ -3,17 +3,8 @@ import { beforeEach, describe, expect, it } from "vitest";
 import { releaseCase } from "@/db/changes/confirm-case";
 import type { Db } from "@/db/open";
 import type { CaseStanding } from "@/db/queries/cases";
-import {
-  countConfirmed,
-  countQueue,
-  getNextInQueue,
-  getQueuePlace,
-  getShelf,
-  listAlike,
-  listExemplars,
-  listQueue,
-  type QueuePlace,
-} from "@/db/queries/second-look";
+import { countQueue, getNextInQueue, getQueuePlace, listQueue, type QueuePlace } from "@/db/queries/second-look";
+import { countConfirmed, getShelf, listAlike, listExemplars } from "@/db/queries/second-look-against";
 import { cases, exemplars, photos } from "@/db/schema";
 import { offerForCase } from "@/lib/cases/second-look-offer";
 import { TEST_NOW } from "../../fixtures/crew-factory";

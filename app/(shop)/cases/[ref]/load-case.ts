@@ -1,14 +1,13 @@
 import type { Db } from "@/db/open";
+import { getNeighbours, type CaseFacts } from "@/db/queries/case-page";
 import {
-  getNeighbours,
   listCaseCalls,
   listCaseCards,
   listCaseEvents,
   listCaseShots,
   listCaseSolutions,
   listLibraryTitles,
-  type CaseFacts,
-} from "@/db/queries/case-page";
+} from "@/db/queries/case-records";
 import { listStations } from "@/db/queries/line";
 import { cardProgress } from "@/lib/cases/card-progress";
 import { caseTimeline } from "@/lib/cases/case-timeline";

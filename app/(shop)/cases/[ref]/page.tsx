@@ -1,12 +1,9 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { notFound } from "next/navigation";
-import { CallsTable } from "@/components/cases/case-calls";
-import { CaseCards } from "@/components/cases/case-cards";
 import { CaseFactSlips, partRows, processRows } from "@/components/cases/case-facts";
 import { CaseHead } from "@/components/cases/case-head";
 import { CaseHistory } from "@/components/cases/case-history";
-import { CaseMoneyTable } from "@/components/cases/case-money";
 import { CaseTrace } from "@/components/cases/case-trace";
 import { LineStrip } from "@/components/line/line-strip";
 import type { MainAction } from "@/components/shell/main-action";
@@ -15,12 +12,10 @@ import { LinkButton } from "@/components/ui/button";
 import { Note } from "@/components/ui/note";
 import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
-import { getCaseMoney } from "@/db/queries/case-costs";
 import { getCaseFacts, type CaseFacts } from "@/db/queries/case-page";
 import type { SignedIn } from "@/db/queries/crew";
 import { CASE_REF_PATTERN } from "@/lib/cases/case-ref";
-import { dayWords } from "@/lib/cases/moment-words";
-import { callWords, counted } from "@/lib/cases/part-words";
+import { callWords } from "@/lib/cases/part-words";
 import { traceWords } from "@/lib/cases/trace-words";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
@@ -28,6 +23,7 @@ import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
 import { CaseDoings } from "./case-doings";
 import { CasePhotos } from "./case-photos";
+import { CaseRecords } from "./case-records";
 import { loadCase, type LoadedCase } from "./load-case";
 
 interface CasePageProps {
@@ -164,47 +160,5 @@ function Crumb({ neighbours }: { neighbours: LoadedCase["neighbours"] }) {
         )}
       </span>
     </nav>
-  );
-}
-
-interface RecordsProps {
-  member: SignedIn;
-  facts: CaseFacts;
-  loaded: LoadedCase;
-}
-
-function CaseRecords({ member, facts, loaded }: RecordsProps) {
-  return (
-    <div className="case-records">
-      <Section title="Calls" aside={counted(loaded.calls.length, "call")}>
-        <CallsTable calls={loaded.calls} caption="Calls on this case" />
-      </Section>
-      <Section title={loaded.cards.length > 1 ? "Rework cards" : "Rework card"}>
-        {loaded.cards.length === 0 ? (
-          <p className="small quiet">No card was sent for this case.</p>
-        ) : (
-          <CaseCards cards={loaded.cards} />
-        )}
-      </Section>
-      {can(member, "money.case") && <MoneySection member={member} facts={facts} />}
-    </div>
-  );
-}
-
-function MoneySection({ member, facts }: Pick<RecordsProps, "member" | "facts">) {
-  const money = getCaseMoney(getDb(), member.shopId, facts.id);
-  if (!money) return null;
-  return (
-    <Section title="Cost" aside={facts.round > 1 ? `${facts.round} rounds` : undefined}>
-      <CaseMoneyTable
-        estimate={money.estimate}
-        recorded={money.recorded}
-        atRisk={money.atRisk}
-        currency={member.shop.currency}
-        quantity={facts.quantity}
-        ratesFrom={dayWords(money.rates.validFromAt, member.shop.timeZone)}
-        assumed={money.assumed}
-      />
-    </Section>
   );
 }

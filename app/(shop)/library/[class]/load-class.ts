@@ -7,7 +7,7 @@ import { countCasesByCause, countCasesByClass, listClassCards } from "@/db/queri
 import { getLibraryClass, type ClassPage } from "@/db/queries/library-class";
 import { listStations } from "@/db/queries/line";
 import { getRatesAt } from "@/db/queries/rates";
-import { listExemplars } from "@/db/queries/second-look";
+import { listExemplars } from "@/db/queries/second-look-against";
 import type { StationKind } from "@/lib/cases/case-words";
 import { standingOf } from "@/lib/library/shelf-words";
 import { byLikelihood, shareHere } from "@/lib/library/shop-share";

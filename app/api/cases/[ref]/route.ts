@@ -1,13 +1,13 @@
 import { z } from "zod";
 import { getCaseMoney } from "@/db/queries/case-costs";
+import { requireCaseFacts } from "@/db/queries/case-page";
 import {
   listCaseCalls,
   listCaseCards,
   listCaseEvents,
   listCaseShots,
   listCaseSolutions,
-  requireCaseFacts,
-} from "@/db/queries/case-page";
+} from "@/db/queries/case-records";
 import { caseRef } from "@/lib/cases/case.schema";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";

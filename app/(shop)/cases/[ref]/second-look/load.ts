@@ -1,7 +1,8 @@
 import { placeholderUrl } from "@/components/photos/placeholder-url";
 import type { AgainstClass, AlikeView } from "@/components/cases/second-look-against";
 import type { Db } from "@/db/open";
-import { listCaseCalls, listCaseShots, listCaseSolutions, type CaseCall, type CaseFacts } from "@/db/queries/case-page";
+import type { CaseFacts } from "@/db/queries/case-page";
+import { listCaseCalls, listCaseShots, listCaseSolutions, type CaseCall } from "@/db/queries/case-records";
 import { listPhotosOfCases } from "@/db/queries/photos";
 import {
   countConfirmed,
@@ -10,7 +11,7 @@ import {
   listExemplars,
   type AlikeCase,
   type ShelfRows,
-} from "@/db/queries/second-look";
+} from "@/db/queries/second-look-against";
 import { chooseClasses } from "@/lib/cases/class-choice";
 import { RELEASE } from "@/lib/cases/second-look-form";
 import { offerForCase } from "@/lib/cases/second-look-offer";
