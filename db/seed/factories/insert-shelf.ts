@@ -47,12 +47,16 @@ export function insertShelf(tx: Handle, shopId: number, shelf: Shelf, now: numbe
     }
     keep("cause", cause.slug, cause);
   }
+  // The shelf names a cause's fixes in the order in which to try them: the part's own card before the tank's.
+  const placed = new Map<string, number>();
   for (const fix of shelf.fixes) {
     const { causeSlugs, ...columns } = fix;
     tx.insert(libraryFixes)
       .values({ shopId, ...columns })
       .run();
-    for (const [position, causeSlug] of causeSlugs.entries()) {
+    for (const causeSlug of causeSlugs) {
+      const position = placed.get(causeSlug) ?? 0;
+      placed.set(causeSlug, position + 1);
       tx.insert(libraryCauseFixes).values({ shopId, causeSlug, fixSlug: fix.slug, position }).run();
     }
     keep("fix", fix.slug, fix);
