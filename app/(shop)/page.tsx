@@ -71,6 +71,13 @@ export default async function TodayPage() {
         <LineChecks member={member} now={now} />
         {!can(member, "case.confirm") && <EyeThisMonth member={member} now={now} />}
       </div>
+      {can(member, "job.keep") && (
+        <p className="mt-6">
+          <Link className="solo" href={routes.jobs()}>
+            The shop’s jobs
+          </Link>
+        </p>
+      )}
     </ShopShell>
   );
 }

@@ -5,6 +5,7 @@ import { FormAnswer } from "@/components/crew/form-answer";
 import { SubmitButton } from "@/components/ui/submit-button";
 import type { ActState } from "@/lib/act-state";
 import { JobCostFields, type JobFigures } from "./job-cost-fields";
+import { useAnswerFocus } from "./use-answer-focus";
 
 export interface JobChangeFormProps {
   /** The thumb bar's button sends it by this id. */
@@ -18,8 +19,9 @@ export interface JobChangeFormProps {
 /** Changes what the prices of a job's later cases rest on. */
 export function JobChangeForm({ id, jobId, figures, currencySign, action }: JobChangeFormProps) {
   const [state, send] = useActionState(action, null);
+  const form = useAnswerFocus(state);
   return (
-    <form className="form" id={id} action={send}>
+    <form className="form" id={id} action={send} ref={form}>
       <FormAnswer state={state} done={{ title: "The job is changed", words: "Cases priced from now on rest on it." }} />
       <input type="hidden" name="jobId" value={jobId} />
       <JobCostFields state={state} figures={figures} currencySign={currencySign} />

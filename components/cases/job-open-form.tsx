@@ -10,6 +10,7 @@ import { fieldFault, typed, type ActState } from "@/lib/act-state";
 import { BASE_METAL_TITLES, BASE_METALS, LIMITS } from "@/lib/cases/case-words";
 import { JOB_LIMITS } from "@/lib/cases/job.schema";
 import { JobCostFields } from "./job-cost-fields";
+import { useAnswerFocus } from "./use-answer-focus";
 
 export interface JobOpenFormProps {
   /** The thumb bar's button sends it by this id. */
@@ -24,8 +25,9 @@ export interface JobOpenFormProps {
 /** Opens a job: whose parts, what they are, what goes on them. */
 export function JobOpenForm({ id, customers, currencySign, onward, action }: JobOpenFormProps) {
   const [state, send] = useActionState(action, null);
+  const form = useAnswerFocus(state);
   return (
-    <form className="form" id={id} action={send}>
+    <form className="form" id={id} action={send} ref={form}>
       {state?.ok ? (
         <Note tone="green" title={`Job ${state.value.number} is open`} role="status">
           <Link className="solo" href={onward.href}>

@@ -10,7 +10,7 @@ export interface JobView {
   metal: string;
   quantity: number;
   layers: string;
-  /** "1 on hold"; empty where none is. */
+  /** How many of its cases hang on hold; empty where none does. */
   held: string;
   /** "$42.00", "not set"; undefined for those who may not see money. */
   value?: string;
@@ -21,45 +21,36 @@ export interface JobView {
 export interface JobTableProps {
   caption: string;
   jobs: readonly JobView[];
-  /** "Change", or "Open again" among the closed. */
-  changeWords: string;
   /** Only what tells jobs apart, beside a form. */
   brief?: boolean;
 }
 
+const NAMES: readonly Column<JobView>[] = [
+  { key: "number", head: "Job", cell: (job) => <JobNumber job={job} /> },
+  { key: "customer", head: "Customer", cell: (job) => <span className="wrap-anywhere">{job.customer}</span> },
+  { key: "part", head: "Part", cell: (job) => <span className="wrap-anywhere">{job.partName}</span> },
+];
+const FACTS: readonly Column<JobView>[] = [
+  { key: "metal", head: "Base metal", cell: (job) => <span className="wrap-anywhere">{job.metal}</span> },
+  { key: "layers", head: "On the strike", cell: (job) => job.layers },
+  { key: "quantity", head: "Parts", numeric: true, cell: (job) => job.quantity },
+];
+const VALUE: Column<JobView> = { key: "value", head: "Value of a part", numeric: true, cell: (job) => job.value };
+const HELD: Column<JobView> = { key: "held", head: "Cases on hold", numeric: true, cell: (job) => job.held };
+
 /** Jobs, one a row. */
-export function JobTable({ caption, jobs, changeWords, brief }: JobTableProps) {
+export function JobTable({ caption, jobs, brief }: JobTableProps) {
   const hasValue = jobs.some((job) => job.value !== undefined);
-  const hasChange = jobs.some((job) => job.changeHref);
-  const names: Column<JobView>[] = [
-    { key: "number", head: "Job", cell: (job) => <strong className="wrap-anywhere">{job.number}</strong> },
-    { key: "customer", head: "Customer", cell: (job) => <span className="wrap-anywhere">{job.customer}</span> },
-    { key: "part", head: "Part", cell: (job) => <span className="wrap-anywhere">{job.partName}</span> },
-  ];
-  const facts: Column<JobView>[] = [
-    { key: "metal", head: "Base metal", cell: (job) => job.metal },
-    { key: "quantity", head: "Parts", numeric: true, cell: (job) => job.quantity },
-    { key: "layers", head: "On the strike", cell: (job) => job.layers },
-    ...(hasValue ? [{ key: "value", head: "Value of a part", numeric: true, cell: (job: JobView) => job.value }] : []),
-    { key: "held", head: "Cases", cell: (job) => job.held },
-    ...(hasChange ? [{ key: "change", head: changeWords, cell: (job: JobView) => changeLink(job, changeWords) }] : []),
-  ];
-  return (
-    <DataTable
-      caption={caption}
-      columns={brief ? names : [...names, ...facts]}
-      rows={jobs}
-      rowKey={(job) => String(job.id)}
-    />
-  );
+  const all = [...NAMES, ...FACTS, ...(hasValue ? [VALUE] : []), HELD];
+  return <DataTable caption={caption} columns={brief ? NAMES : all} rows={jobs} rowKey={(job) => String(job.id)} />;
 }
 
-function changeLink(job: JobView, words: string) {
-  if (!job.changeHref) return null;
+/** For those who may change the job its number is the way there. */
+function JobNumber({ job }: { job: JobView }) {
+  if (!job.changeHref) return <strong className="wrap-anywhere">{job.number}</strong>;
   return (
-    <Link href={job.changeHref}>
-      {words}
-      <span className="sr-only"> {job.number}</span>
+    <Link href={job.changeHref} className="wrap-anywhere">
+      <strong>{job.number}</strong>
     </Link>
   );
 }

@@ -36,8 +36,9 @@ export function ChangeView({ member, job }: { member: SignedIn; job: JobRow }) {
       </Lead>
       {isClosed ? (
         <Section title="Open it again">
-          <p className="prose">Then a snap can name it, and its figures can be changed.</p>
-          <JobTurnForm id={FORM_ID} jobId={job.id} label="Open it again" variant="main" action={reopenJob} />
+          <JobTurnForm id={FORM_ID} jobId={job.id} label="Open it again" variant="main" action={reopenJob}>
+            Then a snap can name it, and its figures can be changed.
+          </JobTurnForm>
         </Section>
       ) : (
         <OpenJob member={member} job={job} />
@@ -63,12 +64,11 @@ function OpenJob({ member, job }: { member: SignedIn; job: JobRow }) {
           A change counts for what is priced from now on. Figures that a case has already stay as they are.
         </Note>
         <Section title="Close the job">
-          <p className="prose">
+          <JobTurnForm jobId={job.id} label="Close the job" variant="plain" action={closeJob}>
             {job.heldCases > 0 &&
               `${counted(job.heldCases, "case")} of it on hold: they stay, and are worked as before. `}
             No snap names a closed job.
-          </p>
-          <JobTurnForm jobId={job.id} label="Close the job" variant="plain" action={closeJob} />
+          </JobTurnForm>
         </Section>
       </div>
     </div>

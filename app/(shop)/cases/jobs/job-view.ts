@@ -20,7 +20,7 @@ export function jobView(job: JobRow, member: SignedIn): JobView {
     metal: metalWords(job.baseMetal, job.alloy),
     quantity: job.quantity,
     layers: layersWords(job.finalStack),
-    held: job.heldCases === 0 ? "" : `${job.heldCases} on hold`,
+    held: job.heldCases === 0 ? "" : String(job.heldCases),
     ...(can(member, "money.case") ? { value } : {}),
     ...(can(member, "job.change")
       ? { changeHref: routes.jobs({ change: String(job.id), ...(closedAt === null ? {} : { closed: "1" }) }) }

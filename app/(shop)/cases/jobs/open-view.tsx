@@ -48,14 +48,11 @@ export function OpenView({ member, isFromSnap }: { member: SignedIn; isFromSnap:
           />
         </Section>
         {newest.length > 0 && (
-          <Section title="Open now" aside="Newest first">
-            <JobTable
-              caption="The newest open jobs"
-              jobs={newest.map((job) => jobView(job, member))}
-              changeWords="Change"
-              brief
-            />
-          </Section>
+          <div>
+            <Section title="Open now" aside="Newest first">
+              <JobTable caption="The newest open jobs" jobs={newest.map((job) => jobView(job, member))} brief />
+            </Section>
+          </div>
         )}
       </div>
     </ShopShell>

@@ -72,6 +72,7 @@ function ListView({ member, isClosed, after }: { member: SignedIn; isClosed: boo
       </Lead>
       {!keeps && <Note title="A plater, a senior tech or the owner opens a job">You can read the list here.</Note>}
       <Section
+        rests={can(member, "job.change") && shown.length > 0 ? numberWords(isClosed) : undefined}
         title={isClosed ? "Closed, the last first" : "Open, newest first"}
         aside={
           <Link className="solo" href={routes.jobs(isClosed ? undefined : { closed: "1" })}>
@@ -89,7 +90,6 @@ function ListView({ member, isClosed, after }: { member: SignedIn; isClosed: boo
           <JobTable
             caption={isClosed ? "Closed jobs, the last closed first" : "Open jobs, newest first"}
             jobs={shown.map((job) => jobView(job, member))}
-            changeWords={isClosed ? "Open again" : "Change"}
           />
         )}
       </Section>
@@ -111,3 +111,8 @@ function leadWords(open: number): string {
   const words = countWords(open);
   return `${words.charAt(0).toUpperCase()}${words.slice(1)} ${open === 1 ? "job is" : "jobs are"} open`;
 }
+
+const numberWords = (isClosed: boolean) =>
+  isClosed
+    ? "A job's number is the way to open it again."
+    : "A job's number is the way to change its figures or close it.";
