@@ -2,15 +2,31 @@ import { CasebookChips, type FilterChip } from "@/components/cases/casebook-chip
 import { LinkButton } from "@/components/ui/button";
 import { Empty } from "@/components/ui/empty";
 import { Note } from "@/components/ui/note";
+import { FILTER_NAMES, type FilterName } from "@/lib/cases/casebook.schema";
 import { dropWords } from "@/lib/cases/casebook-words";
 import { routes } from "@/lib/routes";
 
-/** Names the parts of the address that this shop has nothing for. */
+const FILTER_LABELS: Record<FilterName, string> = {
+  q: "search",
+  class: "class",
+  cause: "cause",
+  station: "station",
+  metal: "base metal",
+  stage: "stage found",
+  customer: "customer",
+  status: "state",
+  by: "person who snapped it",
+  closedFrom: "first day",
+  closedTo: "last day",
+};
+
+/** Names the filters of the address that could not be used. */
 export function LeftOut({ names }: { names: readonly string[] }) {
-  if (names.length === 0) return null;
+  const labels = FILTER_NAMES.filter((name) => names.includes(name)).map((name) => FILTER_LABELS[name]);
+  if (labels.length === 0) return null;
   return (
-    <Note tone="amber" title="Part of this link was left out" className="mt-4">
-      This shop has nothing that fits {names.join(", ")} as the link says it. Choose it anew in the words.
+    <Note tone="amber" title={`The link's ${labels.join(", ")} fits nothing in this shop`} className="mt-4">
+      The list below goes without it. Change the words to choose it anew.
     </Note>
   );
 }
