@@ -35,6 +35,7 @@ export function watchConsole(page: Page): void {
     throw error;
   });
   page.on("console", (message) => {
-    if (message.type() === "error") throw new Error(`Console error on ${page.url()}: ${message.text()} ${message.location().url}`);
+    if (message.type() === "error")
+      throw new Error(`Console error on ${page.url()}: ${message.text()} ${message.location().url}`);
   });
 }
