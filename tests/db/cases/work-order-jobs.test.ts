@@ -112,7 +112,7 @@ describe("the list", () => {
 describe("keeping a job right", () => {
   const change = { quantity: 60, areaDm2: 1.2, partValueCents: 4500, finalStack: [] };
 
-  it("writes what changed into the trail, and leaves priced cases as they were", () => {
+  it("writes what changed into the trail, and rewrites no cost that a case has on record", () => {
     const held = makeCase(db, shop);
     const priceOf = () =>
       db.select({ atRisk: cases.atRiskCents, cost: cases.costCents }).from(cases).where(eq(cases.id, held.id)).get();

@@ -60,8 +60,9 @@ function OpenJob({ member, job }: { member: SignedIn; job: JobRow }) {
         />
       </Section>
       <div>
-        <Note title="Priced cases keep their price">
-          A change counts for what is priced from now on. Figures that a case has already stay as they are.
+        <Note title="Costs on record stay">
+          A change counts for what is priced from now on. A cost that a case has on record is not rewritten; the money
+          at risk on the page of an unfinished case follows the new figures.
         </Note>
         <Section title="Close the job">
           <JobTurnForm jobId={job.id} label="Close the job" variant="plain" action={closeJob}>
