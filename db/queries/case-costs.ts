@@ -30,10 +30,12 @@ export function getCostFacts(
     .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
     .get();
   if (!row) return null;
-  const { finalStack, round, state, openedAt, ...facts } = row;
+  const { finalStack, round, state, openedAt, partValueCents, ...facts } = row;
   const minutes = spentMinutes(db, shopId, caseId);
   return {
     ...facts,
+    // 0: the plater who opened the job did not know it. The estimate then says that scrap risk is left out.
+    partValueCents: partValueCents || null,
     stack: strikeThenPlate(finalStack),
     rounds: round,
     rates: getRatesAt(db, shopId, openedAt),

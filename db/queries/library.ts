@@ -1,4 +1,4 @@
-import { and, asc, count, eq, exists, isNotNull, max, min } from "drizzle-orm";
+import { and, asc, count, eq, exists, isNotNull, max, min, sql } from "drizzle-orm";
 import { BASE_METALS, type BaseMetal, type StationKind } from "@/lib/cases/case-words";
 import type { LibraryEntries } from "@/lib/library/search-documents";
 import type { Handle } from "../open";
@@ -95,7 +95,8 @@ export function listCauseSlugs(db: Handle, shopId: number): Map<string, string[]
     .select({ of: libraryCauseFixes.fixSlug, slug: libraryCauseFixes.causeSlug })
     .from(libraryCauseFixes)
     .where(eq(libraryCauseFixes.shopId, shopId))
-    .orderBy(asc(libraryCauseFixes.fixSlug), asc(libraryCauseFixes.position))
+    // In the order in which the fix names its causes, which is that of the rows.
+    .orderBy(asc(libraryCauseFixes.fixSlug), sql`${libraryCauseFixes}.rowid`)
     .all();
   return gathered(rows);
 }
