@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, gt, lt, or, sql, sum } from "drizzle-orm";
+import { and, asc, count, desc, eq, gt, gte, lt, or, sql, sum } from "drizzle-orm";
 import type { Handle } from "../open";
 import { preparedOnce } from "../prepared";
 import { cases, libraryClasses, workOrders } from "../schema";
@@ -80,6 +80,8 @@ export function listQueue(
         and(
           eq(cases.shopId, sql.placeholder("shopId")),
           eq(cases.state, "held"),
+          // True of every case: it only leads SQLite to the index that stands in the queue's order, so nothing is sorted.
+          gte(cases.atRiskCents, Number.MIN_SAFE_INTEGER),
           stationId === null ? undefined : eq(cases.tracedStationId, sql.placeholder("stationId")),
           after ? behind(placeNamed("after")) : undefined,
           from ? or(eq(cases.id, placeNamed("from").id), behind(placeNamed("from"))) : undefined,
