@@ -1,9 +1,9 @@
 import type { Metadata } from "next";
 import { ReworkTag } from "@/components/cases/rework-tag";
+import { tagPhoto } from "@/components/cases/tag-photo";
 import { TagWire } from "@/components/cases/tag-wire";
 import { LineStrip } from "@/components/line/line-strip";
 import { NarrowedBar } from "@/components/line/narrowed-bar";
-import { placeholderUrl } from "@/components/photos/placeholder-url";
 import { ShopShell } from "@/components/shell/shop-shell";
 import { Empty } from "@/components/ui/empty";
 import { Lead } from "@/components/ui/lead";
@@ -122,13 +122,4 @@ function CardList({ title, cards, photos }: { title: string; cards: Card[]; phot
       </TagWire>
     </Section>
   );
-}
-
-function tagPhoto(photo: CasePhoto | undefined) {
-  if (photo?.state !== "ready") return undefined;
-  return {
-    src: routes.photo(photo.id, "thumb"),
-    alt: "",
-    placeholder: photo.placeholder ? placeholderUrl(photo.placeholder) : undefined,
-  };
 }

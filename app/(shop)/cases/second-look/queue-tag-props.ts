@@ -1,4 +1,4 @@
-import { placeholderUrl } from "@/components/photos/placeholder-url";
+import { tagPhoto } from "@/components/cases/tag-photo";
 import type { CasePhoto } from "@/db/queries/photos";
 import type { SignedIn } from "@/db/queries/crew";
 import type { QueueRow } from "@/db/queries/second-look";
@@ -17,9 +17,6 @@ export function queueTagProps(
     row,
     href: routes.secondLook(row.ref, query),
     stake: can(member, "money.case") ? formatMoney(row.atRiskCents, member.shop.currency, { whole: true }) : undefined,
-    photo:
-      photo?.state === "ready"
-        ? { src: routes.photo(photo.id, "thumb"), alt: "", placeholder: placeholderUrl(photo.placeholder) }
-        : undefined,
+    photo: tagPhoto(photo),
   };
 }
