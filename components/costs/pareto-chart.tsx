@@ -1,6 +1,7 @@
 import type { ReactNode } from "react";
 import { vitalFew, type LedgerRow } from "@/lib/costs/ledger-view";
 import { wrapWords } from "@/lib/costs/wrap-words";
+import { OTHER } from "@/lib/stats/pareto";
 
 interface ParetoChartProps {
   rows: readonly LedgerRow[];
@@ -31,7 +32,14 @@ function StandingPareto({ rows, money, hrefFor, label }: ParetoChartProps) {
   const bars = rows.map((row, index) => {
     const tall = Math.max(4, (room * row.cost) / total);
     const middle = left + index * step + bar / 2;
-    return { row, middle, tall, y: top + room - tall, runningY: top + room * (1 - row.cumulative), isFew: index < few };
+    return {
+      row,
+      middle,
+      tall,
+      y: top + room - tall,
+      runningY: top + room * (1 - row.cumulative),
+      isFew: index < few && row.key !== OTHER,
+    };
   });
   const eighty = top + room * 0.2;
   return (
@@ -127,7 +135,7 @@ function LyingPareto({ rows, money, hrefFor, label }: ParetoChartProps) {
               y={y + 23}
               width={long}
               height="18"
-              fill={barFill(index < few, "pareto-narrow")}
+              fill={barFill(index < few && row.key !== OTHER, "pareto-narrow")}
             />
             <text className="chart-figure" x={long + 8} y={y + 37.5}>
               {money(row.cost)}
