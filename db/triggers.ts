@@ -1,7 +1,15 @@
 import type Database from "better-sqlite3";
 
 /** Tables whose rows are only ever added. */
-const APPEND_ONLY = ["calls", "case_events", "case_costs", "audit_entries", "library_revisions"] as const;
+const APPEND_ONLY = [
+  "calls",
+  "case_events",
+  "case_costs",
+  "audit_entries",
+  "library_revisions",
+  "strip_rows",
+  "part_checks",
+] as const;
 
 const appendOnly = APPEND_ONLY.flatMap((table) =>
   ["update", "delete"].map(

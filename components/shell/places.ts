@@ -20,7 +20,7 @@ export const PLACES = [
     glyph: "ui-eye",
     roles: ["senior", "owner"],
   },
-  { slug: "rework", title: "Rework", href: "/cases/rework", glyph: "ui-again", roles: ["plater", "senior"] },
+  { slug: "rework", title: "Rework", href: "/cases/rework", glyph: "ui-again", roles: ["plater", "senior", "owner"] },
   {
     slug: "casebook",
     title: "Casebook",
@@ -35,6 +35,7 @@ export const PLACES = [
     glyph: "ui-library",
     roles: ["plater", "trainee", "senior", "owner"],
   },
+  { slug: "strip", title: "Strip", href: "/costs/strip", glyph: "station-strike", roles: ["senior", "owner"] },
   { slug: "ledger", title: "Ledger", href: "/costs", glyph: "ui-money", roles: ["owner"] },
   { slug: "crew", title: "Crew", href: "/crew", glyph: "ui-crew", roles: ["owner"] },
 ] as const satisfies readonly PlaceEntry[];

@@ -13,6 +13,7 @@ import {
 import { BASE_METALS, CLOSINGS, DISPOSITIONS, METHODS, OUTCOMES, STAGES_FOUND } from "@/lib/cases/case-words";
 import type { Sureness, Symptom } from "@/lib/cases/case-words";
 import { CASE_EVENTS, CASE_STATES } from "@/lib/cases/case-state";
+import { STRIP_METHODS } from "@/lib/costs/strip-methods";
 import { moment, ownerShopId, rowId } from "./columns";
 import { members } from "./crew";
 import { libraryCauses, libraryClasses, libraryFixes } from "./library";
@@ -82,6 +83,8 @@ export const cases = sqliteTable(
     selfConfirmed: integer("self_confirmed", { mode: "boolean" }).notNull().default(false),
     disposition: text("disposition", { enum: DISPOSITIONS }),
     closedAt: moment("closed_at"),
+    /** The way to take the deposit off that a senior chose on the strip estimator. Null: the cheapest that is safe. */
+    stripMethod: text("strip_method", { enum: STRIP_METHODS }),
 
     /** What it is likely to cost if it goes on and fails later. Orders the queue. */
     atRiskCents: integer("at_risk_cents").notNull(),

@@ -25,6 +25,8 @@ export const shops = sqliteTable(
       .default("metric"),
     /** True for the invented demo shops: screens say so. */
     isDemo: integer("is_demo", { mode: "boolean" }).notNull().default(false),
+    /** The version of the cost estimate that the shop's cases were last priced with; see `lib/costs/cost-model.ts`. */
+    costModel: integer("cost_model").notNull().default(0),
     /** Next running number per year-month lives in `case_numbers`. */
     createdAt: moment("created_at").notNull(),
   },

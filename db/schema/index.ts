@@ -5,4 +5,5 @@ export * from "./library";
 export * from "./cases";
 export * from "./photos";
 export * from "./costs";
+export * from "./metals";
 export * from "./server";
