@@ -9,6 +9,7 @@ const APPEND_ONLY = [
   "library_revisions",
   "strip_rows",
   "part_checks",
+  "practice_answers",
 ] as const;
 
 const appendOnly = APPEND_ONLY.flatMap((table) =>

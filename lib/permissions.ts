@@ -18,6 +18,9 @@ export const PERMISSIONS = [
   "photo.withdraw",
   "library.see",
   "library.edit",
+  "practice.do",
+  "drill.set",
+  "search.keep",
   "line.see",
   "line.log",
   "part.check",
@@ -58,6 +61,10 @@ export const MATRIX = {
   "photo.withdraw": { plater: "own", trainee: "own", senior: "own", owner: "own" },
   "library.see": { plater: "any", trainee: "any", senior: "any", owner: "any" },
   "library.edit": { plater: "no", trainee: "no", senior: "any", owner: "any" },
+  // One's own questions and answers only; how others do is "agreement.see".
+  "practice.do": { plater: "own", trainee: "own", senior: "own", owner: "own" },
+  "drill.set": { plater: "no", trainee: "no", senior: "any", owner: "any" },
+  "search.keep": { plater: "own", trainee: "own", senior: "own", owner: "own" },
   "line.see": { plater: "any", trainee: "any", senior: "any", owner: "any" },
   "line.log": { plater: "any", trainee: "any", senior: "any", owner: "any" },
   // Weighing a part: a plater must be able to find out at the tank that the job card is wrong.

@@ -6,4 +6,5 @@ export * from "./cases";
 export * from "./photos";
 export * from "./costs";
 export * from "./metals";
+export * from "./practice";
 export * from "./server";

@@ -146,8 +146,13 @@ export const libraryRevisions = sqliteTable(
     entry: text("entry", { enum: ["class", "cause", "fix", "caution", "source"] }).notNull(),
     slug: text("slug").notNull(),
     revision: integer("revision").notNull(),
-    state: text("state", { enum: ["draft", "published"] }).notNull(),
+    /** Removed: its last words, kept so that it can be brought back. */
+    state: text("state", { enum: ["draft", "published", "removed"] }).notNull(),
     body: text("body", { mode: "json" }).$type<Record<string, unknown>>().notNull(),
+    /** The published revision that the editor began from; null for the shelf's own and for a new entry. */
+    baseRevision: integer("base_revision"),
+    /** Why, in the editor's words. */
+    note: text("note").notNull().default(""),
     /** Null: the shelf that the shop began with. */
     memberId: integer("member_id"),
     at: moment("at").notNull(),
