@@ -12,6 +12,7 @@ import { ACTOR, STATIONS } from "./fixtures";
 import { GlyphShelf } from "./glyph-shelf";
 import { NotThereShelf } from "./not-there-shelf";
 import { TagCards, TagForms, TagLists } from "./tag-shelf";
+import { WorthShelf } from "./worth-shelf";
 
 export const metadata: Metadata = { title: "Parts and states", robots: { index: false } };
 
@@ -56,6 +57,7 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <FieldShelf />
       <FigureShelf />
       <TableShelf />
+      <WorthShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">
           <LineStrip mode="thin" stations={STATIONS} pressed="activate" hrefFor={hrefFor} label="Thin line" />
