@@ -1,11 +1,12 @@
 /**
- * What a shop would type, and the class (and, where the words name it, the cause) that should come up.
- * Written before the search was tuned. `plain`: spelt as in a book. `slang`: shop talk. `typo`: misspelt.
+ * What a shop would type, and the class, cause or fix that should come up: a cause or fix where the words name one.
+ * Written before the search was tuned, and before the fixes of the second half were written. `plain`: spelt as in a
+ * book. `slang`: shop talk. `typo`: misspelt.
  */
 export interface SearchPhrase {
   typed: string;
   kind: "plain" | "slang" | "typo";
-  finds: { class: string } | { cause: string };
+  finds: { class: string } | { cause: string } | { fix: string };
 }
 
 const plain = (typed: string, finds: SearchPhrase["finds"]): SearchPhrase => ({ typed, kind: "plain", finds });
@@ -96,6 +97,161 @@ export const SEARCH_PHRASES: SearchPhrase[] = [
   typo("glov smuge", { class: "handling" }),
   plain("no fault", { class: "sound" }),
   slang("good copper", { class: "sound" }),
+
+  // dewetting: causes and fixes
+  slang("water runs off it like a duck", { class: "dewetting" }),
+  typo("oill slik on the rince", { cause: "oil-skin" }),
+  typo("tripolli stuck in the corners", { cause: "buffing-compound-left" }),
+  slang("clear coated brass from the customer", { cause: "silicone-or-lacquer" }),
+  plain("white film after the acid rinse", { cause: "soap-set-by-acid" }),
+  slang("blower throwing oil", { cause: "strike-organics" }),
+  slang("soap tank is shot", { cause: "cleaner-spent" }),
+  plain("carbon treat the strike", { fix: "carbon-treat-strike" }),
+  typo("clean it agian from the start", { fix: "reclean-from-start" }),
+  plain("make up new cleaner", { fix: "renew-cleaner" }),
+  slang("skim the tanks", { fix: "clear-oil-skin" }),
+  typo("brush the compund out of the leters", { fix: "dig-out-compound" }),
+  typo("laquer striper", { fix: "strip-silicone-or-lacquer" }),
+  plain("warm rinse before the acid", { fix: "rinse-soap-before-acid" }),
+  // underactivation: causes and fixes
+  slang("copper came up like fog", { class: "underactivation" }),
+  typo("actavator is ded", { cause: "activator-spent" }),
+  slang("yanked it out of the pickle early", { cause: "activator-dwell-short" }),
+  typo("sulfric on stanless", { cause: "activator-wrong" }),
+  slang("went dull walking it to the strike", { cause: "repassivated-in-transfer" }),
+  typo("heet treat scail", { cause: "scale-left" }),
+  slang("no juice at the bar", { cause: "strike-voltage-low" }),
+  plain("tarnish left on sterling", { cause: "silver-tarnish-left" }),
+  slang("fire scale on silver", { cause: "silver-tarnish-left" }),
+  plain("brush activation with the wrong polarity", { cause: "brush-activation-off" }),
+  plain("woods strike for 316", { fix: "right-route-stainless-nickel" }),
+  plain("304", { fix: "right-route-stainless-nickel" }),
+  slang("german silver won't take", { fix: "nickel-silver-route" }),
+  typo("nickle sliver", { fix: "nickel-silver-route" }),
+  typo("berylium coper black oxide", { fix: "beryllium-copper-oxide" }),
+  plain("C954 aluminium bronze", { fix: "aluminium-bronze-route" }),
+  typo("zincat 6061 twise", { fix: "double-zincate" }),
+  slang("dump the old acid and date it", { fix: "change-activator" }),
+  typo("longger in the acid", { fix: "longer-dwell" }),
+  plain("cut the time between acid and strike", { fix: "cut-the-walk" }),
+  typo("descail weldments", { fix: "descale-and-restart" }),
+  slang("anodes went dead", { fix: "wake-the-anodes" }),
+  slang("rub it with pumice and dip again", { fix: "rinse-twice-reactivate" }),
+  // overactivation: causes and fixes
+  slang("forgot it in the pickle", { cause: "activator-dwell-long" }),
+  typo("acid to storng", { cause: "activator-strong-or-warm" }),
+  slang("tool steel came out black", { cause: "carbon-smut" }),
+  plain("4140", { cause: "carbon-smut" }),
+  plain("C360", { cause: "leaded-alloy-smut" }),
+  typo("zamack blak from acid", { cause: "zinc-or-aluminium-attacked" }),
+  slang("nail turns red in the acid", { cause: "activator-copper-loaded" }),
+  slang("pewter turned grey", { cause: "pewter-darkened" }),
+  typo("pewtar in hot cleener", { cause: "pewter-darkened" }),
+  plain("cathodic cleaner plates a film", { cause: "cleaner-plated-film" }),
+  slang("303 smut", { fix: "sulfur-stainless-smut" }),
+  plain("fluoboric acid for leaded brass", { fix: "fluoboric-for-leaded" }),
+  slang("leaded brass and no fluoride in the shop", { fix: "msa-for-leaded" }),
+  typo("desmutt high carbn steel", { fix: "desmut-carbon-anodic" }),
+  slang("pot metal gentle acid", { fix: "gentle-zinc-route" }),
+  plain("zamak", { fix: "gentle-zinc-route" }),
+  typo("biflouride desmut A380", { fix: "fluoride-desmut-aluminium" }),
+  slang("water down the pickle", { fix: "correct-activator-strength" }),
+  plain("scrub the smut off before the strike", { fix: "wipe-smut-wet" }),
+  // water spots: causes and fixes
+  slang("hung up too long between tanks", { cause: "dried-between-tanks" }),
+  typo("calsium in the water", { cause: "rinse-water-hard" }),
+  slang("rinse is soup", { cause: "rinse-dirty" }),
+  typo("cleener baked on", { cause: "cleaner-dried-on" }),
+  typo("plastisole crack drips", { cause: "drip-from-rack" }),
+  slang("left to drip dry on the bench", { cause: "struck-part-dried-slowly" }),
+  typo("DI watter last rinse", { fix: "purify-last-rinse" }),
+  plain("counterflow rinse", { fix: "rinse-flow-and-count" }),
+  slang("mist it between tanks", { fix: "keep-it-wet" }),
+  typo("recoat the rak", { fix: "mend-rack-drips" }),
+  plain("precipitated chalk", { fix: "wipe-and-redry" }),
+  // oxidation: causes and fixes
+  slang("turned like an old penny", { class: "oxidation" }),
+  slang("sat over the weekend", { cause: "strike-left-standing" }),
+  typo("flashrust on 1018", { cause: "flash-rust" }),
+  typo("pinhole russt thin strik", { cause: "strike-thin-or-porous" }),
+  slang("oven cooked the copper", { cause: "hot-rinse-or-dryer" }),
+  typo("livver of sulfer nearby", { cause: "fumes-in-the-shop" }),
+  plain("chloride left on after the acid", { cause: "acid-left-under-copper" }),
+  plain("weak acid dip for light tarnish", { fix: "weak-acid-revive" }),
+  typo("persulfait strip", { fix: "strip-copper-off-steel" }),
+  plain("thicker strike", { fix: "thicker-strike" }),
+  slang("bag the parts and note the hour", { fix: "cool-dry-or-keep-wet" }),
+  // burning: causes and fixes
+  slang("cooked the corners", { class: "burning" }),
+  typo("anode to close", { cause: "anode-too-close" }),
+  slang("somebody cranked the rectifier", { cause: "strike-voltage-high" }),
+  typo("free cyinide high", { cause: "bath-lean-or-cold" }),
+  slang("air is off in the strike", { cause: "agitation-stopped" }),
+  plain("carbonate too high", { cause: "carbonate-high" }),
+  typo("freez out carbonates", { fix: "freeze-out-carbonate" }),
+  plain("calcium treatment for a potassium strike", { fix: "calcium-treat-carbonate" }),
+  slang("robber wire on the points", { fix: "shield-and-rob" }),
+  typo("anode rap dry brush", { fix: "brush-cover-and-flow" }),
+  slang("brush ran out of solution", { cause: "brush-solution-spent" }),
+  plain("set the amps by area", { fix: "set-current-by-area" }),
+  // no deposit: causes and fixes
+  typo("lose hook bad conntact", { cause: "contact-poor" }),
+  slang("can't throw down the bore", { cause: "recess-shielded" }),
+  plain("air pocket in the cup", { cause: "gas-or-air-trapped" }),
+  slang("masking tape goo", { cause: "stop-off-residue" }),
+  slang("chrome got in the strike", { cause: "chromium-dragged-in" }),
+  slang("skips on the solder joint", { cause: "solder-not-activated" }),
+  typo("hydrosulfite for hex crome", { fix: "reduce-chromium" }),
+  plain("auxiliary anode for a deep recess", { fix: "fit-inner-anode" }),
+  slang("strip the rack tips", { fix: "restore-contacts" }),
+  // peeling: causes and fixes
+  typo("peals off 304 staneless", { cause: "passive-base-no-nickel-strike" }),
+  plain("6061 blisters after zincate", { cause: "zincate-poor" }),
+  slang("rack fell off the bar and went back on", { cause: "current-interrupted" }),
+  slang("replated over old chrome", { cause: "old-plate-left" }),
+  typo("pot mettal bubles", { cause: "zinc-casting-skin-trapped" }),
+  plain("hydrogen blisters on spring steel", { cause: "hydrogen-in-steel" }),
+  slang("bake the springs", { fix: "bake-and-recheck" }),
+  typo("strip krome off", { fix: "strip-old-chromium" }),
+  plain("refresh the woods bath", { fix: "woods-bath-restore" }),
+  // immersion deposit: causes and fixes
+  slang("blue bath straight on steel", { cause: "acid-copper-direct" }),
+  typo("free cianide low", { cause: "free-cyanide-low" }),
+  slang("went in dead", { cause: "dead-entry" }),
+  typo("pyro fosfate ratio", { cause: "noncyanide-strike-ratio" }),
+  slang("go in hot", { fix: "fix-live-entry" }),
+  plain("add cyanide to the strike", { fix: "restore-free-cyanide" }),
+  plain("brush copper on steel preplate", { fix: "brush-preplate-first" }),
+  // bleed-out: causes and fixes
+  slang("hollow handle pukes acid", { cause: "seam-holds-solution" }),
+  typo("porus casting", { cause: "casting-porous" }),
+  slang("tapped hole full of acid", { cause: "hole-not-drained" }),
+  slang("buffed through the skin", { cause: "skin-polished-through" }),
+  plain("leaking under the mask", { cause: "mask-holds-solution" }),
+  typo("vacum impregnate", { fix: "seal-before-plating" }),
+  plain("drill a drain hole", { fix: "drain-holes-agreed" }),
+  // pitting: causes and fixes
+  typo("sedement in strike", { cause: "particles-in-strike" }),
+  plain("casting pits under the copper", { cause: "base-metal-pits" }),
+  slang("hydrogen tails", { cause: "gas-pits" }),
+  typo("cloride pits", { cause: "acid-pitted-base" }),
+  slang("bag the anodes", { fix: "filter-and-bag" }),
+  typo("weting agent", { fix: "free-the-gas" }),
+  // handling: causes and fixes
+  slang("greasy mitts", { cause: "bare-hand-touch" }),
+  typo("powderd gloves", { cause: "dirty-glove" }),
+  slang("jig left a witness", { cause: "rack-mark" }),
+  slang("banged together in the bin", { cause: "knocked-or-stacked" }),
+  typo("tray linors", { fix: "glove-and-tray-rule" }),
+  // sound
+  slang("looks like a new penny", { class: "sound" }),
+  slang("nothing the matter with it", { class: "sound" }),
+  typo("no falt", { class: "sound" }),
+  // found after the final plate
+  plain("strip nickel off steel", { fix: "strip-final-plate-steel" }),
+  slang("pull the nickel off brass", { fix: "strip-final-plate-copper-alloy" }),
+  typo("stripp zamak nickle", { fix: "strip-final-plate-zinc" }),
+  plain("gold is cloudy, strip only the gold", { fix: "strip-gold-keep-nickel" }),
 ];
 
 /**
