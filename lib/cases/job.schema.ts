@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { strikeThenPlate } from "@/lib/costs/case-stack";
-import { readDecimal } from "@/lib/costs/rates.schema";
 import { REWORK_LIMITS } from "@/lib/costs/rework-input";
+import { NOT_A_NUMBER, readDecimal } from "@/lib/decimal";
 import { InputError } from "@/lib/input-error";
 import { checkStack, STACK_LIMITS, type Layer } from "@/lib/plating/deposit-stack";
 import { DEPOSIT_METALS, metalOf } from "@/lib/plating/metals";
@@ -15,8 +15,6 @@ type LayerPlace = (typeof LAYER_PLACES)[number];
 
 export const layerMetalName = (place: LayerPlace) => `layer${place}Metal` as const;
 export const layerThicknessName = (place: LayerPlace) => `layer${place}Um` as const;
-
-const NOT_A_NUMBER = "Write a number such as 4 or 4.5, without spaces or a thousands mark.";
 
 const words = (what: string, most: number) =>
   z

@@ -1,17 +1,10 @@
 import { z } from "zod";
 import { priceFieldName, priceUnit, recoveredFieldName, type RateFigures } from "@/lib/costs/rate-fields";
 import { HIGHEST_RATE_CENTS } from "@/lib/costs/rates";
+import { readDecimal } from "@/lib/decimal";
 import { DEPOSIT_METALS } from "@/lib/plating/metals";
 
 export const RATES_LIMITS = { sourceChars: 240 } as const;
-
-/** At most nine digits before the mark and four after it. A comma before three digits could be either, so it is neither. */
-const DECIMAL = /^\d{1,9}(?:\.\d{1,4}|,(?!\d{3}$)\d{1,4})?$/;
-
-/** A typed decimal number, with a point or a comma; undefined when it is none. */
-export function readDecimal(typed: string): number | undefined {
-  return DECIMAL.test(typed) ? Number(typed.replace(",", ".")) : undefined;
-}
 
 const NOT_A_NUMBER = "Write a number such as 56 or 56.50, without spaces or a thousands mark.";
 const MOST = HIGHEST_RATE_CENTS / 100;

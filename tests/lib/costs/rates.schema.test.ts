@@ -1,9 +1,10 @@
 /** Expected amounts are plain arithmetic: $18.00 a kilogram is 1,800 cents over 1,000 grams. */
 import { describe, expect, it } from "vitest";
 import { fieldText, RATE_FIELDS, rateChanges, rateWords } from "@/lib/costs/rate-fields";
-import { ratesInput, readDecimal } from "@/lib/costs/rates.schema";
+import { ratesInput } from "@/lib/costs/rates.schema";
 import { ratesStory } from "@/lib/costs/rates-story";
 import { STARTING_RATES } from "@/lib/costs/starting-rates";
+import { readDecimal } from "@/lib/decimal";
 import { readForm } from "@/lib/server/form";
 import { ratesForm } from "@/tests/fixtures/rates-form";
 
