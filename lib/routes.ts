@@ -33,6 +33,7 @@ export const routes = {
   strip: (query?: Record<string, string>) => withQuery("/costs/strip", query),
   stripWays: () => "/costs/strip/ways",
   partCheck: (query?: Record<string, string>) => withQuery("/metals/check", query),
+  metalRoutes: () => "/library/metals",
   metalRoute: (metal: string) => `/library/metals/${metal}`,
   crew: () => "/crew",
   audit: () => "/crew/audit",

@@ -75,22 +75,26 @@ export const brass: WrittenRoute = {
   },
   watchOuts: [
     {
+      classSlug: "peeling",
       title: "Lead smut",
       words: "Grey on a white cloth after the dip. Sulfuric and hydrochloric do not take it; fluoboric does.",
       source: "trade column, leaded brass",
     },
     {
+      classSlug: "overactivation",
       title: "Zinc goes first",
       words:
         "Strong or long acid leaves a red, spongy copper face. Plate holds to it and it does not hold to the part.",
       source: COMMON,
     },
     {
+      classSlug: "oxidation",
       title: "Tarnishes in air",
       words: "Minutes after the dip it yellows. Keep it wet, go at once.",
       source: `${COMMON}; time ${MEMORY}`,
     },
     {
+      classSlug: "immersion-deposit",
       title: "Copper in the acid",
       words: "An old dip plates red copper on by itself. Change it by parts run, not by colour.",
       source: COMMON,

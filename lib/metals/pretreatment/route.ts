@@ -38,6 +38,8 @@ export interface Verdicts {
 }
 
 export interface WatchOut {
+  /** The fault it ends in when nobody watches. */
+  classSlug: ShelfClass;
   title: string;
   words: string;
   source: string;

@@ -106,21 +106,25 @@ export const steel: WrittenRoute = {
   },
   watchOuts: [
     {
+      classSlug: "oxidation",
       title: "It rusts in the walk",
       words: "Wet bare steel flashes brown in a minute or two. No stop between acid and strike.",
       source: `${COMMON}; time ${MEMORY}`,
     },
     {
+      classSlug: "overactivation",
       title: "Acid smut",
       words: "Too long in acid leaves carbon on the face. Wipe with a white cloth before the strike.",
       source: COMMON,
     },
     {
+      classSlug: "peeling",
       title: "Hydrogen",
       words: "Acid and cathodic current put it in. Ask the strength before the first dip.",
       source: "ASTM B850",
     },
     {
+      classSlug: "immersion-deposit",
       title: "No acid copper first",
       words: "An immersion deposit wipes off with a thumb.",
       source: "Guidebook, copper",

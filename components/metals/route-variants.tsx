@@ -1,0 +1,23 @@
+import { StepColumn } from "@/components/metals/step-column";
+import { Caution } from "@/components/ui/caution";
+import type { RouteVariant } from "@/lib/metals/pretreatment/route";
+
+/** The same metal in another form: what is done otherwise, with its own cautions. */
+export function RouteVariants({ variants }: { variants: readonly RouteVariant[] }) {
+  return variants.map((variant) => (
+    <article key={variant.title} className="route-variant">
+      <h3>If it is {lowerFirst(variant.title)}</h3>
+      <p>{variant.words}</p>
+      {variant.cautions.map((caution) => (
+        <Caution key={caution.text} level={caution.level}>
+          {caution.text}
+        </Caution>
+      ))}
+      {variant.steps.length > 0 && <StepColumn steps={variant.steps} label={`What differs for ${variant.title}`} />}
+      <p className="route-source">Source: {variant.source}</p>
+    </article>
+  ));
+}
+
+/** "High-strength steel" inside a sentence; an alloy's number or a 400-series keeps its letters. */
+const lowerFirst = (words: string) => words.charAt(0).toLowerCase() + words.slice(1);
