@@ -3,7 +3,7 @@ import type { CheckedRework } from "@/lib/costs/rework-input";
 import { tallyTerms, type AllowedPlan, type NamedRange, type Tally } from "@/lib/costs/rework-tally";
 import { COST_LINE_KEYS, COST_LINES, lostShare, type CostLine } from "@/lib/costs/rework-terms";
 import type { StripMethod } from "@/lib/costs/strip-methods";
-import { cautionsFor, sourcesFor } from "@/lib/costs/strip-plan";
+import { cautionsFor, sourcesFor, type StripStep } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
 import { splitCents } from "@/lib/money";
 import type { Layer } from "@/lib/plating/deposit-stack";
@@ -29,6 +29,8 @@ export interface ReworkEstimate {
   /** What widens the range most, widest first: names, and each with its share of the variance. */
   widest: string[];
   spread: { name: string; share: number }[];
+  /** How each layer comes off, from the top one down. */
+  steps: readonly StripStep[];
   cautions: string[];
   sources: string[];
   /** What was assumed because nobody said. */
@@ -39,7 +41,10 @@ export interface ReworkEstimate {
 export const NO_PART_VALUE = "No part value given: scrap risk is left out.";
 
 /** The figures of one way, without the words: what is compared, summed and stored. */
-export type ReworkFigures = Omit<ReworkEstimate, "widest" | "spread" | "cautions" | "sources" | "assumed"> & {
+export type ReworkFigures = Omit<
+  ReworkEstimate,
+  "widest" | "spread" | "steps" | "cautions" | "sources" | "assumed"
+> & {
   /** Least and most cents of each uncertain thing. */
   ranges: NamedRange[];
 };
@@ -79,6 +84,7 @@ export function describeEstimate(facts: CheckedRework, plan: AllowedPlan, figure
     ...rest,
     widest: spread.filter(({ share }) => share >= LEAST_NAMED_SHARE).map(({ name }) => name),
     spread,
+    steps: plan.steps,
     cautions: cautionsFor(plan.steps, facts.baseMetal, facts.stageFound),
     sources: [...sourcesFor(plan.steps), facts.times.source],
     assumed: facts.partValueStated ? [] : [NO_PART_VALUE],

@@ -1,14 +1,15 @@
 import { describeEstimate, planFigures, type ReworkEstimate, type ReworkFigures } from "@/lib/costs/estimate-plan";
 import { checkReworkInput, type CheckedRework, type ReworkInput } from "@/lib/costs/rework-input";
 import type { AllowedPlan } from "@/lib/costs/rework-tally";
-import { STRIP_METHODS, type StripMethod } from "@/lib/costs/strip-methods";
+import { STRIP_METHODS, type DissolvingRow, type StripMethod } from "@/lib/costs/strip-methods";
 import { planStrip, type StripPlan } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
+import type { Layer } from "@/lib/plating/deposit-stack";
 
 /** One way to take the deposit off: with its estimate, or refused with the reason. */
 export type MethodOption =
   | { method: StripMethod; allowed: true; estimate: ReworkEstimate }
-  | { method: StripMethod; allowed: false; why: string };
+  | { method: StripMethod; allowed: false; why: string; layer: Layer; refusedRow?: DissolvingRow };
 
 /**
  * What it costs to put a batch right at the stage at which the fault was found: labour, line time, metal written off and

@@ -14,9 +14,10 @@ import { metalOf, type DepositMetal } from "@/lib/plating/metals";
 export type StripStep =
   { kind: "dissolve"; layer: Layer; row: DissolvingRow } | { kind: "polish"; layer: Layer; row: PolishingRow };
 
-/** The whole stack by one method, from the top layer down, or why not. */
+/** The whole stack by one method, from the top layer down, or why not: at which layer, and for which bath. */
 export type StripPlan =
-  { allowed: true; method: StripMethod; steps: StripStep[] } | { allowed: false; method: StripMethod; why: string };
+  | { allowed: true; method: StripMethod; steps: StripStep[] }
+  | { allowed: false; method: StripMethod; why: string; layer: Layer; refusedRow?: DissolvingRow };
 
 /** The strips to plan with: the shop's own table, or the one that ships. */
 export interface StripTable {
@@ -52,13 +53,13 @@ export function planStrip(
     } else if (dissolved > 0 && index === 0 && layer.thicknessUm <= THICKEST_STRIKE_UM) {
       steps.push({ kind: "polish", layer, row: table.polishing });
     } else {
-      return { allowed: false, method, why: choice.why };
+      return { allowed: false, method, why: choice.why, layer, refusedRow: choice.refusedRow };
     }
   }
   return { allowed: true, method, steps };
 }
 
-type BathChoice = { row: DissolvingRow } | { row?: undefined; why: string };
+type BathChoice = { row: DissolvingRow } | { row?: undefined; why: string; refusedRow?: DissolvingRow };
 
 function chooseBath(
   method: "chemical" | "electrolytic",
@@ -67,22 +68,31 @@ function chooseBath(
   beneath: DepositMetal | undefined,
   table: StripTable,
 ): BathChoice {
-  let why: string | undefined;
+  let refused: { why: string; refusedRow: DissolvingRow } | undefined;
   for (const row of table.dissolving) {
     if (row.method !== method || !row.takesOff.includes(layer.metal)) continue;
-    const attack = row.attacks[baseMetal];
-    if (attack !== undefined) {
-      why ??= `It attacks ${nameOf(baseMetal)}. ${attack}`;
-    } else if (!row.safeOn.includes(baseMetal)) {
-      why ??= `Nobody vouches for it on ${nameOf(baseMetal)}. Try it on a scrap piece, or ask the supplier.`;
-    } else if (row.needsBeneath !== undefined && row.needsBeneath !== beneath) {
-      why ??= `It works only where ${metalOf(row.needsBeneath).name} lies right beneath the ${metalOf(layer.metal).name}.`;
-    } else {
-      return { row };
-    }
+    const why = whyNot(row, baseMetal, layer, beneath);
+    if (why === undefined) return { row };
+    refused ??= { why, refusedRow: row };
   }
   const title = STRIP_METHOD_TITLES[method].toLowerCase();
-  return { why: why ?? `No ${title} bath for ${metalOf(layer.metal).name} is in the table.` };
+  return refused ?? { why: `No ${title} bath for ${metalOf(layer.metal).name} is in the table.` };
+}
+
+/** Why this bath is not taken for this layer on this base metal; undefined: it is. */
+function whyNot(
+  row: DissolvingRow,
+  baseMetal: BaseMetal,
+  layer: Layer,
+  beneath: DepositMetal | undefined,
+): string | undefined {
+  const attack = row.attacks[baseMetal];
+  if (attack !== undefined) return `It attacks ${nameOf(baseMetal)}. ${attack}`;
+  if (!row.safeOn.includes(baseMetal))
+    return `Nobody vouches for it on ${nameOf(baseMetal)}. Try it on a scrap piece, or ask the supplier.`;
+  if (row.needsBeneath !== undefined && row.needsBeneath !== beneath)
+    return `It works only where ${metalOf(row.needsBeneath).name} lies right beneath the ${metalOf(layer.metal).name}.`;
+  return undefined;
 }
 
 function nameOf(baseMetal: BaseMetal): string {
