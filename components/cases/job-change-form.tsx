@@ -22,7 +22,7 @@ export function JobChangeForm({ id, jobId, figures, currencySign, action }: JobC
   const form = useAnswerFocus(state);
   return (
     <form className="form" id={id} action={send} ref={form}>
-      <FormAnswer state={state} done={{ title: "The job is changed", words: "Cases priced from now on rest on it." }} />
+      <FormAnswer state={state} done={{ title: "The job is changed", words: "Its open cases are priced again." }} />
       <input type="hidden" name="jobId" value={jobId} />
       <JobCostFields state={state} figures={figures} currencySign={currencySign} />
       <div className="desk-only">

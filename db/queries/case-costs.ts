@@ -2,16 +2,27 @@ import { and, asc, desc, eq, isNotNull, sql } from "drizzle-orm";
 import type { CaseCostInput } from "@/lib/costs/case-cost";
 import { moneyAtRisk } from "@/lib/costs/case-cost";
 import { strikeThenPlate } from "@/lib/costs/case-stack";
+import { NO_CORRECTIONS, type MinutesCorrections } from "@/lib/costs/estimate-record";
+import { methodRefusal } from "@/lib/costs/method-refusal";
 import type { Handle } from "../open";
-import { caseCosts, cases, reworkCards, reworkSteps, workOrders } from "../schema";
-import { getRatesAt, type DatedRates } from "./rates";
+import { caseCosts, cases, reworkCards, reworkSteps, standingClass, workOrders } from "../schema";
+import { openPriceBook, type PriceBook } from "./price-book";
+import type { DatedRates } from "./rates";
 
-/** What the cost of a case rests on: its facts, the rates of its day, and the minutes that its cards recorded. */
+/** What the cost of a case rests on, as `caseCost` takes it, with the corrections by method. */
+export type CostFacts = CaseCostInput & { rates: DatedRates; minutesCorrection: MinutesCorrections };
+
+/**
+ * What the cost of a case rests on: its facts, the rates and the ways to strip of its day, what the shop's own record
+ * corrects its minutes by, and the minutes that its cards recorded.
+ * @param book the shop's price book, where many cases are priced in one go
+ */
 export function getCostFacts(
   db: Handle,
   shopId: number,
   caseId: number,
-): (CaseCostInput & { rates: DatedRates }) | null {
+  book: PriceBook = openPriceBook(db, shopId),
+): CostFacts | null {
   const row = db
     .select({
       quantity: cases.quantity,
@@ -24,22 +35,33 @@ export function getCostFacts(
       state: cases.state,
       closing: cases.closing,
       openedAt: cases.openedAt,
+      stripMethod: cases.stripMethod,
+      classSlug: standingClass(cases),
     })
     .from(cases)
     .innerJoin(workOrders, and(eq(workOrders.shopId, cases.shopId), eq(workOrders.id, cases.workOrderId)))
     .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
     .get();
   if (!row) return null;
-  const { finalStack, round, state, openedAt, partValueCents, ...facts } = row;
+  const { finalStack, round, state, openedAt, partValueCents, stripMethod, classSlug, ...facts } = row;
+  const isClosed = state === "closed";
   const minutes = spentMinutes(db, shopId, caseId);
+  const stack = strikeThenPlate(finalStack);
+  const table = book.stripTableAt(openedAt);
+  const part = { baseMetal: facts.baseMetal, stageFound: facts.stageFound, stack, table };
   return {
     ...facts,
     // 0: the plater who opened the job did not know it. The estimate then says that scrap risk is left out.
     partValueCents: partValueCents || null,
-    stack: strikeThenPlate(finalStack),
+    stack,
+    table,
+    // A choice that is no longer safe, because a fact of the part was corrected, falls back to the cheapest that is.
+    method: stripMethod && methodRefusal(part, stripMethod) === null ? stripMethod : null,
     rounds: round,
-    rates: getRatesAt(db, shopId, openedAt),
-    recorded: state === "closed" && minutes !== null ? { minutes } : null,
+    rates: book.ratesAt(openedAt),
+    // Once it is closed its own minutes are recorded; correcting it by a record that it is part of would be a circle.
+    minutesCorrection: isClosed ? NO_CORRECTIONS : book.correctionsOf(classSlug),
+    recorded: isClosed && minutes !== null ? { minutes } : null,
   };
 }
 

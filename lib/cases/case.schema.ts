@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { STRIP_METHODS } from "@/lib/costs/strip-methods";
 import {
   BASE_METALS,
   DISPOSITIONS,
@@ -171,5 +172,15 @@ export const amendSchema = z.object({
   note,
 });
 export type Amendment = z.output<typeof amendSchema>;
+
+/** How the deposit is to come off; empty: the cheapest way that is safe. */
+export const chooseStripSchema = z.object({
+  ref: caseRef,
+  method: z.preprocess(
+    (raw) => (raw === "" || raw === undefined ? null : raw),
+    z.enum(STRIP_METHODS, { error: choose("how the deposit is to come off") }).nullable(),
+  ),
+});
+export type StripChoice = z.output<typeof chooseStripSchema>;
 
 export const exemplarSchema = z.object({ ref: caseRef, photoId: z.uuid(), chosen: z.stringbool().or(z.boolean()) });

@@ -1,3 +1,4 @@
+import { STRIP_METHOD_TITLES } from "@/lib/costs/strip-methods";
 import type { CaseEvent } from "./case-state";
 import {
   BASE_METAL_TITLES,
@@ -110,6 +111,8 @@ const AMENDED: Record<string, (value: unknown) => string> = {
   quantity: String,
   baseMetal: (value) => titleIn(BASE_METAL_TITLES, value).toLowerCase(),
   stageFound: (value) => titleIn(STAGE_TITLES, value).toLowerCase(),
+  stripMethod: (value) =>
+    value === null ? "the cheapest that is safe" : titleIn(STRIP_METHOD_TITLES, value).toLowerCase(),
   note: (value) => (value === "" ? "no note" : `“${String(value)}”`),
 };
 
@@ -117,6 +120,7 @@ const AMENDED_NAMES: Record<string, string> = {
   quantity: "Parts",
   baseMetal: "Base metal",
   stageFound: "Found",
+  stripMethod: "Taking it off",
   note: "Note",
 };
 

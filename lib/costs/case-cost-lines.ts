@@ -1,8 +1,10 @@
 import type { BaseMetal, Closing, StageFound } from "@/lib/cases/case-words";
 import { NO_PART_VALUE, type ReworkFigures } from "@/lib/costs/estimate-plan";
+import type { MinutesCorrections } from "@/lib/costs/estimate-record";
 import { HIGHEST_RATE_CENTS, type ShopRates } from "@/lib/costs/rates";
 import { COST_LINES, type CostLine } from "@/lib/costs/rework-terms";
 import type { StripMethod } from "@/lib/costs/strip-methods";
+import type { StripTable } from "@/lib/costs/strip-plan";
 import { requireBetween } from "@/lib/input-error";
 import { centsForMinutes, splitCents } from "@/lib/money";
 import type { Layer } from "@/lib/plating/deposit-stack";
@@ -20,7 +22,9 @@ export interface CaseCostInput {
   method?: StripMethod | null;
   /** Rounds of rework so far, the present one included. */
   rounds?: number;
-  minutesCorrection?: number;
+  minutesCorrection?: number | MinutesCorrections;
+  /** The shop's ways to take a deposit off on the case's day; left out: those that ship. */
+  table?: StripTable;
   /** How the case was closed, when it was. */
   closing?: Closing | null;
   /** From the rework cards of all rounds, once they are done. */

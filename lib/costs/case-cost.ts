@@ -9,12 +9,10 @@ import {
   type CaseCostInput,
 } from "@/lib/costs/case-cost-lines";
 import { NO_PART_VALUE, type ReworkFigures } from "@/lib/costs/estimate-plan";
-import type { ShopRates } from "@/lib/costs/rates";
-import { STARTING_RATES } from "@/lib/costs/starting-rates";
+import { withStartingPrices } from "@/lib/costs/metal-prices";
 import { reworkFigures } from "@/lib/costs/strip-estimate";
 import { requireWhole } from "@/lib/input-error";
 import { USUAL_STRIKE_UM, type Layer } from "@/lib/plating/deposit-stack";
-import { metalOf } from "@/lib/plating/metals";
 
 // The types belong to the function and are met beside it.
 export type { CaseCost, CaseCostInput };
@@ -82,7 +80,8 @@ function estimateCase(input: CaseCostInput): { estimate: ReworkFigures; assumed:
   if (input.areaDm2 === null) assumed.push(NO_AREA);
   if (input.stack === null) assumed.push(NO_STACK);
   const stack = input.stack ?? USUAL_STACK;
-  const rates = withAllPrices(input.rates, stack, assumed);
+  const { rates, assumed: prices } = withStartingPrices(input.rates, stack);
+  assumed.push(...prices);
   if (input.partValueCents === null) assumed.push(NO_PART_VALUE);
   const estimate = reworkFigures({
     quantity: input.quantity,
@@ -93,19 +92,8 @@ function estimateCase(input: CaseCostInput): { estimate: ReworkFigures; assumed:
     method: input.method ?? undefined,
     partValueCents: input.partValueCents ?? undefined,
     minutesCorrection: input.minutesCorrection,
+    table: input.table,
     rates,
   });
   return { estimate, assumed };
-}
-
-/** A case must not fail because the shop has no price for a metal yet: the starting price stands in, and is named. */
-function withAllPrices(rates: ShopRates, stack: readonly Layer[], assumed: string[]): ShopRates {
-  const missing = stack.filter(({ metal }) => rates.metalCentsPerG[metal] === undefined);
-  if (missing.length === 0) return rates;
-  const metalCentsPerG = { ...rates.metalCentsPerG };
-  for (const { metal } of missing) {
-    metalCentsPerG[metal] = STARTING_RATES.metalCentsPerG[metal];
-    assumed.push(`No price set for ${metalOf(metal).name}: the starting price is assumed.`);
-  }
-  return { ...rates, metalCentsPerG };
 }

@@ -11,13 +11,16 @@ export const LEAST_PAIRS = 8;
 /** The estimate's own standing, in pairs: with as many recorded ones, the correction goes half the way. From memory. */
 export const PRIOR_PAIRS = 8;
 
+/** No correction is above this: a record twenty times the estimate is a slip of the keyboard, or another kind of work. */
+export const MOST_CORRECTION = 20;
+
 /** What later estimates are multiplied by. */
 export interface Correction {
   enough: true;
   pairs: number;
   /** All recorded over all estimated. */
   rawRatio: number;
-  /** The raw ratio drawn towards 1, the more so the fewer pairs there are. */
+  /** The raw ratio drawn towards 1, the more so the fewer pairs there are; above 0, at most `MOST_CORRECTION`. */
   ratio: number;
 }
 
@@ -42,5 +45,10 @@ export function correctionFrom(pairs: readonly EstimatedAndRecorded[]): Correcti
   if (pairs.length < LEAST_PAIRS) return { enough: false, have: pairs.length, need: LEAST_PAIRS };
   const rawRatio = recordedTotal / estimatedTotal;
   const weight = pairs.length / (pairs.length + PRIOR_PAIRS);
-  return { enough: true, pairs: pairs.length, rawRatio, ratio: 1 + (rawRatio - 1) * weight };
+  return {
+    enough: true,
+    pairs: pairs.length,
+    rawRatio,
+    ratio: Math.min(MOST_CORRECTION, 1 + (rawRatio - 1) * weight),
+  };
 }

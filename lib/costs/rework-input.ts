@@ -1,5 +1,7 @@
 import { BASE_METALS, LIMITS, STAGES_FOUND, type BaseMetal, type StageFound } from "@/lib/cases/case-words";
 import { metalPrice, HIGHEST_RATE_CENTS, type ShopRates } from "@/lib/costs/rates";
+import type { MinutesCorrections } from "@/lib/costs/estimate-record";
+import { MOST_CORRECTION } from "@/lib/costs/correction";
 import { USUAL_REWORK_TIMES, type ReworkTimes } from "@/lib/costs/rework-times";
 import { STRIP_METHODS, type StripMethod } from "@/lib/costs/strip-methods";
 import { SHIPPED_STRIP_TABLE, type StripTable } from "@/lib/costs/strip-plan";
@@ -20,17 +22,16 @@ export interface ReworkInput {
   /** Of one part, before plating. Left out: scrap risk is not reckoned, and the estimate says so. */
   partValueCents?: number;
   rates: ShopRates;
-  /** Recorded against estimated minutes in this shop (`correction.ts`); left out: 1. */
-  minutesCorrection?: number;
+  /** Recorded against estimated minutes in this shop, for each method (`estimate-record.ts`) or one for all; left out: 1. */
+  minutesCorrection?: number | MinutesCorrections;
   times?: ReworkTimes;
   table?: StripTable;
 }
 
 export const REWORK_LIMITS = {
   areaDm2: 10_000,
-
   partValueCents: 1e11,
-  correction: 20,
+  correction: MOST_CORRECTION,
 } as const;
 
 /** The input with its defaults filled in and its stack cut to what lies on the part at this stage. */
@@ -67,8 +68,9 @@ export function checkReworkInput(input: ReworkInput): CheckedRework {
 
 function checkMoney({ partValueCents, minutesCorrection, rates, stack }: ReworkInput): void {
   if (partValueCents !== undefined) requireBetween("partValueCents", partValueCents, 0, REWORK_LIMITS.partValueCents);
-  if (minutesCorrection !== undefined)
-    requirePositive("minutesCorrection", minutesCorrection, REWORK_LIMITS.correction);
+  if (typeof minutesCorrection === "object") {
+    for (const method of STRIP_METHODS) checkCorrection(minutesCorrection[method]);
+  } else if (minutesCorrection !== undefined) checkCorrection(minutesCorrection);
   requireBetween("labourCentsPerHour", rates.labourCentsPerHour, 0, HIGHEST_RATE_CENTS);
   requireBetween("lineCentsPerHour", rates.lineCentsPerHour, 0, HIGHEST_RATE_CENTS);
   requireBetween("solutionCentsPerL", rates.solutionCentsPerL, 0, HIGHEST_RATE_CENTS);
@@ -78,6 +80,10 @@ function checkMoney({ partValueCents, minutesCorrection, rates, stack }: ReworkI
     requireBetween(`metalCentsPerG.${metal}`, metalPrice(rates, metal), 0, HIGHEST_RATE_CENTS);
     requireBetween(`recoveryShare.${metal}`, rates.recoveryShare[metal] ?? 0, 0, 1);
   }
+}
+
+function checkCorrection(ratio: number): void {
+  requirePositive("minutesCorrection", ratio, REWORK_LIMITS.correction);
 }
 
 /** A layer known as a range counts with its PERT mean; without a range it is itself. */

@@ -1,4 +1,5 @@
 import { pertMean, timesFactor, type ThreePoint } from "@/lib/costs/pert";
+import type { ShopRates } from "@/lib/costs/rates";
 import type { CheckedRework } from "@/lib/costs/rework-input";
 import { reworkTerms, type CostLine, type ReworkTerm } from "@/lib/costs/rework-terms";
 import type { StripPlan } from "@/lib/costs/strip-plan";
@@ -33,11 +34,13 @@ export function tallyTerms(facts: CheckedRework, plan: AllowedPlan): Tally {
   const { quantity, areaDm2, stageFound, partValueCents, rates, times } = facts;
   const { method, steps } = plan;
   const terms = reworkTerms({ quantity, areaDm2, stageFound, partValueCents, rates, times, method, steps });
-  for (const term of terms) addTerm(tally, term, facts);
+  const { minutesCorrection: given } = facts;
+  const minutesCorrection = typeof given === "number" ? given : given[method];
+  for (const term of terms) addTerm(tally, term, rates, minutesCorrection);
   return tally;
 }
 
-function addTerm(tally: Tally, term: ReworkTerm, { rates, minutesCorrection }: CheckedRework): void {
+function addTerm(tally: Tally, term: ReworkTerm, rates: ShopRates, minutesCorrection: number): void {
   const range: NamedRange = { name: term.name, low: 0, high: 0 };
   if (term.handsOnMinutes) {
     const minutes = timesFactor(term.handsOnMinutes, minutesCorrection);

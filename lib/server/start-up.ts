@@ -1,4 +1,5 @@
 import "server-only";
+import { bringCostsUpToDate } from "@/db/changes/bring-costs-up-to-date";
 import { getDb } from "@/db/client";
 import { watchPeers } from "./address";
 import { onWake } from "./job-clock";
@@ -14,6 +15,8 @@ export async function startUp(): Promise<void> {
   if (holder.coppertellRunner) return;
   watchPeers();
   const db = getDb();
+  const { repriced } = bringCostsUpToDate(db, Date.now());
+  if (repriced > 0) console.info(`Priced ${repriced} cases again, as this version reckons.`);
   const removed = await sweepUploads(db, uploadsRoot(), Date.now());
   if (removed > 0) console.info(`Removed ${removed} left-over files from the uploads folder.`);
   const runner = startJobRunner({ db, handlers: jobHandlers });

@@ -4,6 +4,7 @@ import {
   amendSchema,
   backSchema,
   callSchema,
+  chooseStripSchema,
   confirmationSchema,
   disposeSchema,
   exemplarSchema,
@@ -79,6 +80,14 @@ export const amendCase = act({
   permission: "case.amend",
   input: amendSchema,
   run: ({ input, ...doing }) => changes.amend(doing, input),
+  revalidate: showing,
+});
+
+/** How the deposit is to come off; an empty method takes the choice away. */
+export const chooseStripMethod = act({
+  permission: "case.confirm",
+  input: chooseStripSchema,
+  run: ({ input, ...doing }) => changes.planStrip(doing, input),
   revalidate: showing,
 });
 

@@ -1,10 +1,12 @@
 import { createHash } from "node:crypto";
 import { count, eq, inArray, ne, and } from "drizzle-orm";
+import { bringCostsUpToDate } from "@/db/changes/bring-costs-up-to-date";
 import type { Db, Handle } from "@/db/open";
 import { insertMember } from "@/db/queries/crew-changes";
 import { cases, exemplars, photos, shops } from "@/db/schema";
 import { insertCustomer, insertJob, insertRates } from "@/db/seed/factories/insert-job";
 import { insertShelf } from "@/db/seed/factories/insert-shelf";
+import { insertStripRows } from "@/db/changes/insert-strip-rows";
 import { shelf } from "@/db/seed/library/shelf";
 import { seededRandom, type Random } from "@/db/seed/photos/random";
 import { STARTING_RATES } from "@/lib/costs/starting-rates";
@@ -43,7 +45,10 @@ export async function seedDemo(db: Db, options: DemoOptions): Promise<void> {
     .from(shops)
     .where(and(eq(shops.isDemo, true), inArray(shops.slug, slugs)))
     .get();
-  if (there && there.shops === slugs.length) return options.say("The demo shops are in place.");
+  if (there && there.shops === slugs.length) {
+    bringCostsUpToDate(db, options.now);
+    return options.say("The demo shops are in place.");
+  }
 
   const passwordHash = await hashPassword(DEMO_PASSWORD);
   const shots = db.transaction(
@@ -59,6 +64,7 @@ export async function seedDemo(db: Db, options: DemoOptions): Promise<void> {
     if (done % 50 === 0) options.say(`${done} of ${shots.length} photos`);
   });
   db.transaction((tx) => chooseExemplars(tx));
+  bringCostsUpToDate(db, options.now);
 }
 
 interface DemoShopOptions {
@@ -82,6 +88,7 @@ function seedShop(tx: Handle, options: DemoShopOptions): Shot[] {
     .get();
   const crew = seedCrew(tx, { shopId, slug, passwordHash: options.passwordHash, now });
   insertShelf(tx, shopId, shelf, now - 130 * DAY_MS);
+  insertStripRows(tx, shopId, now - 130 * DAY_MS);
   insertRates(tx, shopId, now - 130 * DAY_MS, { ...STARTING_RATES, source: SOURCE });
   insertRates(tx, shopId, now - 40 * DAY_MS, { ...STARTING_RATES, labourCentsPerHour: 5500, source: SOURCE });
   const { stationIds, solutions } = seedLine(tx, { shopId, seniorId: crew.senior, now, random });

@@ -3,6 +3,7 @@ import type { Db, Handle } from "@/db/open";
 import type { Caller } from "@/db/changes/add-call";
 import { addCall } from "@/db/changes/add-call";
 import type { CaseRow } from "@/db/changes/case-event";
+import { chooseStrip } from "@/db/changes/choose-strip";
 import { amendCase, disposeCase, reopenCase, takeBack } from "@/db/changes/close-case";
 import { confirmCase, releaseCase } from "@/db/changes/confirm-case";
 import { recordOutcome, tickStep } from "@/db/changes/do-rework";
@@ -11,7 +12,7 @@ import { writeCaseText } from "@/db/changes/write-case-text";
 import { requireCase } from "@/db/queries/cases";
 import type { SignedIn } from "@/db/queries/crew";
 import { hasClass } from "@/db/queries/snap-facts";
-import type { Amendment, CallInput, Confirmation, OutcomeInput, Snap } from "@/lib/cases/case.schema";
+import type { Amendment, CallInput, Confirmation, OutcomeInput, Snap, StripChoice } from "@/lib/cases/case.schema";
 import { fault } from "@/lib/fault";
 import { can, type Permission } from "@/lib/permissions";
 import { announceConfirmed } from "../mail/announce-confirmed";
@@ -133,4 +134,10 @@ export function reopen(doing: Doing, input: { ref: string; why: string }): Done 
 
 export function amend(doing: Doing, input: Amendment): Done {
   return change(doing, input.ref, "case.amend", (tx, caller, row) => amendCase(tx, caller, row, input));
+}
+
+/** Money hangs on it, so it takes both: the second look, and sight of a case's money. */
+export function planStrip(doing: Doing, input: StripChoice): Done {
+  if (!can(doing.member, "money.case")) throw fault("refused", refusalWords("money.case"));
+  return change(doing, input.ref, "case.confirm", (tx, caller, row) => chooseStrip(tx, caller, row, input.method));
 }

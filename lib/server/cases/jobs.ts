@@ -1,3 +1,4 @@
+import { priceOpenCases } from "@/db/changes/price-open-cases";
 import type { Db, Handle } from "@/db/open";
 import { insertAudit } from "@/db/queries/audit";
 import type { SignedIn } from "@/db/queries/crew";
@@ -44,7 +45,7 @@ export function openJob(db: Db, member: SignedIn, input: OpenJob, now: number): 
 }
 
 /**
- * Changes what later prices rest on. Cases keep what they were priced at.
+ * Changes what prices rest on. Open cases of the job are priced again; closed ones keep what they were priced at.
  * @throws FaultError "not-found" for no job of this shop, "conflict" for a closed one or where nothing changes
  */
 export function changeJob(db: Db, member: SignedIn, input: ChangeJob, now: number): { number: string } {
@@ -58,6 +59,7 @@ export function changeJob(db: Db, member: SignedIn, input: ChangeJob, now: numbe
       const changed = jobChanges(job, after, (cents) => formatMoney(cents, member.shop.currency));
       if (changed.length === 0) throw fault("conflict", "Nothing differs from what holds. Change a figure first.");
       updateWorkOrder(tx, member.shopId, jobId, after);
+      priceOpenCases(tx, { shopId: member.shopId, now }, jobId);
       record(tx, member, "job.changed", job.number, now, { changed });
       return { number: job.number };
     },

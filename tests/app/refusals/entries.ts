@@ -148,6 +148,10 @@ export const ENTRIES: readonly Entry[] = [
     return () =>
       ending(caseActions.amendCase, { ref, quantity: 4, baseMetal: "brass", stageFound: "at-strike", note: "" });
   }),
+  caseEntry("chooseStripMethod", "case.confirm", (aim) => {
+    const { ref } = heldCase(aim);
+    return () => ending(caseActions.chooseStripMethod, { ref, method: "polish-back" });
+  }),
   caseEntry("setExemplar", "exemplar.choose", (aim) => {
     const { ref, photoId } = readyPhoto(aim, UPLOADS);
     return () => ending(caseActions.setExemplar, { ref, photoId, chosen: "true" });

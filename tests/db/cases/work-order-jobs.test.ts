@@ -2,9 +2,10 @@ import { eq } from "drizzle-orm";
 import { beforeEach, describe, expect, it } from "vitest";
 import type { Db } from "@/db/open";
 import { listAudit } from "@/db/queries/audit";
+import { getCaseMoney } from "@/db/queries/case-costs";
 import { listSnapChoices } from "@/db/queries/snap-choices";
 import { countOpenJobs, getJob, listCustomerNames, listJobs, placeOfJob } from "@/db/queries/work-orders";
-import { cases, customers } from "@/db/schema";
+import { caseCosts, cases, customers } from "@/db/schema";
 import type { OpenJob } from "@/lib/cases/job.schema";
 import { FaultError, type Fault } from "@/lib/fault";
 import { changeJob, closeJob, openJob, reopenJob } from "@/lib/server/cases/jobs";
@@ -112,13 +113,25 @@ describe("the list", () => {
 describe("keeping a job right", () => {
   const change = { quantity: 60, areaDm2: 1.2, partValueCents: 4500, finalStack: [] };
 
-  it("writes what changed into the trail, and rewrites no cost that a case has on record", () => {
-    const held = makeCase(db, shop);
-    const priceOf = () =>
-      db.select({ atRisk: cases.atRiskCents, cost: cases.costCents }).from(cases).where(eq(cases.id, held.id)).get();
-    const before = priceOf();
+  it("prices its open cases again, so that queue and case page agree; a closed case keeps its cost", () => {
+    const held = makeCase(db, shop, { stageFound: "after-final-plate" });
+    const scrapped = makeCase(db, shop);
+    confirmFor(db, shop, scrapped, { disposition: "scrap", why: "eaten away", steps: [] });
+    const priceOf = (id: number) =>
+      db.select({ atRisk: cases.atRiskCents, cost: cases.costCents }).from(cases).where(eq(cases.id, id)).get();
+    const figures = () => db.select().from(caseCosts).orderBy(caseCosts.id).all();
+    const [heldBefore, scrappedBefore, record] = [priceOf(held.id), priceOf(scrapped.id), figures()];
+    changeJob(db, shop.members.senior, { jobId: shop.jobId, ...change, partValueCents: 90_000 }, TEST_NOW);
+    // Scrap risk is a share of the parts' value, and that went from €42 to €900.
+    expect(priceOf(held.id)?.cost).toBeGreaterThan(heldBefore?.cost ?? 0);
+    expect(priceOf(held.id)?.atRisk).toBe(getCaseMoney(db, shop.shopId, held.id)?.atRisk.meanCents);
+    expect(priceOf(scrapped.id)).toEqual(scrappedBefore);
+    expect(figures().slice(0, record.length)).toEqual(record);
+    expect(figures()).toHaveLength(record.length + 1);
+  });
+
+  it("writes what changed into the trail", () => {
     changeJob(db, shop.members.senior, { jobId: shop.jobId, ...change }, TEST_NOW);
-    expect(priceOf()).toEqual(before);
     expect(getJob(db, shop.shopId, shop.jobId)).toMatchObject({ quantity: 60, partValueCents: 4500, finalStack: [] });
     const [entry] = listAudit(db, shop.shopId, { limit: 1 }).entries;
     // The factory's job: 48 parts of €42.00 each, 5 µm of nickel and 0.8 µm of gold.

@@ -60,9 +60,9 @@ function OpenJob({ member, job }: { member: SignedIn; job: JobRow }) {
         />
       </Section>
       <div>
-        <Note title="Costs on record stay">
-          A change counts for what is priced from now on. A cost that a case has on record is not rewritten; the money
-          at risk on the page of an unfinished case follows the new figures.
+        <Note title="Closed cases keep their cost">
+          Open cases of this job are priced again when it is saved, and so is their place in the queue. What a closed
+          case cost stays.
         </Note>
         <Section title="Close the job">
           <JobTurnForm jobId={job.id} label="Close the job" variant="plain" action={closeJob}>
