@@ -1,4 +1,4 @@
-import { requireBetween, requirePositive, requireWhole } from "@/lib/input-error";
+import { InputError, requireBetween, requirePositive, requireWhole } from "@/lib/input-error";
 import { wilsonInterval } from "@/lib/stats/wilson";
 
 /** Is looking at every strike worth it? Money in cents. */
@@ -39,6 +39,9 @@ export function inspectAdvice({ checkCost, missCost, inspected, bad }: InspectIn
   requireWhole("inspected", inspected, 0, Number.MAX_SAFE_INTEGER);
   requireWhole("bad", bad, 0, inspected);
   const breakEvenRate = checkCost / missCost;
+  if (!Number.isFinite(breakEvenRate)) {
+    throw new InputError("missCost", "So small a cost has no break-even that can be counted. Give a greater one.");
+  }
   const { low, high } = wilsonInterval(bad, inspected);
   return {
     breakEvenRate,

@@ -3,6 +3,8 @@ import { InputError, requireBetween, requirePositive, requireWhole } from "@/lib
 /** Pieces beyond which nobody strikes test pieces. */
 export const MOST_PIECES = 1_000_000;
 
+export const TEST_PIECES_SOURCE = "success-run theorem, 1 − (1 − share)^pieces";
+
 /**
  * Chance that at least one of so many test pieces shows a process fault that spoils a share of the parts: 1 − (1 − share)^pieces.
  * Share 0 to 1, pieces 0 or more. Throws `InputError` naming the field. Source: success-run theorem.
@@ -31,7 +33,7 @@ export function piecesForChance(badShare: number, wantedChance: number): number 
   if (badShare === 1) return 1;
   const exact = Math.log1p(-wantedChance) / Math.log1p(-badShare);
   if (exact > MOST_PIECES)
-    throw new InputError("badShare", "So small a share takes more than a million pieces to see.");
+    throw new InputError("badShare", "So small a share takes more than a million pieces to see. Give a greater one.");
   const pieces = Math.max(1, Math.ceil(exact));
   // A ratio that is whole but for rounding must not cost a piece more.
   return pieces > 1 && chanceToShow(badShare, pieces - 1) >= wantedChance - 1e-12 ? pieces - 1 : pieces;

@@ -20,7 +20,7 @@ export const THICKEST_STRIKE_UM = 5;
 export const USUAL_STRIKE_UM = 0.5;
 
 /** Finishes on which no shop lays copper, nickel or another undercoat: seen there, the list is upside down. */
-const FINISHES: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Au", "Rh", "Pt", "Pd", "Cr"]);
+const FINISHES: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Au", "Ag", "Rh", "Pt", "Pd", "Cr"]);
 const UNDERCOATS: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Cu", "Ni", "Zn", "Fe", "Co"]);
 
 /** Throws `InputError("stack…")` when the stack is empty, has an impossible layer or lists its layers upside down. */
@@ -29,16 +29,16 @@ export function checkStack(stack: readonly Layer[]): void {
   if (stack.length > STACK_LIMITS.layers) {
     throw new InputError("stack", `List at most ${STACK_LIMITS.layers} layers.`);
   }
-  let beneath: Layer | undefined;
+  let finish: Layer | undefined;
   for (const [index, layer] of stack.entries()) {
     checkLayer(layer, index);
-    if (beneath && FINISHES.has(beneath.metal) && UNDERCOATS.has(layer.metal)) {
+    if (finish && UNDERCOATS.has(layer.metal)) {
       throw new InputError(
         "stack",
-        `Layer ${index + 1}, ${metalOf(layer.metal).name}, lies on ${metalOf(beneath.metal).name}. List the layers from the base metal out.`,
+        `Layer ${index + 1}, ${metalOf(layer.metal).name}, lies above ${metalOf(finish.metal).name}. List the layers from the base metal out.`,
       );
     }
-    beneath = layer;
+    if (FINISHES.has(layer.metal)) finish = layer;
   }
 }
 

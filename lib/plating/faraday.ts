@@ -1,11 +1,17 @@
-import { requireBetween, requirePositive } from "@/lib/input-error";
+import { InputError, requireBetween, requirePositive } from "@/lib/input-error";
 import { metalOf, requireValence, type DepositMetal } from "@/lib/plating/metals";
 
 /** Charge of one mole of electrons, C/mol. Exact since 2019: e × N_A (CODATA 2018 and 2022). */
 export const FARADAY_C_PER_MOL = 96485.33212331001;
 
 /** Limits of what a shop can mean; beyond them it is a slip of the keyboard. */
-const MOST = { areaDm2: 1e9, thicknessUm: 1e4, currentA: 1e6, currentDensityADm2: 1e4, minutes: 1e6 } as const;
+export const PLATE_LIMITS = {
+  areaDm2: 1e9,
+  thicknessUm: 1e4,
+  currentA: 1e6,
+  currentDensityADm2: 1e4,
+  minutes: 1e6,
+} as const;
 
 /** Grams of metal from one dm² covered one µm thick is density × 0.01: 1 dm² × 1 µm = 0.01 cm³. */
 const CM3_PER_DM2_UM = 0.01;
@@ -31,8 +37,8 @@ export function equivalentGPerAh({ metal, valence }: Deposit): number {
 
 /** Mass of a layer, g: area × thickness × density. Throws `InputError` when area or thickness is not above 0. */
 export function layerMassG(deposit: Deposit, areaDm2: number, thicknessUm: number): number {
-  requirePositive("areaDm2", areaDm2, MOST.areaDm2);
-  requirePositive("thicknessUm", thicknessUm, MOST.thicknessUm);
+  requirePositive("areaDm2", areaDm2, PLATE_LIMITS.areaDm2);
+  requirePositive("thicknessUm", thicknessUm, PLATE_LIMITS.thicknessUm);
   return areaDm2 * thicknessUm * CM3_PER_DM2_UM * densityOf(deposit);
 }
 
@@ -56,11 +62,14 @@ export function plateForThickness(
 ): PlateTime {
   const massG = layerMassG(wanted, wanted.areaDm2, wanted.thicknessUm);
   requireEfficiency(wanted.efficiency);
-  requirePositive("currentDensityADm2", wanted.currentDensityADm2, MOST.currentDensityADm2);
+  requirePositive("currentDensityADm2", wanted.currentDensityADm2, PLATE_LIMITS.currentDensityADm2);
   const equivalent = equivalentGPerAh(wanted);
-  const ampereHours = massG / (equivalent * wanted.efficiency);
+  const ampereHours = requireCountable("efficiency", massG / (equivalent * wanted.efficiency));
   const currentA = wanted.currentDensityADm2 * wanted.areaDm2;
-  return { massG, equivalentGPerAh: equivalent, ampereHours, currentA, minutes: (ampereHours / currentA) * 60 };
+  // The area cancels out: current goes with it.
+  const hoursAtOneADm2 = wanted.thicknessUm / (umPerHourAtOneADm2(wanted) * wanted.efficiency);
+  const minutes = requireCountable("currentDensityADm2", (hoursAtOneADm2 / wanted.currentDensityADm2) * 60);
+  return { massG, equivalentGPerAh: equivalent, ampereHours, currentA, minutes };
 }
 
 /** What came out of a known current and time. */
@@ -80,7 +89,7 @@ export interface PlatedResult {
 export function platedByCurrent(
   given: Deposit & { currentA: number; minutes: number; efficiency: number; areaDm2: number },
 ): PlatedResult {
-  requirePositive("areaDm2", given.areaDm2, MOST.areaDm2);
+  requirePositive("areaDm2", given.areaDm2, PLATE_LIMITS.areaDm2);
   const { massG, ampereHours, equivalentGPerAh: equivalent } = massByCurrent(given);
   return {
     massG,
@@ -94,8 +103,8 @@ export function platedByCurrent(
 export function massByCurrent(
   given: Deposit & { currentA: number; minutes: number; efficiency: number },
 ): Omit<PlatedResult, "thicknessUm"> {
-  requirePositive("currentA", given.currentA, MOST.currentA);
-  requirePositive("minutes", given.minutes, MOST.minutes);
+  requirePositive("currentA", given.currentA, PLATE_LIMITS.currentA);
+  requirePositive("minutes", given.minutes, PLATE_LIMITS.minutes);
   requireEfficiency(given.efficiency);
   const ampereHours = (given.currentA * given.minutes) / 60;
   const equivalent = equivalentGPerAh(given);
@@ -105,8 +114,8 @@ export function massByCurrent(
 /** Mean thickness, µm, of a mass spread over an area: the part weighed before and after. Throws `InputError`. */
 export function thicknessOfMassUm(deposit: Deposit, massG: number, areaDm2: number): number {
   requireBetween("massG", massG, 0, 1e12);
-  requirePositive("areaDm2", areaDm2, MOST.areaDm2);
-  return massG / (areaDm2 * CM3_PER_DM2_UM * densityOf(deposit));
+  requirePositive("areaDm2", areaDm2, PLATE_LIMITS.areaDm2);
+  return requireCountable("areaDm2", massG / (areaDm2 * CM3_PER_DM2_UM * densityOf(deposit)));
 }
 
 /**
@@ -120,6 +129,12 @@ export function umPerHourAtOneADm2(deposit: Deposit): number {
 
 function densityOf({ metal, densityGCm3 }: Deposit): number {
   return densityGCm3 === undefined ? metalOf(metal).densityGCm3 : requirePositive("densityGCm3", densityGCm3, 30);
+}
+
+/** A result that can be counted. One that is endless is the fault of an input so small that nobody means it. */
+function requireCountable(field: string, result: number): number {
+  if (!Number.isFinite(result)) throw new InputError(field, "So small a number has no result that can be counted. Give a greater one.");
+  return result;
 }
 
 function requireEfficiency(efficiency: number): number {

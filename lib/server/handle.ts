@@ -77,10 +77,13 @@ async function readBody(request: NextRequest): Promise<Record<string, unknown>> 
   try {
     body = JSON.parse(text);
   } catch (error) {
-    throw Object.assign(fault("invalid", "The request is not JSON. Check its brackets and quotes."), { cause: error });
+    throw Object.assign(bodyFault("The request is not JSON. Check its brackets and quotes."), { cause: error });
   }
   if (typeof body !== "object" || body === null || Array.isArray(body)) {
-    throw fault("invalid", "The request must be a JSON object.");
+    throw bodyFault("The request must be a JSON object, in curly brackets.");
   }
   return body as Record<string, unknown>;
 }
+
+/** The whole body is at fault: there is no field to name but it. */
+const bodyFault = (words: string) => fault("invalid", words, { body: words });
