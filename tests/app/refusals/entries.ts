@@ -11,6 +11,10 @@ import * as confirmationRoute from "@/app/api/cases/[ref]/confirmation/route";
 import * as outcomeRoute from "@/app/api/cases/[ref]/outcome/route";
 import * as caseRoute from "@/app/api/cases/[ref]/route";
 import * as casesRoute from "@/app/api/cases/route";
+import * as inspectRoute from "@/app/api/estimates/inspect/route";
+import * as plateRoute from "@/app/api/estimates/plate/route";
+import * as stripRoute from "@/app/api/estimates/strip/route";
+import * as testPiecesRoute from "@/app/api/estimates/test-pieces/route";
 import * as ledgerRoute from "@/app/api/ledger/route";
 import * as libraryClassRoute from "@/app/api/library/[class]/route";
 import * as libraryEntriesRoute from "@/app/api/library/entries/route";
@@ -366,6 +370,58 @@ export const ENTRIES: readonly Entry[] = [
     permission: "library.see",
     aims: "shop",
     prepare: () => () => answered(libraryClassRoute.GET, "GET", "/api/library/dewetting", { class: "dewetting" }),
+  },
+  {
+    name: "app/api/estimates/plate/route.ts POST",
+    permission: "plating.reckon",
+    aims: "shop",
+    prepare: () => () =>
+      answered(
+        plateRoute.POST,
+        "POST",
+        "/api/estimates/plate",
+        {},
+        { metal: "Ni", areaDm2: 1, thicknessUm: 4, currentDensityADm2: 4 },
+      ),
+  },
+  {
+    name: "app/api/estimates/inspect/route.ts POST",
+    permission: "strip.estimate",
+    aims: "shop",
+    prepare: () => () =>
+      answered(
+        inspectRoute.POST,
+        "POST",
+        "/api/estimates/inspect",
+        {},
+        { checkCost: 1, missCost: 50, inspected: 200, bad: 4 },
+      ),
+  },
+  {
+    name: "app/api/estimates/test-pieces/route.ts POST",
+    permission: "plating.reckon",
+    aims: "shop",
+    prepare: () => () =>
+      answered(testPiecesRoute.POST, "POST", "/api/estimates/test-pieces", {}, { badShare: 0.05, pieces: 59 }),
+  },
+  {
+    name: "app/api/estimates/strip/route.ts POST",
+    permission: "strip.estimate",
+    aims: "shop",
+    prepare: () => () =>
+      answered(
+        stripRoute.POST,
+        "POST",
+        "/api/estimates/strip",
+        {},
+        {
+          quantity: 3,
+          areaDm2: 1,
+          baseMetal: "brass",
+          stack: [{ metal: "Cu", thicknessUm: 0.5 }],
+          stageFound: "at-strike",
+        },
+      ),
   },
   {
     name: "app/api/ledger/route.ts GET",
