@@ -55,6 +55,16 @@ export const cautions: LibraryCaution[] = [
     "common-practice",
     "Persulfate is a strong oxidiser and its bath heats up as it works. Make it fresh, leave it uncovered, never bottle the spent bath, keep organics, acid and cyanide away. With ammonia it needs ventilation.",
   ),
+  stop(
+    "peroxide-dip",
+    "common-practice",
+    "Peroxide in acid or cyanide heats and foams, and can boil over. Small and fresh, cooled, never in a closed vessel, no organics, trained people only. Peroxide for acid never shares a bottle or tray with peroxide for cyanide.",
+  ),
+  stop(
+    "hydrosulfite",
+    "common-practice",
+    "Sodium hydrosulfite catches fire when damp and gives off sulfur dioxide with acid. Dry scoop, into plenty of alkaline bath, never acid on it; ventilation on; the drum closed at once.",
+  ),
   care(
     "acid-splash",
     "common-practice",
@@ -84,6 +94,11 @@ export const cautions: LibraryCaution[] = [
     "lead-dust",
     "osha-1025",
     "Leaded brass, leaded bronze and old pewter give lead dust. Wet abrasion only; wash hands before food.",
+  ),
+  care(
+    "silver-dust",
+    "osha-1000",
+    "Silver dust and mist stain skin and eyes for good: limit 0.01 mg/m³. Wet, with extraction, no dry wheel.",
   ),
   care(
     "nickel",

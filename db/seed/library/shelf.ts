@@ -1,4 +1,8 @@
-/** The shelf that ships with the product: every class part gathered, each cause and fix once. */
+/**
+ * The shelf that ships with the product: every class part gathered, each cause and fix once. Fixes that serve several
+ * classes (a base metal's route, a bath, a tool, a strip) stand after those of the classes, so that a class's first fix
+ * is its plain rework.
+ */
 import type { Shelf, ShelfPart } from "@/lib/library/library-entry";
 import { cautions } from "@/db/seed/library/cautions";
 import { bleedOut } from "@/db/seed/library/classes/bleed-out";
@@ -14,6 +18,10 @@ import { pitting } from "@/db/seed/library/classes/pitting";
 import { sound } from "@/db/seed/library/classes/sound";
 import { underactivation } from "@/db/seed/library/classes/underactivation";
 import { waterSpots } from "@/db/seed/library/classes/water-spots";
+import { fixesAfterFinalPlate } from "@/db/seed/library/fixes/after-final-plate";
+import { fixesByBaseMetal } from "@/db/seed/library/fixes/by-base-metal";
+import { fixesOfTools } from "@/db/seed/library/fixes/brush-and-racks";
+import { fixesOfBaths } from "@/db/seed/library/fixes/strike-bath";
 import { sources } from "@/db/seed/library/sources";
 
 const parts: ShelfPart[] = [
@@ -35,7 +43,13 @@ const parts: ShelfPart[] = [
 export const shelf: Shelf = {
   classes: parts.map((part) => part.class),
   causes: parts.flatMap((part) => part.causes),
-  fixes: parts.flatMap((part) => part.fixes),
+  fixes: [
+    ...parts.flatMap((part) => part.fixes),
+    ...fixesByBaseMetal,
+    ...fixesOfTools,
+    ...fixesOfBaths,
+    ...fixesAfterFinalPlate,
+  ],
   cautions,
   sources,
 };

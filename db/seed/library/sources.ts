@@ -65,6 +65,14 @@ export const sources: LibrarySource[] = [
     "woods-columns",
     "Trade columns and a forum answer on the Woods nickel strike. They agree on the recipe and not on the current density.",
   ),
+  published(
+    "strip-columns",
+    "Trade columns on stripping nickel and chromium (solutions and volts read; rates from memory).",
+  ),
+  published(
+    "strip-coupons",
+    "Reuse procedure of a maker of stress coupons: strips for gold, silver and copper (solutions read; rates from memory).",
+  ),
   published("osha-1000", "29 CFR 1910.1000, Tables Z-1 and Z-2, air limits; NIOSH pocket values beside them."),
   published("osha-1026", "29 CFR 1910.1026, chromium(VI): 5 µg/m³ over 8 hours, action level 2.5 µg/m³."),
   published("osha-1024", "29 CFR 1910.1024, beryllium (from memory)."),

@@ -94,3 +94,43 @@ export function mend(
 ): FixStep {
   return { title, detail, minutes, perPart: false, cautionKeys, station };
 }
+
+/** The nickel strike that wakes stainless, nickel and old plate. Its recipe is the trade columns'; their currents disagree. */
+export function nickelStrike({ detail, minutes = 4, cautionKeys = [] }: Detail): FixStep {
+  return {
+    title: "Woods nickel strike",
+    detail: `${detail} Nickel chloride 225 to 240 g/L, hydrochloric acid 110 to 125 mL/L, 21 to 32 °C (trade columns); current as this tank proves.`,
+    minutes,
+    perPart: false,
+    cautionKeys: ["nickel", "acid-cyanide", "acid-splash", "power", "embrittlement", ...cautionKeys],
+    station: "strike",
+  };
+}
+
+/** One step of a brush sequence, part by part: its own anode, cover and tray, solution and current in the same hand. */
+export function brushStep(
+  station: FixStep["station"],
+  title: string,
+  { detail, minutes = 5, cautionKeys = [] }: Detail,
+): FixStep {
+  return {
+    title,
+    detail,
+    minutes,
+    perPart: true,
+    cautionKeys: ["brush-power", "acid-cyanide", "sheet", ...cautionKeys],
+    station,
+  };
+}
+
+/** What comes before any strip of a finished part: what is on it, and whether it will survive. */
+export function beforeStripping({ detail, minutes = 5, cautionKeys = [] }: Detail): FixStep {
+  return {
+    title: "Before any strip: gauge, lift the edge, ask",
+    detail,
+    minutes,
+    perPart: true,
+    cautionKeys,
+    station: "inspect",
+  };
+}

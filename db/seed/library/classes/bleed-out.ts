@@ -27,6 +27,11 @@ export const bleedOut: ShelfPart = {
       },
       { versus: "oxidation", tell: "Wet or crusted at its source, with a clear starting point. Oxidation has none." },
       { versus: "handling", tell: "It grows. A finger mark keeps its shape." },
+      {
+        versus: "overactivation",
+        tell: "It begins at an opening and grows after the strike. Smut covers faces and is all there when the part comes out.",
+      },
+      { versus: "pitting", tell: "Wet, crusted, or stained round the hole. A pit is dry, and stays as it was." },
     ],
     checks: [
       "Rinse, wipe, set the part on white paper with the seam down in a warm place for an hour. Press pH paper on what shows: acid or alkali names the tank.",
@@ -40,7 +45,7 @@ export const bleedOut: ShelfPart = {
     ],
     stripNote:
       "Each strip tank fills the pore again, so a part stripped for bleed-out may bleed worse. Dry it right out before deciding.",
-    otherLikelihood: 0.08,
+    otherLikelihood: 0.06,
     sourceKeys: ["astm-b252", "common-practice", "from-memory"],
     synonyms: [
       "sweating",
@@ -82,7 +87,7 @@ export const bleedOut: ShelfPart = {
       station: "clean",
       why: "Gas or shrink pores, opened by machining or polishing, drink each tank in turn and give it back slowly.",
       proof: "Weigh dry, soak in hot water for an hour, wipe, weigh: gain is pore. Dots lie where metal was taken off.",
-      likelihood: 0.36,
+      likelihood: 0.34,
       baseMetals: ["zinc", "aluminium", "iron", "bronze", "brass", "pewter"],
       sourceKeys: ["astm-b252", "common-practice", "from-memory"],
       synonyms: [
@@ -103,7 +108,7 @@ export const bleedOut: ShelfPart = {
       station: "rinse",
       why: "A gap of hundredths of a millimetre fills by capillary and no rinse reaches in.",
       proof: "Stain follows the joint line on every part. Open one joint: wet or salted inside.",
-      likelihood: 0.31,
+      likelihood: 0.3,
       baseMetals: ["steel", "brass", "copper", "nickel-silver", "silver", "stainless"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -124,7 +129,7 @@ export const bleedOut: ShelfPart = {
       station: "rinse",
       why: "Racked with the hole up, it carries a thimble of acid to the bench.",
       proof: "Paper wick in the hole after the last rinse: pH paper colours.",
-      likelihood: 0.17,
+      likelihood: 0.16,
       baseMetals: ["steel", "stainless", "brass", "aluminium", "zinc", "bronze"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: ["blind hole", "threads hold acid", "tapped hole", "cup holds acid", "not drained"],
@@ -140,6 +145,27 @@ export const bleedOut: ShelfPart = {
       baseMetals: ["zinc", "aluminium"],
       sourceKeys: ["astm-b252", "common-practice", "from-memory"],
       synonyms: ["over polished casting", "skin gone", "ground too deep", "opened pores"],
+    },
+    {
+      slug: "mask-holds-solution",
+      classSlugs: ["bleed-out"],
+      title: "Mask, plug or tape holds solution",
+      station: "activate",
+      why: "A tape edge that lifts in the hot cleaner, or a plug a size too small, takes each tank in and lets it out at the bench, along the very line that should be crisp.",
+      proof:
+        "Stain starts at the mask line. Lift the mask over white paper with pH paper under it: wet means it leaked.",
+      likelihood: 0.06,
+      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "aluminium", "zinc", "silver"],
+      sourceKeys: ["common-practice", "from-memory"],
+      synonyms: [
+        "tape leaks",
+        "plug leaks",
+        "mask line stain",
+        "stop-off lifting",
+        "creeps under the tape",
+        "bleeds at the mask",
+        "lacquer edge lifts",
+      ],
     },
   ],
   fixes: [

@@ -45,7 +45,7 @@ export const burning: ShelfPart = {
     ],
     stripNote:
       "At the strike only the edges need wet abrasive. Under final plate the edge has to come down through every layer, and a sharp edge loses its shape.",
-    otherLikelihood: 0.07,
+    otherLikelihood: 0.05,
     sourceKeys: ["guidebook-copper", "guidebook-brush", "common-practice", "from-memory"],
     synonyms: [
       "burn",
@@ -86,7 +86,7 @@ export const burning: ShelfPart = {
       why: "Past its limit the bath cannot bring copper to the edge fast enough; hydrogen and powder come instead. Few parts on a rectifier set for many does the same.",
       proof:
         "Amps per dm² above the range (0.5 to 4 for a cyanide strike, guidebook). Half the voltage on the next rack and the edge stays pink.",
-      likelihood: 0.4,
+      likelihood: 0.34,
       baseMetals: [
         "steel",
         "stainless",
@@ -118,7 +118,7 @@ export const burning: ShelfPart = {
       why: "Current takes the short way. A part swung towards the anode, or a brush that stops or runs dry, gets all of it on one spot.",
       proof:
         "Dark side faces the anode, or the streak matches the brush. Turn the part or move the brush faster: the dark moves or goes.",
-      likelihood: 0.22,
+      likelihood: 0.17,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "silver", "gold"],
       sourceKeys: ["guidebook-brush", "common-practice", "from-memory"],
       synonyms: [
@@ -139,7 +139,7 @@ export const burning: ShelfPart = {
       why: "Little copper in reach lowers the current that the edge stands. Cold and too much free cyanide do the same.",
       proof:
         "Analysis: copper and free cyanide (11 to 15 g/L in the guidebook's strike), temperature 24 to 66 °C. A Hull cell with copper cyanide added widens the good range.",
-      likelihood: 0.19,
+      likelihood: 0.16,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium"],
       sourceKeys: ["guidebook-copper", "common-practice", "from-memory"],
       synonyms: ["low copper", "cold strike", "free cyanide high", "low metal", "bath out of balance"],
@@ -151,16 +151,86 @@ export const burning: ShelfPart = {
       station: "strike",
       why: "Still solution starves the edge at a current that is right when it moves.",
       proof: "Air or bar was off, or blocked at one end: the burnt racks are those that hung there.",
-      likelihood: 0.12,
+      likelihood: 0.1,
       baseMetals: ["steel", "brass", "bronze", "copper", "nickel-silver", "zinc"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: ["air off", "no agitation", "still bath", "pump stopped", "blower off"],
+    },
+    {
+      slug: "points-unshielded",
+      classSlugs: ["burning"],
+      title: "Points and outer rows take more than their share",
+      station: "strike",
+      why: "Current crowds on what sticks out: pins, fins, the corner parts of a rack. The average is right and these get several times as much.",
+      proof:
+        "Amps over area are inside the range, and the same points or the outer row burn each time. A bare wire hung beside one of them keeps it pink.",
+      likelihood: 0.09,
+      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium", "silver"],
+      sourceKeys: ["common-practice", "from-memory"],
+      synonyms: [
+        "needs a thief",
+        "no robber",
+        "pins burn",
+        "outer row burnt",
+        "sharp points",
+        "fins dark",
+        "current crowding",
+        "thieving",
+      ],
+    },
+    {
+      slug: "carbonate-high",
+      classSlugs: ["burning", "pitting"],
+      title: "Carbonate built up in the strike",
+      station: "strike",
+      why: "Air and worn-out cyanide turn to carbonate. A little helps (15 g/L in the guidebook's make-up); a lot thickens the bath, narrows the current that edges stand, and drops crystals that plate in as grit.",
+      proof:
+        "Titrate it. A sample diluted by half, with copper and cyanide brought back, gives a Hull cell with a wider good range. White crystals on a cold tank wall say the same.",
+      likelihood: 0.05,
+      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium"],
+      sourceKeys: ["guidebook-copper", "common-practice", "from-memory"],
+      synonyms: [
+        "carbonates",
+        "old strike",
+        "thick syrupy bath",
+        "washing soda in the bath",
+        "white crystals on the tank wall",
+        "bath never dumped",
+        "soda build-up",
+      ],
+    },
+    {
+      slug: "brush-solution-spent",
+      classSlugs: ["burning", "no-deposit"],
+      title: "Brush solution used up, thinned or dripped dry",
+      station: "strike",
+      why: "A cupful on a brush holds little copper. Past its ampere-hours, or thinned by the rinse before, it gives dark streaks where it is pressed and nothing at the end of the stroke.",
+      proof:
+        "Count ampere-hours against the sheet's figure. Fresh solution, fresh cover, same volts: pink all along the stroke.",
+      likelihood: 0.04,
+      baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "silver", "gold"],
+      sourceKeys: ["guidebook-brush", "common-practice", "from-memory"],
+      synonyms: [
+        "brush copper weak",
+        "run-off reused too long",
+        "solution watered down",
+        "dabbed dry",
+        "swab exhausted",
+        "brush bottle old",
+        "not feeding the brush",
+      ],
     },
   ],
   fixes: [
     {
       slug: "dress-edges-lower-current",
-      causeSlugs: ["strike-voltage-high", "anode-too-close", "agitation-stopped", "bath-lean-or-cold"],
+      causeSlugs: [
+        "strike-voltage-high",
+        "anode-too-close",
+        "agitation-stopped",
+        "bath-lean-or-cold",
+        "points-unshielded",
+      ],
       title: "Dress the edges back and re-strike lower",
       steps: [
         polishBack({
@@ -182,7 +252,7 @@ export const burning: ShelfPart = {
     },
     {
       slug: "brush-restrike",
-      causeSlugs: ["anode-too-close"],
+      causeSlugs: ["anode-too-close", "brush-solution-spent"],
       title: "Burnt under the brush: dress, then brush again wet and moving",
       steps: [
         polishBack({

@@ -37,6 +37,10 @@ export const dewetting: ShelfPart = {
         versus: "handling",
         tell: "A finger leaves ridges or a glove leaves a weave. An island of cleaner-borne oil has neither.",
       },
+      {
+        versus: "pitting",
+        tell: "Millimetres wide and flat, with an edge to trace. Pits are points that a nail catches.",
+      },
     ],
     checks: [
       "Water break: clean, rinse, acid-dip, rinse and drain (ASTM F22). The film must leave as one sheet. Do it after the acid: soap left by the cleaner can hide oil before it.",

@@ -29,6 +29,14 @@ export const handling: ShelfPart = {
         tell: "One part, or wherever the hand was. A contact point is bare at the same place on all.",
       },
       { versus: "oxidation", tell: "Colour stays inside the mark. Tarnish spreads over the face." },
+      {
+        versus: "water-spots",
+        tell: "Ridges, weave or a straight scrape, at hand height. A drop is round or ran downward.",
+      },
+      {
+        versus: "bleed-out",
+        tell: "It keeps its shape from the first look on. Bleed-out grows, and comes back after wiping.",
+      },
     ],
     checks: [
       "Lay the glove, hook or your own hand beside it: it fits or it does not.",

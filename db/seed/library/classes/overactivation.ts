@@ -37,6 +37,14 @@ export const overactivation: ShelfPart = {
         versus: "bleed-out",
         tell: "It covers faces. Bleed-out starts at a seam or a pore and creeps outward after the strike.",
       },
+      {
+        versus: "peeling",
+        tell: "Tape brings up black on both faces. A clean back and clean base metal is plain peeling.",
+      },
+      {
+        versus: "immersion-deposit",
+        tell: "The cloth turns black or grey. Red on the cloth is copper that traded places.",
+      },
     ],
     checks: [
       "Before the strike: wipe the activated part with a wet white cloth. Black now means smut now, and the strike is not to blame.",
@@ -51,7 +59,7 @@ export const overactivation: ShelfPart = {
     ],
     stripNote:
       "At the strike, copper and smut leave together under wet abrasive, but an etched face must be refinished before it goes back. Under final plate the strip acid finds the same weak metal and digs on: check fits and threads first, the part may be scrap already.",
-    otherLikelihood: 0.06,
+    otherLikelihood: 0.05,
     sourceKeys: ["astm-b242", "astm-b252", "astm-b281", "common-practice", "from-memory"],
     synonyms: [
       "black stuff",
@@ -102,8 +110,8 @@ export const overactivation: ShelfPart = {
       station: "activate",
       why: "The oxide was gone in the first seconds. After that acid dissolves the alloy unevenly and leaves carbon, lead, silicon or copper as loose black.",
       proof: "Time three racks with a watch. One part at half the time that comes off clean on the cloth proves it.",
-      likelihood: 0.3,
-      baseMetals: ["steel", "iron", "brass", "bronze", "zinc", "aluminium", "nickel-silver"],
+      likelihood: 0.27,
+      baseMetals: ["steel", "stainless", "iron", "brass", "bronze", "zinc", "aluminium", "nickel-silver"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
         "pickled too long",
@@ -125,7 +133,7 @@ export const overactivation: ShelfPart = {
       why: "A fresh make-up at the wrong strength, or a summer tank, works at several times the speed that the posted time was written for.",
       proof:
         "Titrate, and read the temperature. Dilute a litre to the card's strength, run one part for the card's time: clean means the strength was wrong.",
-      likelihood: 0.2,
+      likelihood: 0.18,
       baseMetals: ["steel", "iron", "brass", "bronze", "zinc", "aluminium"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -166,7 +174,7 @@ export const overactivation: ShelfPart = {
       why: "Sulfuric acid turns the lead of C360 and its kin into lead sulfate, which no rinse takes off; hydrochloric leaves lead chloride. Fluoboric acid keeps it in solution.",
       proof:
         "Dip one part in 5 to 10 % fluoboric acid instead. White cloth clean and copper bright settles it. The mill certificate or the alloy number does too.",
-      likelihood: 0.12,
+      likelihood: 0.11,
       baseMetals: ["brass", "bronze", "nickel-silver"],
       sourceKeys: ["astm-b281", "common-practice", "from-memory"],
       synonyms: [
@@ -221,6 +229,48 @@ export const overactivation: ShelfPart = {
         "nail test red",
         "contaminated acid",
         "blue acid",
+      ],
+    },
+    {
+      slug: "cleaner-plated-film",
+      classSlugs: ["overactivation", "peeling"],
+      title: "Electrocleaner plated its dirt on the part",
+      station: "clean",
+      why: "Run cathodic, a cleaner that holds copper, zinc, lead or chromium plates them as a loose grey or reddish film: smut before any acid. Thin enough, it hides, and the copper on it peels.",
+      proof:
+        "Wipe after the cleaner, before the acid. A scoured steel panel cathodic in the tank comes out grey or red, and clean from a fresh beaker or with the last seconds anodic.",
+      likelihood: 0.04,
+      baseMetals: ["steel", "iron", "stainless", "copper", "brass", "nickel-silver", "nickel"],
+      sourceKeys: ["astm-b322", "common-practice", "from-memory"],
+      synonyms: [
+        "cleaner smut",
+        "dirty electrocleaner",
+        "reverse switch wrong",
+        "polarity on the cleaner",
+        "metal in the cleaner",
+        "plates out in the cleaner",
+        "grey before the acid",
+        "direct current cleaning film",
+      ],
+    },
+    {
+      slug: "pewter-darkened",
+      classSlugs: ["overactivation"],
+      title: "Pewter or tin attacked by alkali or acid",
+      station: "clean",
+      why: "Hot caustic and anodic current dissolve tin; antimony, copper or lead of the alloy stay behind as grey. It is done in the cleaner, before anybody looks at the acid.",
+      proof: "Wipe after the cleaner. A part through a mild cleaner at hand warmth, with no anodic, wipes clean.",
+      likelihood: 0.03,
+      baseMetals: ["pewter"],
+      sourceKeys: ["common-practice", "from-memory"],
+      synonyms: [
+        "britannia metal dark",
+        "tin went grey",
+        "pewter smut",
+        "antimony",
+        "cleaner eats pewter",
+        "caustic on tin",
+        "tankard grey",
       ],
     },
   ],

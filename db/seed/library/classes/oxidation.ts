@@ -37,6 +37,11 @@ export const oxidation: ShelfPart = {
         versus: "bleed-out",
         tell: "It starts over open faces and edges. Bleed-out starts at a seam, hole or pore and is wet or crusted there.",
       },
+      {
+        versus: "handling",
+        tell: "Colour runs over faces and edges and goes on deepening. A touched place keeps its outline.",
+      },
+      { versus: "sound", tell: "It deepens while you watch, or it is there in bands. Fresh copper is one even pink." },
     ],
     checks: [
       "A drop of 5 % sulfuric on a rinsed and dried spot: tarnish clears to pink in seconds; smut, burning and silicate do not.",

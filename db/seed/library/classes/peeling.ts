@@ -26,6 +26,14 @@ export const peeling: ShelfPart = {
       },
       { versus: "immersion-deposit", tell: "It takes tape or a knife. An immersion deposit rubs off with a thumb." },
       { versus: "overactivation", tell: "Back of the flake and base metal are clean. Black on both is smut." },
+      {
+        versus: "pitting",
+        tell: "A bump gives under the nail, and opens hollow. A nodule is hard, and sand takes it off.",
+      },
+      {
+        versus: "sound",
+        tell: "Nothing to see: only tape, a bend or warmth tells it. That is why one part a rack is taped.",
+      },
     ],
     checks: [
       "Scribe a grid through the copper, press tape, pull it back on itself in one go. Shop practice on a strike: ASTM D3359's classes are written for paint.",
@@ -39,7 +47,7 @@ export const peeling: ShelfPart = {
     ],
     stripNote:
       "At the strike most of it comes off on tape, but take all of it: what held will be the edge of the next blister. Under final plate the sheets leave easily and the rest needs the full strip.",
-    otherLikelihood: 0.07,
+    otherLikelihood: 0.06,
     sourceKeys: ["astm-b571", "astm-d3359", "iso-2819", "common-practice", "from-memory"],
     synonyms: [
       "peeling",
@@ -88,7 +96,7 @@ export const peeling: ShelfPart = {
       station: "activate",
       why: "Their oxide comes back between acid and copper. The copper covers it whole and holds nowhere.",
       proof: "One part through Woods nickel strike and then copper holds on tape; the usual route does not.",
-      likelihood: 0.22,
+      likelihood: 0.2,
       baseMetals: ["stainless", "nickel"],
       sourceKeys: ["astm-b254", "woods-columns", "from-memory"],
       synonyms: [
@@ -107,7 +115,7 @@ export const peeling: ShelfPart = {
       station: "activate",
       why: "A coarse single zincate is weak itself, and strike that is too alkaline or entered without current dissolves it first.",
       proof: "Back of the flake is dark grey. Double zincate with live entry on one part holds.",
-      likelihood: 0.16,
+      likelihood: 0.14,
       baseMetals: ["aluminium"],
       sourceKeys: ["astm-b253", "guidebook-aluminium", "common-practice", "from-memory"],
       synonyms: [
@@ -126,7 +134,7 @@ export const peeling: ShelfPart = {
       station: "strike",
       why: "A part that hung dead, swung off its contact or was lifted out goes passive; the second copper lies on the first with no bond.",
       proof: "Copper under the flake. The meter or the plater tells of a dip in current.",
-      likelihood: 0.12,
+      likelihood: 0.1,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "nickel", "zinc", "aluminium"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -146,7 +154,7 @@ export const peeling: ShelfPart = {
       station: "clean",
       why: "A trace of chromium, lacquer or old nickel in an incomplete strip passes for base metal and is passive.",
       proof: "Spot test or file through at an edge: a layer line. The peeled place has the outline of the old plate.",
-      likelihood: 0.09,
+      likelihood: 0.07,
       baseMetals: ["steel", "brass", "copper", "zinc", "silver", "nickel-silver"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -166,7 +174,7 @@ export const peeling: ShelfPart = {
       why: "Pores just under the skin of zinc or aluminium castings take solution in or hold gas; warmth lifts the copper as a blister.",
       proof:
         "Warm a struck part gently and cut a blister: a pore is under it, and it rises in the same region of the casting each time.",
-      likelihood: 0.08,
+      likelihood: 0.06,
       baseMetals: ["zinc", "aluminium"],
       sourceKeys: ["astm-b252", "iso-2819", "common-practice", "from-memory"],
       synonyms: [
@@ -178,6 +186,28 @@ export const peeling: ShelfPart = {
         "cold shut",
         "die cast blister",
         "gas blister",
+      ],
+    },
+    {
+      slug: "hydrogen-in-steel",
+      classSlugs: ["peeling"],
+      title: "Hydrogen taken up by the steel",
+      station: "activate",
+      why: "Acid and cathodic current charge hard steel with hydrogen, and it comes out later under the copper: small blisters hours after, or all at once in the bake.",
+      proof:
+        "Tape holds at the strike and blisters come by next day or in the oven. One part cleaned anodic with no pickle stays flat. On high-strength steel it is no proof of anything more: hold it for an engineer.",
+      likelihood: 0.03,
+      baseMetals: ["steel", "iron"],
+      sourceKeys: ["astm-b850", "astm-b849", "common-practice", "from-memory"],
+      synonyms: [
+        "embrittlement",
+        "hydrogen",
+        "blisters in the oven",
+        "pops up next day",
+        "spring steel",
+        "hardened bolts",
+        "delayed blisters",
+        "needs a bake",
       ],
     },
   ],

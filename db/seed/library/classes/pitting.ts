@@ -23,6 +23,7 @@ export const pitting: ShelfPart = {
       { versus: "burning", tell: "All over or on upward faces. Burning is at edges and points." },
       { versus: "dewetting", tell: "Pinpoints a nail can feel. Islands are millimetres wide and flat." },
       { versus: "bleed-out", tell: "Dry. A pore that bleeds is wet or crusted." },
+      { versus: "peeling", tell: "Hard to the nail, and it sands down to metal. A blister gives, and opens hollow." },
     ],
     checks: [
       "Loupe and one lamp: shiny round with a tail is gas; ragged is base metal; a lump with a core is a particle.",
@@ -36,7 +37,7 @@ export const pitting: ShelfPart = {
     ],
     stripNote:
       "A nodule sands off and a gas pit in a strike sands out. A pit in the base metal stays: more polishing or filling is the customer's choice.",
-    otherLikelihood: 0.08,
+    otherLikelihood: 0.06,
     sourceKeys: ["common-practice", "from-memory"],
     synonyms: [
       "pitting",
@@ -81,7 +82,7 @@ export const pitting: ShelfPart = {
       station: "strike",
       why: "Anode sludge, carbonate, dropped dirt or a torn filter: each speck that settles is plated over.",
       proof: "Litre in a jar, overnight: sediment. Shelf panel rough, upright panel smooth. Filter a litre: smooth.",
-      likelihood: 0.32,
+      likelihood: 0.3,
       baseMetals: ["steel", "stainless", "brass", "bronze", "copper", "nickel-silver", "zinc", "aluminium", "silver"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -102,7 +103,7 @@ export const pitting: ShelfPart = {
       station: "clean",
       why: "Rust pits, casting pores, laps or polishing grit pressed in were there before; copper copies them.",
       proof: "Same pits under the loupe before the strike, or after polishing the copper off.",
-      likelihood: 0.24,
+      likelihood: 0.23,
       baseMetals: ["steel", "iron", "zinc", "aluminium", "brass", "bronze"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: ["rust pits", "casting pits", "inclusions", "embedded abrasive", "old corrosion", "rough base metal"],

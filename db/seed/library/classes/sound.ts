@@ -19,6 +19,7 @@ export const sound: ShelfPart = {
         versus: "water-spots",
         tell: "A mark that a damp cloth takes off whole copper is water on top, not a fault of the strike.",
       },
+      { versus: "peeling", tell: "Looks decide nothing here: tape at an edge and the middle lifts no flake." },
     ],
     checks: [
       "Tilt it under one lamp, wet and dry.",

@@ -37,6 +37,14 @@ export const underactivation: ShelfPart = {
         versus: "immersion-deposit",
         tell: "It needs tape to lift and it came after the power. An immersion deposit wipes off with a thumb and was there before.",
       },
+      {
+        versus: "no-deposit",
+        tell: "The bare place fades into haze, and the haze lifts. No deposit has sound copper right up to it.",
+      },
+      {
+        versus: "sound",
+        tell: "It fades somewhere, and tape finds it. Tilt it under one lamp: a thin strike that is sound is thin alike all over.",
+      },
     ],
     checks: [
       "Time the first copper. Longer than about 30 s on a good strike (common practice) points at the surface; on a coupon of known clean brass as well, it points at the strike.",
@@ -51,7 +59,7 @@ export const underactivation: ShelfPart = {
     ],
     stripNote:
       "At the strike a wet wipe of abrasive takes it off, the grip was never there. Under final plate it comes off in sheets where it was worst and not at all elsewhere, so the whole part must be stripped and repolished.",
-    otherLikelihood: 0.06,
+    otherLikelihood: 0.05,
     sourceKeys: ["astm-b322", "astm-b254", "iso-2819", "common-practice", "from-memory"],
     synonyms: [
       "won't stick",
@@ -105,7 +113,7 @@ export const underactivation: ShelfPart = {
       why: "Each part spends acid and leaves metal behind. The acid weakens, and dissolved metal slows the rest, long before it looks any different.",
       proof:
         "Titrate it, or run one part through a fresh beaker of the same make-up. If the beaker part strikes whole and the tank part does not, change it.",
-      likelihood: 0.32,
+      likelihood: 0.29,
       baseMetals: [
         "steel",
         "stainless",
@@ -138,7 +146,7 @@ export const underactivation: ShelfPart = {
       why: "The oxide needs its time: common practice is 15 to 60 s in sulfuric and 15 to 120 s in hydrochloric, at room temperature. A cold winter tank needs the long end, and so does a nested rack.",
       proof:
         "Double the time on one part, nothing else changed. Sound copper proves it; no change clears the dwell and points at the acid itself.",
-      likelihood: 0.18,
+      likelihood: 0.16,
       baseMetals: ["steel", "iron", "brass", "bronze", "copper", "nickel-silver", "nickel", "stainless"],
       sourceKeys: ["common-practice", "from-memory"],
       synonyms: [
@@ -158,8 +166,8 @@ export const underactivation: ShelfPart = {
       why: "Sulfuric does nothing useful to stainless or old nickel; plain acid leaves the silicon on cast aluminium; acid alone never readies aluminium at all. Each needs its own route: Woods nickel strike, fluoride desmut, zincate.",
       proof:
         "Read the alloy off the job card, or weigh the part in air and water, and hold it to the line card. One part through the right route that comes out sound proves it.",
-      likelihood: 0.14,
-      baseMetals: ["stainless", "nickel", "aluminium", "nickel-silver", "iron"],
+      likelihood: 0.13,
+      baseMetals: ["stainless", "nickel", "aluminium", "nickel-silver", "bronze", "iron", "other"],
       sourceKeys: ["astm-b254", "astm-b253", "guidebook-aluminium", "woods-columns", "from-memory"],
       synonyms: [
         "wrong acid",
@@ -168,6 +176,8 @@ export const underactivation: ShelfPart = {
         "sulfuric on stainless",
         "no Woods strike",
         "wrong activator",
+        "plain acid on aluminium bronze",
+        "titanium will not take",
       ],
     },
     {
@@ -178,7 +188,7 @@ export const underactivation: ShelfPart = {
       why: "Stainless, nickel and chromium-bearing alloys grow their film back in seconds once they leave acid, faster in a warm aerated rinse or as they dry. The acid worked; the walk undid it.",
       proof:
         "Run one part acid, one quick rinse, strike, in under 15 s. If that one holds, the wait is the cause. Time the usual walk with a watch.",
-      likelihood: 0.12,
+      likelihood: 0.11,
       baseMetals: ["stainless", "nickel", "aluminium", "nickel-silver"],
       sourceKeys: ["astm-b254", "common-practice", "from-memory"],
       synonyms: [
@@ -198,7 +208,7 @@ export const underactivation: ShelfPart = {
       why: "Heat-treat scale, weld or solder tint and old tarnish are thicker than an activator is meant for. It thins them and leaves the rest.",
       proof:
         "Look at the bare part under a loupe: grey or blue-black that does not wipe. Blast or abrade one spot, then run it; copper only on that spot proves scale.",
-      likelihood: 0.1,
+      likelihood: 0.09,
       baseMetals: ["steel", "stainless", "iron", "copper", "brass", "bronze"],
       sourceKeys: ["astm-b183", "astm-b254", "common-practice", "from-memory"],
       synonyms: ["heat treat scale", "mill scale", "weld tint", "heat tint", "fire scale", "solder oxide", "blueing"],
@@ -233,6 +243,50 @@ export const underactivation: ShelfPart = {
         "voltage too low",
         "anodes polarized",
         "overloaded rack",
+      ],
+    },
+    {
+      slug: "silver-tarnish-left",
+      classSlugs: ["underactivation"],
+      title: "Tarnish or fire scale left on silver or gold alloy",
+      station: "clean",
+      why: "Silver sulfide, and the copper oxide that soldering brings up on sterling and karat gold, are no oil and no rust: neither cleaner nor a quick dip takes them. Hydrochloric makes it worse, with a film of silver chloride.",
+      proof:
+        "A cathodic clean of a minute lightens sulfide to white. What stays pink-grey, in patches where the torch was, is fire scale. Abrade half a spot and strike it: copper only there proves it.",
+      likelihood: 0.04,
+      baseMetals: ["silver", "gold"],
+      sourceKeys: ["common-practice", "from-memory"],
+      synonyms: [
+        "silver tarnish",
+        "black silver",
+        "firestain",
+        "firescale on sterling",
+        "torch marks",
+        "silver chloride",
+        "sulfide",
+        "toned silver",
+      ],
+    },
+    {
+      slug: "brush-activation-off",
+      classSlugs: ["underactivation"],
+      title: "Brush activation in the wrong order, polarity or cover",
+      station: "activate",
+      why: "Etch and desmut ask for opposite leads, and an anode cover that has been in the strike carries cyanide and copper back into the acid. The face looks even and is passive or filmed.",
+      proof:
+        "Do a coin-sized spot by the sheet: fresh marked covers, polarity read off the box, timed. Copper that holds on that spot alone proves it.",
+      likelihood: 0.05,
+      baseMetals: ["steel", "stainless", "iron", "nickel", "brass", "bronze", "copper"],
+      sourceKeys: ["guidebook-brush", "common-practice", "from-memory"],
+      synonyms: [
+        "leads swapped",
+        "forward and reverse mixed up",
+        "polarity reversed",
+        "stylus activation",
+        "selective plating",
+        "shared cover",
+        "brush prep wrong",
+        "pen plating",
       ],
     },
   ],

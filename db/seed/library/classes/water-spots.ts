@@ -28,6 +28,10 @@ export const waterSpots: ShelfPart = {
         versus: "handling",
         tell: "The outline is round or runs straight down. A finger or glove leaves ridges or weave, at the height where a hand holds.",
       },
+      {
+        versus: "sound",
+        tell: "A damp cloth leaves the ring where it was. If it wipes to whole pink, it dried on top and the strike is sound.",
+      },
     ],
     checks: [
       "Wipe with a damp cloth. If the ring leaves and the copper under it is whole, it dried on top; if it stays, it lies under the strike.",
