@@ -6,7 +6,7 @@ import type { RouteVariant } from "@/lib/metals/pretreatment/route";
 export function RouteVariants({ variants }: { variants: readonly RouteVariant[] }) {
   return variants.map((variant) => (
     <article key={variant.title} className="route-variant">
-      <h3>If it is {lowerFirst(variant.title)}</h3>
+      <h3>{variant.title}</h3>
       <p>{variant.words}</p>
       {variant.cautions.map((caution) => (
         <Caution key={caution.text} level={caution.level}>
@@ -18,6 +18,3 @@ export function RouteVariants({ variants }: { variants: readonly RouteVariant[] 
     </article>
   ));
 }
-
-/** "High-strength steel" inside a sentence; an alloy's number or a 400-series keeps its letters. */
-const lowerFirst = (words: string) => words.charAt(0).toLowerCase() + words.slice(1);

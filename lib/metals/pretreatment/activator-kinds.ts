@@ -1,4 +1,5 @@
-/** Kinds of activator, and on which base metals each one does its work or harm. The one place that says so. */
+/** Kinds of activator, and on which base metals each one does its work or harm. The one place that says so,
+ * and long because it is one table. */
 import type { BaseMetal } from "@/lib/cases/case-words";
 import { COMMON, MEMORY } from "./sources";
 

@@ -1,24 +1,35 @@
 import type { BaseMetal } from "@/lib/cases/case-words";
 import { activatorsFor } from "./activators";
 import { brass } from "./brass";
+import { stainless } from "./stainless";
+import { iron } from "./iron";
+import { bronze } from "./bronze";
+import { copper } from "./copper";
+import { nickelSilver } from "./nickel-silver";
+import { nickel } from "./nickel";
+import { zinc } from "./zinc";
+import { aluminium } from "./aluminium";
+import { silver } from "./silver";
+import { gold } from "./gold";
+import { pewter } from "./pewter";
 import type { PretreatmentRoute, WrittenRoute } from "./route";
 import { sourcesNamed } from "./sources";
 import { steel } from "./steel";
 
 const ROUTES: Record<BaseMetal, WrittenRoute | null> = {
   steel,
-  stainless: null,
-  iron: null,
+  stainless,
+  iron,
   brass,
-  bronze: null,
-  copper: null,
-  "nickel-silver": null,
-  nickel: null,
-  zinc: null,
-  aluminium: null,
-  silver: null,
-  gold: null,
-  pewter: null,
+  bronze,
+  copper,
+  "nickel-silver": nickelSilver,
+  nickel,
+  zinc,
+  aluminium,
+  silver,
+  gold,
+  pewter,
   other: null,
 };
 
