@@ -38,13 +38,12 @@ const TYPED_NUMBER = /^[-+]?\d+(?:\.\d+|,(?!\d{3}$)\d+)?(?:e[-+]?\d+)?$/i;
 const toNumber = (raw: unknown) =>
   typeof raw === "string" && TYPED_NUMBER.test(raw.trim()) ? Number(raw.trim().replace(",", ".")) : orNothing(raw);
 
-const figure = (what: string) =>
-  z.preprocess(
-    toNumber,
-    z.number({
-      error: ({ input }) => (input === undefined ? `Give ${what}.` : "Write a number such as 86.4, without a unit."),
-    }),
-  );
+const number = (what: string) =>
+  z.number({
+    error: ({ input }) => (input === undefined ? `Give ${what}.` : "Write a number such as 86.4, without a unit."),
+  });
+const figure = (what: string) => z.preprocess(toNumber, number(what));
+const figureOrNone = (what: string) => z.preprocess(toNumber, number(what).optional());
 
 const lowered = (raw: unknown) =>
   typeof raw === "string" || typeof raw === "boolean" ? orNothing(String(raw).trim().toLowerCase()) : orNothing(raw);
@@ -78,7 +77,7 @@ export const partCheckSchema = z
     weightAirG: figure("the weight in air, in g"),
     weightWaterG: figure("the weight in water, in g"),
     waterTempC: figure("the water's temperature, in °C"),
-    balanceErrorG: figure("how far the balance may be off, in g").optional(),
+    balanceErrorG: figureOrNone("how far the balance may be off, in g"),
     magnetic: wordFrom(PULL_WORDS, "Use one of: none, faint, strong."),
     colour: wordFrom(COLOUR_WORDS, `Use one of: ${COLOURS.join(", ")}.`),
   })

@@ -33,9 +33,15 @@ export function partWarnings(measured: MeasuredDensity, candidates: readonly Can
 function nothingFits(measured: MeasuredDensity, candidates: readonly Candidate[], looks: Looks): string[] {
   if (candidates.length > 0) return [];
   const [byWeight] = candidatesFor(measured).candidates;
-  const seen = [looks.pull === undefined ? "" : "magnet", looks.colour === undefined ? "" : "colour"].filter(Boolean);
   if (byWeight) {
-    return [`By weight it could be ${byWeight.name}, but ${seen.join(" and ")} speak against it. Look again.`];
+    const { pull, colour } = looks;
+    const against =
+      pull === undefined
+        ? "the colour speaks"
+        : colour === undefined
+          ? "the magnet speaks"
+          : "the magnet and the colour speak";
+    return [`By weight it could be ${byWeight.name}, but ${against} against it. Look again.`];
   }
   const reads = `${measured.densityGPerCm3.toFixed(2)} g/cm³`;
   return [`No metal in the table reads ${reads}. The part may be hollow, porous, or of two metals; or weigh it again.`];

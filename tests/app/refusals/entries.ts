@@ -19,6 +19,7 @@ import * as ledgerRoute from "@/app/api/ledger/route";
 import * as libraryClassRoute from "@/app/api/library/[class]/route";
 import * as libraryEntriesRoute from "@/app/api/library/entries/route";
 import * as libraryRoute from "@/app/api/library/route";
+import * as partCheckRoute from "@/app/api/part-check/route";
 import * as photoSizeRoute from "@/app/api/photos/[id]/[size]/route";
 import * as photoRoute from "@/app/api/photos/[id]/route";
 import { priceFieldName } from "@/lib/costs/rate-fields";
@@ -428,6 +429,19 @@ export const ENTRIES: readonly Entry[] = [
     permission: "ledger.see",
     aims: "shop",
     prepare: () => () => answered(ledgerRoute.GET, "GET", "/api/ledger?by=cause", {}),
+  },
+  {
+    name: "app/api/part-check/route.ts POST",
+    permission: "part.check",
+    aims: "shop",
+    prepare: () => () =>
+      answered(
+        partCheckRoute.POST,
+        "POST",
+        "/api/part-check",
+        {},
+        { weightAirG: 100, weightWaterG: 84.89, waterTempC: 20 },
+      ),
   },
   {
     name: "app/api/photos/[id]/route.ts GET",
