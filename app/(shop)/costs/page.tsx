@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import Link from "next/link";
+import { Suspense } from "react";
 import { LedgerTable } from "@/components/costs/ledger-table";
 import { ParetoChart } from "@/components/costs/pareto-chart";
 import { LineStrip } from "@/components/line/line-strip";
@@ -27,6 +28,7 @@ import { formatMoney } from "@/lib/money";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
+import { CheckPanel } from "./check-panel";
 
 export const metadata: Metadata = { title: "Ledger" };
 
@@ -170,6 +172,15 @@ export default async function LedgerPage({ searchParams }: LedgerPageProps) {
           </p>
         </Section>
       </div>
+      <Suspense fallback={<p role="status">Adding up the runs.</p>}>
+        <CheckPanel
+          shopId={member.shopId}
+          currency={currency}
+          period={period}
+          periodWords={query.from ? `from ${span}` : `in the last ${SPAN_WORDS[query.span]}`}
+          now={now}
+        />
+      </Suspense>
       {all.length > 0 && (
         <LedgerTable
           rows={all}
