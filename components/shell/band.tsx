@@ -18,12 +18,14 @@ export interface BandProps {
 function Places({ places, here }: Pick<BandProps, "places" | "here">) {
   return (
     <nav className="places" aria-label="Places">
-      {places.map((place) => (
-        <Link key={place.slug} href={place.href} aria-current={place.slug === here ? "page" : undefined}>
-          {place.title}
-          {place.count ? <span className="waits">{place.count}</span> : null}
-        </Link>
-      ))}
+      {places
+        .filter((place) => place.isInBar)
+        .map((place) => (
+          <Link key={place.slug} href={place.href} aria-current={place.slug === here ? "page" : undefined}>
+            {place.title}
+            {place.count ? <span className="waits">{place.count}</span> : null}
+          </Link>
+        ))}
     </nav>
   );
 }

@@ -7,6 +7,8 @@ interface PlaceEntry {
   href: string;
   glyph: GlyphName;
   roles: readonly Role[];
+  /** False: it stands in the Go-to sheet and not in the desktop bar, which is full. */
+  bar?: boolean;
 }
 
 /** Where one can go, in the order of the bar. A person with several roles sees the places of all of them. */
@@ -35,6 +37,14 @@ export const PLACES = [
     glyph: "ui-library",
     roles: ["plater", "trainee", "senior", "owner"],
   },
+  {
+    slug: "metals",
+    title: "Part check",
+    href: "/metals/check",
+    glyph: "ui-part",
+    roles: ["plater", "trainee", "senior", "owner"],
+    bar: false,
+  },
   { slug: "strip", title: "Strip", href: "/costs/strip", glyph: "station-strike", roles: ["senior", "owner"] },
   { slug: "ledger", title: "Ledger", href: "/costs", glyph: "ui-money", roles: ["owner"] },
   { slug: "crew", title: "Crew", href: "/crew", glyph: "ui-crew", roles: ["owner"] },
@@ -47,6 +57,7 @@ export interface PlaceView {
   title: string;
   href: string;
   glyph: GlyphName;
+  isInBar: boolean;
   /** How much waits there. */
   count?: number;
 }
@@ -56,11 +67,15 @@ export type PlaceCounts = Partial<Record<PlaceSlug, number>>;
 
 /** The places of a person with these roles, in the order of the bar. */
 export function placesFor(roles: readonly Role[], counts: PlaceCounts = {}): PlaceView[] {
-  return PLACES.filter((place) => place.roles.some((role) => roles.includes(role))).map((place) => ({
-    slug: place.slug,
-    title: place.title,
-    href: place.href,
-    glyph: place.glyph,
-    count: counts[place.slug],
-  }));
+  const places: readonly (PlaceEntry & { slug: PlaceSlug })[] = PLACES;
+  return places
+    .filter((place) => place.roles.some((role) => roles.includes(role)))
+    .map((place) => ({
+      slug: place.slug,
+      title: place.title,
+      href: place.href,
+      glyph: place.glyph,
+      isInBar: place.bar ?? true,
+      count: counts[place.slug],
+    }));
 }

@@ -7,6 +7,8 @@ export interface PickOption {
   value: string;
   label: ReactNode;
   glyph?: GlyphName;
+  /** Instead of a glyph: a swatch, a drawing. It says nothing that the label does not. */
+  picture?: ReactNode;
   /** Second line, rows and lists only. */
   hint?: ReactNode;
   /** Figure at the right end, lists only: "64%". */
@@ -62,6 +64,7 @@ function Pick({ option, group }: { option: PickOption; group: PickGroupProps }) 
       />
       {option.keyCap && <KeyCap>{option.keyCap}</KeyCap>}
       {option.glyph && <Glyph name={option.glyph} />}
+      {option.picture}
       <span className="pick__words">
         {option.label}
         {option.hint && <small>{option.hint}</small>}
