@@ -11,6 +11,7 @@ import { FigureShelf, TableShelf } from "./figure-shelf";
 import { ACTOR, STATIONS } from "./fixtures";
 import { GlyphShelf } from "./glyph-shelf";
 import { NotThereShelf } from "./not-there-shelf";
+import { RouteShelf } from "./route-shelf";
 import { TagCards, TagForms, TagLists } from "./tag-shelf";
 import { WorthShelf } from "./worth-shelf";
 
@@ -58,6 +59,7 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <FigureShelf />
       <TableShelf />
       <WorthShelf />
+      <RouteShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">
           <LineStrip mode="thin" stations={STATIONS} pressed="activate" hrefFor={hrefFor} label="Thin line" />

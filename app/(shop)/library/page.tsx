@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import Link from "next/link";
 import { ClassCard } from "@/components/library/class-card";
 import { LibrarySearchField } from "@/components/library/library-search";
 import { LineStrip } from "@/components/line/line-strip";
@@ -69,6 +70,12 @@ export default async function LibraryPage({ searchParams }: LibraryPageProps) {
           station={station?.slug ?? null}
           classTitles={Object.fromEntries(all.map((each) => [each.slug, each.title]))}
         />
+        <p className="lib-head__more">
+          <Link className="solo" href={routes.metalRoutes()}>
+            Routes by base metal
+          </Link>
+          How each one is cleaned, woken and struck.
+        </p>
       </div>
       <Section title="Classes" aside={asideWords(station?.name, all.length, exemplars)}>
         {cards.length === 0 ? (

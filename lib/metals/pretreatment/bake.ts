@@ -2,14 +2,14 @@
 import { requirePositive } from "@/lib/input-error";
 
 /** One step of the table: from just above `overMPa` to `toMPa`. */
-interface BakeStep {
+export interface BakeStep {
   overMPa: number;
   toMPa: number;
   hours: number;
 }
 
 /** ASTM B850 (ISO 9588 is its equal), Table 1, as a public bake chart quotes it: 190 to 220 °C, at least these hours. */
-const BAKE_STEPS: readonly BakeStep[] = [
+export const BAKE_STEPS: readonly BakeStep[] = [
   { overMPa: 1000, toMPa: 1100, hours: 8 },
   { overMPa: 1100, toMPa: 1200, hours: 10 },
   { overMPa: 1200, toMPa: 1300, hours: 12 },
