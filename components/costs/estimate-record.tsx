@@ -27,7 +27,11 @@ export function EstimateRecord({ rows, classTitles }: EstimateRecordProps) {
       <DataTable
         caption="Hands-on minutes of closed cases: estimated against recorded"
         columns={[
-          { key: "class", head: "Class", cell: (row) => (row.classSlug === null ? <b>{titleOf(row)}</b> : titleOf(row)) },
+          {
+            key: "class",
+            head: "Class",
+            cell: (row) => (row.classSlug === null ? <b>{titleOf(row)}</b> : titleOf(row)),
+          },
           { key: "method", head: "Way", cell: (row) => STRIP_METHOD_TITLES[row.method] },
           { key: "pairs", head: "Cases", numeric: true, cell: (row) => row.pairs },
           { key: "estimated", head: "Estimated", numeric: true, cell: (row) => eachWords(row.estimatedMinutes, row) },
@@ -38,8 +42,8 @@ export function EstimateRecord({ rows, classTitles }: EstimateRecordProps) {
         rowKey={(row) => `${row.method}-${row.classSlug ?? ""}`}
       />
       <Rests>
-        Hands-on minutes a case, mean of the newest closed cases. From {LEAST_PAIRS} cases on, estimates of that class and
-        way are multiplied by recorded over estimated, drawn towards 1; with fewer, by the ratio of the way over all
+        Hands-on minutes a case, mean of the newest closed cases. From {LEAST_PAIRS} cases on, estimates of that class
+        and way are multiplied by recorded over estimated, drawn towards 1; with fewer, by the ratio of the way over all
         classes.
       </Rests>
     </>

@@ -19,7 +19,10 @@ export const HARDNESS: Record<DepositMetal, Hardness> = {
   Pd: { hv: threePoint(200, 300, 450), source: "common practice, from memory" },
   Rh: { hv: threePoint(700, 850, 1000), source: "common practice, from memory" },
   Pt: { hv: threePoint(200, 350, 500), source: "from memory" },
-  Cr: { hv: threePoint(800, 950, 1100), source: "hard chromium, trade forum finishing.com/445/17" },
+  Cr: {
+    hv: threePoint(800, 950, 1100),
+    source: "hard chromium, trade forum finishing.com/445/17 (900 to 1100); micro-cracked from 800, findanyanswer.com",
+  },
   Zn: { hv: threePoint(40, 80, 120), source: "common practice, from memory" },
   Sn: { hv: threePoint(4, 8, 15), source: "common practice, from memory" },
   Co: { hv: threePoint(200, 300, 400), source: "from memory" },

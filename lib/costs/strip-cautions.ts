@@ -15,11 +15,14 @@ export const CAUTIONS = {
     stop: true,
     words: "Nitric acid gives off brown nitrogen oxides: extraction on, stay out of the fume.",
   },
+  cadmium: { stop: true, words: "Cadmium poisons: extraction on, gloves, and its waste kept apart." },
   acidMist: { stop: false, words: "Acid mist: extraction on, goggles and gloves." },
   nickel: { stop: false, words: "Nickel in the bath and its mist: gloves and extraction." },
   hotCaustic: { stop: false, words: "Hot caustic burns skin and eyes: face shield." },
   dilutionHeat: { stop: false, words: "Acid heats up on mixing: acid into water, never water into acid." },
   keepDry: { stop: false, words: "Dry part in, no water in the bath: with water it goes for the steel." },
+  dryOrItEtches: { stop: false, words: "Dry part in, no water in the bath: with water it etches the part." },
+  smuts: { stop: false, words: "Leaves a smut: wipe it off and rinse before the part goes on." },
   pitting: { stop: false, words: "Can pit steel: take it out as soon as the deposit is off." },
   stopAtCopper: { stop: false, words: "Stop at the copper." },
   watchTime: { stop: false, words: "Etches the part when left in: stand by." },
@@ -37,6 +40,8 @@ export const CAUTIONS = {
   },
 } as const satisfies Record<string, { stop: boolean; words: string }>;
 export type CautionKey = keyof typeof CAUTIONS;
+// Object.keys forgets the keys' type; the object is `as const` and not extended anywhere.
+export const CAUTION_KEYS = Object.keys(CAUTIONS) as [CautionKey, ...CautionKey[]];
 
 const STOP_WORDS: ReadonlySet<string> = new Set(
   Object.values(CAUTIONS).flatMap((caution) => (caution.stop ? [caution.words] : [])),

@@ -27,15 +27,20 @@ export interface DissolvingRow {
   holdingGPerL: ThreePoint;
   /** Price of a litre made up; absent: the shop's one price for strip solution. */
   solutionCentsPerL?: number;
-  /** Base metals on which it is known to stop or to do no harm. */
+  /** Base metals on which it is known to stop or to do no harm. One in neither list: nobody vouches, and it is not offered. */
   safeOn: readonly BaseMetal[];
+  /** How the shop knows that it is safe there, where it was the shop that found out. */
+  safeBecause?: Readonly<Partial<Record<BaseMetal, string>>>;
   /** Base metals that it goes on into, each with the reason in a sentence. */
   attacks: Readonly<Partial<Record<BaseMetal, string>>>;
   /** It lifts the deposit by way of this metal right beneath it, and works only then. */
   needsBeneath?: DepositMetal;
   cautions: readonly CautionKey[];
+  /** Where solution and base metals come from. */
   source: string;
   rateSource: string;
+  /** Where the metal that a litre holds comes from; absent: from memory. */
+  holdingSource?: string;
 }
 
 /** Polishing by hand or wheel, on any deposit and base metal. */

@@ -126,7 +126,7 @@ export function sourcesFor(steps: readonly StripStep[]): string[] {
     } else {
       sources.add(`${step.row.solution}, for ${name}: ${step.row.source}`);
       sources.add(`Rate for ${name}: ${step.row.rateSource}`);
-      sources.add(`Metal that a litre holds: from memory`);
+      sources.add(`Metal that a litre holds: ${step.row.holdingSource ?? "from memory"}`);
     }
   }
   return [...sources];
