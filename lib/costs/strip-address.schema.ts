@@ -8,7 +8,11 @@ const MOST_CHARS = 60;
 const text = z
   .preprocess(
     (raw: unknown) => (Array.isArray(raw) ? (raw as unknown[])[0] : raw),
-    z.string().trim().overwrite((typed) => typed.slice(0, MOST_CHARS)).optional(),
+    z
+      .string()
+      .trim()
+      .overwrite((typed) => typed.slice(0, MOST_CHARS))
+      .optional(),
   )
   .catch(undefined);
 

@@ -1,0 +1,132 @@
+"use client";
+
+import { CrossSection, SectionLeaders } from "@/components/costs/cross-section";
+import { LayerRow } from "@/components/costs/estimate-layer-row";
+import type { StripEditing } from "@/components/costs/estimate-editing";
+import { Button } from "@/components/ui/button";
+import { Field, SelectField } from "@/components/ui/field";
+import { Glyph } from "@/components/ui/glyph";
+import { PickGroup } from "@/components/ui/pick";
+import { Section } from "@/components/ui/section";
+import { BASE_METAL_TITLES, BASE_METALS, type BaseMetal } from "@/lib/cases/case-words";
+import { sectionScale } from "@/lib/costs/section-scale";
+import { changeStack, withThicknessUnit } from "@/lib/costs/strip-typing";
+import { STACK_LIMITS, type Layer, type WeighedLayer } from "@/lib/plating/deposit-stack";
+
+const BASE_OPTIONS = BASE_METALS.map((metal) => ({ value: metal, label: BASE_METAL_TITLES[metal] }));
+
+interface StripLayersProps extends StripEditing {
+  /** What is drawn and weighed: the last stack that could be read. */
+  drawn: { stack: readonly Layer[]; layers: readonly WeighedLayer[]; baseMetal: BaseMetal } | null;
+}
+
+/** What is on the part: the deposit cut through, and a row for each layer to change it by. */
+export function StripLayers({ drawn, ...editing }: StripLayersProps) {
+  const { typed, faults, onChange } = editing;
+  // While a row is half typed the drawing keeps its rows apart; it follows as soon as the stack can be read.
+  const isInStep = drawn !== null && drawn.stack.length === typed.layers.length;
+  const scale = drawn && isInStep ? sectionScale(drawn.stack.map((layer) => layer.thicknessUm)) : null;
+  const isAllToScale = scale?.bands.every((band) => band.isToScale) ?? true;
+  return (
+    <Section
+      title="What is on the part"
+      aside={isAllToScale ? "Layers to scale, base cut short" : "To scale but where it says so, base cut short"}
+      className="est-stack"
+    >
+      <div className="est-cut">
+        <div className="est-cut__drawing">
+          {drawn && scale && <CrossSection layers={drawn.stack} scale={scale} baseMetal={drawn.baseMetal} />}
+        </div>
+        <div className="est-cut__leaders">{scale && <SectionLeaders scale={scale} />}</div>
+        <ol className="est-cut__rows" reversed start={typed.layers.length}>
+          {typed.layers
+            .map((layer, index) => (
+              <LayerRow
+                key={index}
+                {...editing}
+                layer={layer}
+                place={index + 1}
+                weighed={isInStep ? drawn.layers[index] : undefined}
+                isToScale={scale?.bands[index]?.isToScale ?? true}
+              />
+            ))
+            .toReversed()}
+          <BaseRow {...editing} />
+        </ol>
+      </div>
+      {faults.stack && <FaultLine words={faults.stack} />}
+      <StackButtons typed={typed} onChange={onChange} />
+    </Section>
+  );
+}
+
+function BaseRow({ typed, faults, onChange }: StripEditing) {
+  return (
+    <li className="est-layer est-layer--base">
+      <div className="est-layer__fields">
+        <SelectField
+          label="Base metal"
+          name="base"
+          options={BASE_OPTIONS}
+          placeholder="Choose"
+          value={BASE_METALS.some((metal) => metal === typed.base) ? typed.base : ""}
+          onChange={(event) => onChange({ ...typed, base: event.target.value })}
+          error={faults.base}
+        />
+        <Field
+          label="Alloy"
+          name="alloy"
+          maxLength={60}
+          value={typed.alloy}
+          onChange={(event) => onChange({ ...typed, alloy: event.target.value })}
+        />
+      </div>
+      <p className="est-layer__words">Every way is checked against the base metal.</p>
+    </li>
+  );
+}
+
+function StackButtons({ typed, onChange }: Pick<StripEditing, "typed" | "onChange">) {
+  const press = (change: string) => ({
+    type: "submit" as const,
+    name: "do",
+    value: change,
+    onClick: (event: { preventDefault: () => void }) => {
+      event.preventDefault();
+      onChange(changeStack(typed, change));
+    },
+  });
+  const isFull = typed.layers.length >= STACK_LIMITS.layers;
+  return (
+    <div className="est-stack__foot">
+      <Button {...press("add")} glyph="ui-plus" disabledReason={isFull ? "12 layers are the most." : undefined}>
+        Add a layer
+      </Button>
+      <Button {...press("off")} disabled={typed.layers.length <= 1}>
+        Take the top one off
+      </Button>
+      <PickGroup
+        legend="Thickness in"
+        hideLegend
+        name="thicknessUnit"
+        kind="radio"
+        layout="bar"
+        options={[
+          { value: "um", label: "µm" },
+          { value: "mil", label: "mil" },
+        ]}
+        value={typed.thicknessUnit === "mil" ? "mil" : "um"}
+        onChange={(event) => onChange(withThicknessUnit(typed, event.target.value))}
+      />
+    </div>
+  );
+}
+
+function FaultLine({ words }: { words: string }) {
+  return (
+    <p className="field__error" role="alert">
+      <Glyph name="ui-caution" size={20} />
+      {words}
+    </p>
+  );
+}
