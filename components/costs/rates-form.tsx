@@ -1,12 +1,8 @@
-"use client";
-
-import { useActionState } from "react";
 import { FormAnswer } from "@/components/crew/form-answer";
 import { RatesRow, type RateRowView } from "@/components/costs/rates-row";
 import { Field } from "@/components/ui/field";
-import { SubmitButton } from "@/components/ui/submit-button";
 import { fieldFault, typed, type ActState } from "@/lib/act-state";
-import { RATES_LIMITS } from "@/lib/costs/rates.schema";
+import { RATES_LIMITS } from "@/lib/costs/typed-rates";
 
 export interface RatesGroup {
   title: string;
@@ -18,25 +14,36 @@ export interface RatesGroup {
 }
 
 /** What the action answers: the first day, and how many rates differ from before. */
-interface SetAnswer {
+export interface SetAnswer {
   from: string;
   changed: number;
 }
 
 export interface RatesFormProps {
-  /** The thumb bar's button sends it by this id. */
+  /** Buttons outside it send it by this id. */
   id: string;
   groups: readonly RatesGroup[];
   /** "2026-07-14" in the shop's zone: the first day that may be chosen. */
   today: string;
-  action: (previous: ActState<SetAnswer>, form: FormData) => Promise<ActState<SetAnswer>>;
+  state: ActState<SetAnswer>;
+  action: (form: FormData) => void;
+  /** By field name: how far what is typed moves from what holds. */
+  moves: Readonly<Record<string, string>>;
+  /** The form as it stands, after every key and after React put it back. */
+  onTyped: (form: HTMLFormElement) => void;
 }
 
-/** Adds a row of rates from a day on. Every field begins with what holds now. */
-export function RatesForm({ id, groups, today, action }: RatesFormProps) {
-  const [state, send] = useActionState(action, null);
+/** Rates from a day on. Every field begins with what holds now, and keeps what was typed when it is refused. */
+export function RatesForm({ id, groups, today, state, action, moves, onTyped }: RatesFormProps) {
   return (
-    <form className="rates-form" id={id} action={send}>
+    <form
+      className="rates-form"
+      id={id}
+      action={action}
+      onInput={({ currentTarget }) => onTyped(currentTarget)}
+      // The event comes before the fields are put back.
+      onReset={({ currentTarget }) => queueMicrotask(() => onTyped(currentTarget))}
+    >
       <FormAnswer state={state} done={{ title: "The rates are set", words: doneWords(state) }} />
       <Field
         label="Hold from"
@@ -49,7 +56,7 @@ export function RatesForm({ id, groups, today, action }: RatesFormProps) {
         error={fieldFault(state, "validFrom")}
       />
       {groups.map((group) => (
-        <Group key={group.title} group={group} state={state} />
+        <Group key={group.title} group={group} state={state} moves={moves} />
       ))}
       <Field
         label="Where the figures come from"
@@ -60,9 +67,6 @@ export function RatesForm({ id, groups, today, action }: RatesFormProps) {
         defaultValue={typed(state, "source")}
         error={fieldFault(state, "source")}
       />
-      <SubmitButton variant="main" className="desk-only">
-        Save the rates
-      </SubmitButton>
     </form>
   );
 }
@@ -74,9 +78,15 @@ function doneWords(state: ActState<SetAnswer>): string | undefined {
   return `From ${from}. ${changed === 1 ? "One rate differs" : `${changed} rates differ`} from what held before.`;
 }
 
-function Group({ group, state }: { group: RatesGroup; state: ActState<SetAnswer> }) {
+function Group({ group, state, moves }: { group: RatesGroup } & Pick<RatesFormProps, "state" | "moves">) {
   const rows = group.rows.map((row) => (
-    <RatesRow key={row.name} row={row} typed={typed(state, row.name, row.value)} error={fieldFault(state, row.name)} />
+    <RatesRow
+      key={row.name}
+      row={row}
+      typed={typed(state, row.name, row.value)}
+      error={fieldFault(state, row.name)}
+      move={moves[row.name]}
+    />
   ));
   if (!group.folded) {
     return (

@@ -20,14 +20,16 @@ interface RatesRowProps {
   /** What was typed before a refusal. */
   typed: string;
   error?: string;
+  /** How far what is typed moves from what holds: "+7.7%". */
+  move?: string;
 }
 
 /** A rate: what it is, what holds now, and the field for what holds next. */
-export function RatesRow({ row, typed, error }: RatesRowProps) {
+export function RatesRow({ row, typed, error, move }: RatesRowProps) {
   const id = useId();
   const described = [`${id}-now`, row.note && `${id}-note`, error && `${id}-error`].filter(Boolean).join(" ");
   return (
-    <div className="rate-row">
+    <div className={move ? "rate-row rate-row--moved" : "rate-row"}>
       <label htmlFor={id}>
         {row.label}
         {row.note && <small id={`${id}-note`}>{row.note}</small>}
@@ -35,6 +37,7 @@ export function RatesRow({ row, typed, error }: RatesRowProps) {
       <p className="rate-row__now" id={`${id}-now`}>
         <span>now </span>
         {row.now}
+        {move && <b className="rate-row__move">{move}</b>}
       </p>
       <span className="rate-row__field">
         <input

@@ -1,13 +1,10 @@
 import { z } from "zod";
-import { priceFieldName, priceUnit, recoveredFieldName, type RateFigures } from "@/lib/costs/rate-fields";
-import { HIGHEST_RATE_CENTS } from "@/lib/costs/rates";
+import { priceFieldName, recoveredFieldName } from "@/lib/costs/rate-fields";
+import { figuresFrom, RATES_LIMITS } from "@/lib/costs/typed-rates";
 import { readDecimal } from "@/lib/decimal";
 import { DEPOSIT_METALS } from "@/lib/plating/metals";
 
-export const RATES_LIMITS = { sourceChars: 240 } as const;
-
 const NOT_A_NUMBER = "Write a number such as 56 or 56.50, without spaces or a thousands mark.";
-const MOST = HIGHEST_RATE_CENTS / 100;
 
 /** A typed amount of money: in whole units of the currency. */
 const amount = (what: string) =>
@@ -15,7 +12,7 @@ const amount = (what: string) =>
     .string({ error: `Give ${what}.` })
     .trim()
     .min(1, `Give ${what}.`)
-    .transform((typed, context) => readWithin(typed, MOST, context));
+    .transform((typed, context) => readWithin(typed, RATES_LIMITS.money, context));
 
 /** The same, where an empty field means that nothing is set. */
 const amountOrNone = (most: number) =>
@@ -33,8 +30,8 @@ function readWithin(typed: string, most: number, context: z.RefinementCtx): numb
   return z.NEVER;
 }
 
-const price = amountOrNone(MOST);
-const recovered = amountOrNone(100);
+const price = amountOrNone(RATES_LIMITS.money);
+const recovered = amountOrNone(RATES_LIMITS.percent);
 // Object.fromEntries forgets its keys; they are exactly the metals'.
 const priceInputs = Object.fromEntries(DEPOSIT_METALS.map((metal) => [priceFieldName(metal), price])) as Record<
   ReturnType<typeof priceFieldName>,
@@ -72,34 +69,3 @@ export const ratesInput = typedRates.transform(({ validFrom, source, ...typed })
   figures: figuresFrom(typed),
 }));
 export type RatesInput = z.output<typeof ratesInput>;
-
-type TypedFigures = Omit<z.output<typeof typedRates>, "validFrom" | "source">;
-
-function figuresFrom(typed: TypedFigures): RateFigures {
-  const metalCentsPerG: RateFigures["metalCentsPerG"] = Object.fromEntries(
-    DEPOSIT_METALS.flatMap((metal) => {
-      const figure = typed[priceFieldName(metal)];
-      return figure === undefined ? [] : [[metal, inCents(figure / priceUnit(metal).grams)]];
-    }),
-  );
-  const recoveryShare: RateFigures["recoveryShare"] = Object.fromEntries(
-    DEPOSIT_METALS.flatMap((metal) => {
-      const percent = typed[recoveredFieldName(metal)];
-      return percent === undefined ? [] : [[metal, percent / 100]];
-    }),
-  );
-  return {
-    labourCentsPerHour: inCents(typed.labour),
-    lineCentsPerHour: inCents(typed.line),
-    abrasiveCentsPerMinute: inCents(typed.abrasive),
-    solutionCentsPerL: inCents(typed.solution),
-    wasteCentsPerL: inCents(typed.waste),
-    metalCentsPerG,
-    recoveryShare,
-  };
-}
-
-/** Whole units to cents. Rounded far below the four decimals that may be typed for a kilogram, to shed binary dust. */
-function inCents(figure: number): number {
-  return Number((figure * 100).toFixed(8));
-}

@@ -61,7 +61,7 @@ function testPiecesFrom(rate: ReturnType<typeof getCheckRate>, labourCentsPerHou
   const faultyRunShare = isOwn ? rate.badRuns / rate.runs : USUAL_START.faultyRunShare;
   const spoiltRunCents = isOwn ? rate.badRunCents / rate.badRuns : 0;
   const percent = (share: number) => decimalText(Number((share * 100).toFixed(1)));
-  const money = (cents: number) => decimalText(Math.round(cents) / 100);
+  const money = (cents: number) => (Math.round(cents) / 100).toFixed(2);
   const typed: TypedTestPieces = {
     badPercent: percent(badShare),
     wantedPercent: WANTED_PERCENT,

@@ -1,15 +1,23 @@
 import type { Metadata } from "next";
 import Link from "next/link";
-import { RatesForm, type RatesGroup } from "@/components/costs/rates-form";
+import { RatesDesk, type RatesDeskProps } from "@/components/costs/rates-desk";
+import type { RatesGroup } from "@/components/costs/rates-form";
 import { RatesHistory, type RatesRowStory } from "@/components/costs/rates-history";
+import { markWords } from "@/components/costs/rates-timeline";
 import { ShopShell } from "@/components/shell/shop-shell";
-import { Lead } from "@/components/ui/lead";
 import { Note } from "@/components/ui/note";
 import { Rests } from "@/components/ui/rests";
-import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
-import { getRatesAt, listMetalsInUse, listRatesHistory, type RatesHistoryRow } from "@/db/queries/rates";
+import { countOpenCases } from "@/db/queries/rate-examples";
+import {
+  getRatesAt,
+  listMetalsInUse,
+  listRatesHistory,
+  type DatedRates,
+  type RatesHistoryRow,
+} from "@/db/queries/rates";
 import { dayWords } from "@/lib/cases/moment-words";
+import { counted } from "@/lib/cases/part-words";
 import { dayOf } from "@/lib/costs/period";
 import {
   currencySign,
@@ -23,6 +31,7 @@ import { ratesStory } from "@/lib/costs/rates-story";
 import { STARTING_RATES_SOURCE } from "@/lib/costs/starting-rates";
 import type { DepositMetal } from "@/lib/plating/metals";
 import { routes } from "@/lib/routes";
+import { getRatesBench } from "@/lib/server/costs/rate-examples";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
 import { addRates } from "../actions";
@@ -39,8 +48,10 @@ export default async function RatesPage() {
   const db = getDb();
   const now = Date.now();
   const held = getRatesAt(db, member.shopId, now);
-  const stories = storyViews(listRatesHistory(db, member.shopId), now, timeZone, currency);
+  const history = ratesStory(listRatesHistory(db, member.shopId), now, currency);
+  const stories = history.map((story) => storyView(story, timeZone));
   const ahead = stories.findLast((story) => story.standing === "ahead");
+  const open = countOpenCases(db, member.shopId);
   const { actor, counts } = shellFor(member);
   return (
     <ShopShell
@@ -53,35 +64,77 @@ export default async function RatesPage() {
       <p className="lib-crumb">
         <Link href={routes.ledger()}>Ledger</Link>
       </p>
-      <div className="rates-head">
-        <Lead>
-          {`These rates hold since ${dayWords(held.validFromAt, timeZone)}.${ahead ? ` New ones start on ${ahead.from}.` : ""}`}
-        </Lead>
-        <Rests>
-          A case keeps the rates of its day: a new row touches no case snapped before it starts. Rows are added, never
-          changed; a mistake is corrected by a later row. Currency: {currency}, before tax.
-        </Rests>
-        {held.source === STARTING_RATES_SOURCE && (
-          <Note tone="amber" title="These are starting rates, from memory">
-            Every cost rests on them until the shop sets its own.
-          </Note>
-        )}
-      </div>
-      <div className="rates-grid">
-        <Section title="Set rates from a day on" aside={`Now: ${held.source}`}>
-          <RatesForm
-            id={FORM_ID}
-            groups={groupsOf(held, listMetalsInUse(db, member.shopId), currency)}
-            today={dayOf(now, timeZone)}
-            action={addRates}
-          />
-        </Section>
-        <Section title="Rows by date" aside="Latest start first">
-          <RatesHistory rows={stories} />
-        </Section>
-      </div>
+      <RatesDesk
+        id={FORM_ID}
+        groups={groupsOf(held, listMetalsInUse(db, member.shopId), currency)}
+        today={dayOf(now, timeZone)}
+        todayWords={shortDay(now, timeZone)}
+        held={figuresOf(held)}
+        currency={currency}
+        bench={getRatesBench(db, member.shopId, now)}
+        lead={`These rates hold since ${dayWords(held.validFromAt, timeZone)}.${ahead ? ` New ones start on ${ahead.from}.` : ""}`}
+        below={<Below open={open} currency={currency} isStarting={held.source === STARTING_RATES_SOURCE} />}
+        marks={marksOf(history, timeZone)}
+        aside={`Now: ${held.source}`}
+        history={<RatesHistory rows={stories} />}
+        action={addRates}
+      />
     </ShopShell>
   );
+}
+
+interface BelowProps {
+  open: number;
+  currency: string;
+  isStarting: boolean;
+}
+
+function Below({ open, currency, isStarting }: BelowProps) {
+  const stays = open === 0 ? "" : `, and so ${open === 1 ? "does" : "do"} the ${counted(open, "open case")}`;
+  return (
+    <>
+      <Rests>
+        A case keeps the rates of its day: what is closed stays as it is{stays}. Rows are added, never changed; a
+        mistake is corrected by a later row. Currency: {currency}, before tax.
+      </Rests>
+      {isStarting && (
+        <Note tone="amber" title="These are starting rates, from memory">
+          Every cost rests on them until the shop sets its own.
+        </Note>
+      )}
+    </>
+  );
+}
+
+type Story = ReturnType<typeof ratesStory<RatesHistoryRow>>[number];
+
+/** Rows that have passed: so many fit on the line of time beside the one that holds and those ahead. */
+const PAST_MARKS = 2;
+
+/** The row that holds with its neighbours, the earliest first. */
+function marksOf(history: readonly Story[], timeZone: string): RatesDeskProps["marks"] {
+  const isPast = ({ standing }: Story) => standing === "before";
+  const past = history.filter(isPast).slice(0, PAST_MARKS);
+  return history
+    .filter((story) => !isPast(story) || past.includes(story))
+    .toReversed()
+    .map(({ row, standing, changes }) => ({
+      id: String(row.id),
+      day: dayOf(row.validFromAt, timeZone),
+      from: dayWords(row.validFromAt, timeZone),
+      standing,
+      words: markWords(changes),
+    }));
+}
+
+function shortDay(at: number, timeZone: string): string {
+  return new Intl.DateTimeFormat("en-GB", { timeZone, day: "numeric", month: "short" }).format(at);
+}
+
+/** The figures alone, as the browser needs them. */
+function figuresOf(rates: DatedRates): RateFigures {
+  const { id: _id, source: _source, validFromAt: _from, ...figures } = rates;
+  return figures;
 }
 
 function groupsOf(held: RateFigures, inUse: readonly DepositMetal[], currency: string): RatesGroup[] {
@@ -107,13 +160,13 @@ function groupsOf(held: RateFigures, inUse: readonly DepositMetal[], currency: s
   ];
 }
 
-function storyViews(rows: RatesHistoryRow[], now: number, timeZone: string, currency: string): RatesRowStory[] {
-  return ratesStory(rows, now, currency).map(({ row, standing, changes }) => ({
+function storyView({ row, standing, changes }: Story, timeZone: string): RatesRowStory {
+  return {
     id: row.id,
     from: dayWords(row.validFromAt, timeZone),
     standing,
     changes,
     setBy: row.setByName ? `${row.setByName}, ${dayWords(row.setAt, timeZone)}` : "Came with the shop",
     source: row.rates.source,
-  }));
+  };
 }
