@@ -23,6 +23,9 @@ export const routes = {
   practice: (query?: Record<string, string>) => withQuery("/practice", query),
   practiceProgress: (query?: Record<string, string>) => withQuery("/practice/progress", query),
   practiceDrills: () => "/practice/drills",
+  practiceQuestion: (id: string) => `/practice/questions/${id}`,
+  /** The photo of a question, for the person asked alone: its address tells nothing of photo or case. */
+  practicePhoto: (id: string, size: "view" | "thumb") => `/api/practice/questions/${id}/photo?size=${size}`,
   libraryEdit: (entry: "class" | "cause" | "fix", slug: string) => `/library/edit/${entry}/${slug}`,
   libraryNew: (entry: "class" | "cause" | "fix") => `/library/edit/${entry}`,
   libraryRevisions: (entry: "class" | "cause" | "fix", slug: string) => `/library/edit/${entry}/${slug}/revisions`,
