@@ -1,8 +1,9 @@
 "use client";
 
 import { useActionState, useState, type ReactNode } from "react";
+import { ExamplePicks } from "@/components/costs/example-picks";
 import { RatesForm, type RatesFormProps, type RatesGroup, type SetAnswer } from "@/components/costs/rates-form";
-import { ExamplePicks, RatesPreviewView } from "@/components/costs/rates-preview";
+import { RatesPreviewView } from "@/components/costs/rates-preview";
 import { RatesTimeline, type RatesMark } from "@/components/costs/rates-timeline";
 import { Button } from "@/components/ui/button";
 import { Lead } from "@/components/ui/lead";

@@ -1,5 +1,4 @@
-import { SelectField } from "@/components/ui/field";
-import { PickGroup, type PickOption } from "@/components/ui/pick";
+import { PreviewTable } from "@/components/costs/preview-table";
 import { Rests } from "@/components/ui/rests";
 import type { NamedExample } from "@/lib/costs/rates-bench";
 import type { PreviewLine, PreviewStage, RatesPreview } from "@/lib/costs/rates-preview";
@@ -31,14 +30,14 @@ export function RatesPreviewView(props: RatesPreviewViewProps) {
       <p className="rates-what__big" aria-live="polite">
         {isTouched ? previewHeadline(preview, example.quantity, currency) : "Type a rate: this shows what it does."}
       </p>
-      <StageTable
+      <PreviewTable
         {...table}
         head={methodWords(later)}
         lines={later.lines}
         stage={later}
         total={example.stageFound === "returned" ? "Sent back" : "After final plate"}
       />
-      <StageTable
+      <PreviewTable
         {...table}
         head="At the strike"
         lines={strikeLines(atStrike)}
@@ -118,107 +117,4 @@ function strikeLines({ lines }: PreviewStage): PreviewLine[] {
     gathered,
     ...shown.filter(({ key }) => key === "scrapRisk"),
   ];
-}
-
-interface StageTableProps {
-  head: string;
-  thenHead: string;
-  lines: readonly PreviewLine[];
-  stage: PreviewStage;
-  total: string;
-  currency: string;
-}
-
-function StageTable({ head, thenHead, lines, stage, total, currency }: StageTableProps) {
-  const money = (cents: number) => formatMoney(cents, currency);
-  return (
-    <table className="tb rates-what__table">
-      <caption className="sr-only">{total}: what it costs now, at the new rates, and the difference</caption>
-      <thead>
-        <tr>
-          <th scope="col">{head}</th>
-          <th scope="col" className="n">
-            Now
-          </th>
-          <th scope="col" className="n">
-            {thenHead}
-          </th>
-          <th scope="col" className="n">
-            More
-          </th>
-        </tr>
-      </thead>
-      <tbody>
-        {lines.map((line) => (
-          <tr key={line.name}>
-            <th scope="row">{line.name}</th>
-            <td className="n">{money(line.nowCents)}</td>
-            <td className="n">{money(line.thenCents)}</td>
-            <More cents={line.thenCents - line.nowCents} currency={currency} />
-          </tr>
-        ))}
-      </tbody>
-      <tfoot>
-        <tr>
-          <th scope="row">{total}</th>
-          <td className="n">{money(stage.now.meanCents)}</td>
-          <td className="n">{money(stage.then.meanCents)}</td>
-          <More cents={stage.then.meanCents - stage.now.meanCents} currency={currency} />
-        </tr>
-      </tfoot>
-    </table>
-  );
-}
-
-function More({ cents, currency }: { cents: number; currency: string }) {
-  if (cents === 0) return <td className="n quiet">0</td>;
-  return <td className="n rates-what__more">{formatMoney(cents, currency).replace("-", "−")}</td>;
-}
-
-/** Which rework the rates are tried on: the dearest case, the usual job, or a closed case by its reference. */
-export function ExamplePicks({
-  examples,
-  chosen,
-  onChoose,
-}: {
-  examples: readonly NamedExample[];
-  chosen: NamedExample;
-  onChoose: (id: string) => void;
-}) {
-  const closed = examples.filter(({ kind }) => kind === "case");
-  const options: PickOption[] = examples
-    .filter(({ kind }) => kind !== "case")
-    .map((each) => ({
-      value: each.id,
-      label: each.title,
-      hint: each.kind === "dearest" ? `dearest, ${each.note}` : each.note,
-    }));
-  const [newest] = closed;
-  if (newest) {
-    const value = chosen.kind === "case" ? chosen.id : newest.id;
-    options.push({ value, label: "Another closed case", hint: `the ${closed.length} newest` });
-  }
-  return (
-    <>
-      <PickGroup
-        legend="Example"
-        hideLegend
-        kind="radio"
-        name="example"
-        layout="rows"
-        options={options}
-        value={chosen.id}
-        onChange={(event) => onChoose(event.target.value)}
-      />
-      {chosen.kind === "case" && (
-        <SelectField
-          label="Case"
-          name="exampleCase"
-          value={chosen.id}
-          onChange={(event) => onChoose(event.target.value)}
-          options={closed.map((each) => ({ value: each.id, label: `${each.ref}: ${each.title}, ${each.note}` }))}
-        />
-      )}
-    </>
-  );
 }

@@ -37,7 +37,7 @@ interface LeadFacts {
   changed: number;
   /** "on 1 August"; null: no day is given. */
   day: string | null;
-  /** Labels of the rates that are no figures yet. */
+  /** Labels of the rates that are no numbers yet. */
   waitsFor: readonly string[];
   later: PreviewStage | null;
 }
@@ -51,12 +51,12 @@ export function ratesLead({ changed, day, waitsFor, later }: LeadFacts): string 
   return later ? `${opening}The same rework would cost ${shareMore(later)}.` : opening.trim();
 }
 
-/** @example waitWords(["Labour", "Gold"]) === "Labour and gold are no figures yet." */
+/** @example waitWords(["Labour", "Gold"]) === "Labour and gold are no numbers yet." */
 export function waitWords(labels: readonly string[]): string {
   const small = labels.map((label, index) => (index === 0 ? label : lowerFirst(label)));
   const last = small.at(-1) ?? "";
-  if (small.length === 1) return `${last} is no figure yet.`;
-  return `${small.slice(0, -1).join(", ")} and ${last} are no figures yet.`;
+  if (small.length === 1) return `${last} is no number yet.`;
+  return `${small.slice(0, -1).join(", ")} and ${last} are no numbers yet.`;
 }
 
 function shareMore({ now, then }: PreviewStage): string {

@@ -59,8 +59,9 @@ export function previewRates(
   then: RateFigures,
 ): RatesPreview {
   const stageFound = example.stageFound === "at-strike" ? "after-final-plate" : example.stageFound;
+  const moves = movingLines(example, now, then);
   const stage = (at: StageFound, method: StripMethod | null) =>
-    compare(priced(example, table, now, at, method), priced(example, table, then, at, method));
+    compare(priced(example, table, now, at, method), priced(example, table, then, at, method), moves);
   const later = stage(stageFound, example.method);
   const atStrike = stage("at-strike", null);
   const check = {
@@ -92,19 +93,50 @@ function priced(
   });
 }
 
-function compare(now: ReworkFigures, then: ReworkFigures): PreviewStage {
-  return {
-    now,
-    then,
-    lines: now.lines
-      .map(({ key, name, meanCents }) => ({
-        key,
-        name: withMinutes(key, name, now),
-        nowCents: meanCents,
-        thenCents: then.lines.find((line) => line.key === key)?.meanCents ?? 0,
-      }))
-      .filter(({ nowCents, thenCents }) => nowCents > 0 || thenCents > 0),
-  };
+function compare(now: ReworkFigures, then: ReworkFigures, moves: ReadonlySet<PreviewLine["key"]>): PreviewStage {
+  const lines = now.lines.map(({ key, name, meanCents }) => ({
+    key,
+    name: withMinutes(key, name, now),
+    nowCents: meanCents,
+    thenCents: then.lines.find((line) => line.key === key)?.meanCents ?? 0,
+  }));
+  const settled = now.method === then.method ? settleRounding(lines, moves) : lines;
+  return { now, then, lines: settled.filter(({ nowCents, thenCents }) => nowCents > 0 || thenCents > 0) };
+}
+
+/**
+ * Rounding to whole cents can lift a line that no changed rate touches by a cent. Such a line stays as it was, and the
+ * cent goes to the line that moves most, so that the lines still add up.
+ */
+function settleRounding(lines: readonly PreviewLine[], moves: ReadonlySet<PreviewLine["key"]>): PreviewLine[] {
+  const drift = (line: PreviewLine) => (moves.has(line.key) ? 0 : line.thenCents - line.nowCents);
+  const total = lines.reduce((sum, line) => sum + drift(line), 0);
+  const moving = lines.filter(({ key }) => moves.has(key));
+  const most = moving.toSorted(
+    (a, b) => Math.abs(b.thenCents - b.nowCents) - Math.abs(a.thenCents - a.nowCents) || b.nowCents - a.nowCents,
+  )[0];
+  return lines.map((line) => ({
+    ...line,
+    thenCents: line.thenCents - drift(line) + (line === most ? total : 0),
+  }));
+}
+
+/** The lines that the changed rates can move. Scrap risk rests on the part's value, which is no rate. */
+function movingLines({ stack }: RatesExample, now: RateFigures, then: RateFigures): Set<PreviewLine["key"]> {
+  const isPrice = stack.some(({ metal }) => now.metalCentsPerG[metal] !== then.metalCentsPerG[metal]);
+  const isRecovery = stack.some(({ metal }) => now.recoveryShare[metal] !== then.recoveryShare[metal]);
+  const differ: [PreviewLine["key"], boolean][] = [
+    ["labour", now.labourCentsPerHour !== then.labourCentsPerHour],
+    ["line", now.lineCentsPerHour !== then.lineCentsPerHour],
+    ["metalWrittenOff", isPrice || isRecovery],
+    ["metalAgain", isPrice],
+    [
+      "chemistry",
+      now.solutionCentsPerL !== then.solutionCentsPerL || now.abrasiveCentsPerMinute !== then.abrasiveCentsPerMinute,
+    ],
+    ["waste", now.wasteCentsPerL !== then.wasteCentsPerL],
+  ];
+  return new Set(differ.flatMap(([key, isDifferent]) => (isDifferent ? [key] : [])));
 }
 
 function withMinutes(key: PreviewLine["key"], name: string, { minutes, tankMinutes }: ReworkFigures): string {
