@@ -20,8 +20,9 @@ export interface CrossSectionProps {
 
 /** Wide enough for any drawing; what is beyond its edge is not seen. */
 const REACH_PX = 1240;
-/** The surface of a layer: never dead straight. */
-const WAVE = `M0 0${"q11 -3 22 0t22 -1 22 2 22 -2 22 1".repeat(Math.ceil(REACH_PX / 110))}`;
+/** The surface of a layer: never dead straight. The bends come back to where they began, so that they can follow on. */
+const BENDS = "t26 1 24 1 24 -1 28 -1 28 0";
+const WAVE = `M-13 0q13 -4 26 0${BENDS.repeat(Math.ceil(REACH_PX / 130))}`;
 /** Where the base is cut short. */
 const TEETH = Array.from({ length: REACH_PX / 20 }, (_, index) => `L${index * 20 + 10} -10L${index * 20 + 20} -1`).join(
   "",
@@ -66,7 +67,7 @@ export function CrossSection({ layers, scale, baseMetal }: CrossSectionProps) {
 function Surface({ topShare, fill }: { topShare: number; fill: string }) {
   return (
     <svg y={percent(topShare)} overflow="visible">
-      <path d={`${WAVE}V4000H0Z`} fill={fill} />
+      <path d={`${WAVE}V4000H-13Z`} fill={fill} />
       <path className="section-cut__edge" d={WAVE} />
     </svg>
   );

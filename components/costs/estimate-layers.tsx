@@ -1,10 +1,10 @@
 "use client";
 
+import { useId } from "react";
 import { CrossSection, SectionLeaders } from "@/components/costs/cross-section";
 import { LayerRow } from "@/components/costs/estimate-layer-row";
 import type { StripEditing } from "@/components/costs/estimate-editing";
 import { Button } from "@/components/ui/button";
-import { Field, SelectField } from "@/components/ui/field";
 import { Glyph } from "@/components/ui/glyph";
 import { PickGroup } from "@/components/ui/pick";
 import { Section } from "@/components/ui/section";
@@ -12,8 +12,6 @@ import { BASE_METAL_TITLES, BASE_METALS, type BaseMetal } from "@/lib/cases/case
 import { sectionScale } from "@/lib/costs/section-scale";
 import { changeStack, withThicknessUnit } from "@/lib/costs/strip-typing";
 import { STACK_LIMITS, type Layer, type WeighedLayer } from "@/lib/plating/deposit-stack";
-
-const BASE_OPTIONS = BASE_METALS.map((metal) => ({ value: metal, label: BASE_METAL_TITLES[metal] }));
 
 interface StripLayersProps extends StripEditing {
   /** What is drawn and weighed: the last stack that could be read. */
@@ -61,27 +59,47 @@ export function StripLayers({ drawn, ...editing }: StripLayersProps) {
 }
 
 function BaseRow({ typed, faults, onChange }: StripEditing) {
+  const errorId = useId();
+  const isKnown = BASE_METALS.some((metal) => metal === typed.base);
   return (
     <li className="est-layer est-layer--base">
       <div className="est-layer__fields">
-        <SelectField
-          label="Base metal"
-          name="base"
-          options={BASE_OPTIONS}
-          placeholder="Choose"
-          value={BASE_METALS.some((metal) => metal === typed.base) ? typed.base : ""}
-          onChange={(event) => onChange({ ...typed, base: event.target.value })}
-          error={faults.base}
-        />
-        <Field
-          label="Alloy"
+        <span className="est-layer__metal">
+          <select
+            className="input"
+            name="base"
+            aria-label="Base metal"
+            aria-invalid={faults.base ? true : undefined}
+            aria-describedby={faults.base ? errorId : undefined}
+            value={typed.base}
+            onChange={(event) => onChange({ ...typed, base: event.target.value })}
+          >
+            {!isKnown && <option value={typed.base}>{typed.base === "" ? "Choose" : typed.base}</option>}
+            {BASE_METALS.map((metal) => (
+              <option key={metal} value={metal}>
+                {BASE_METAL_TITLES[metal]}
+              </option>
+            ))}
+          </select>
+        </span>
+        <input
+          className="input est-layer__alloy"
           name="alloy"
+          aria-label="Alloy"
+          placeholder="Alloy"
           maxLength={60}
+          autoComplete="off"
           value={typed.alloy}
           onChange={(event) => onChange({ ...typed, alloy: event.target.value })}
         />
       </div>
-      <p className="est-layer__words">Every way is checked against the base metal.</p>
+      {faults.base && (
+        <p className="field__error" id={errorId}>
+          <Glyph name="ui-caution" size={20} />
+          {faults.base}
+        </p>
+      )}
+      <p className="est-layer__words">Base metal and alloy. Every way is checked against the metal.</p>
     </li>
   );
 }

@@ -37,13 +37,15 @@ export function StripResults(props: StripResultsProps) {
       <div className={isWaiting ? "est-results est-results--waits no-print" : "est-results no-print"}>
         <Ways {...props} />
         <div className="est-two">
-          <StripSpread reckoning={reckoning} />
+          <div>
+            <StripSpread reckoning={reckoning} />
+            <WorthSection {...props} />
+          </div>
           <div>
             <StripBasis reckoning={reckoning} rates={ratesWords} correction={correction} />
             <Finish {...props} />
           </div>
         </div>
-        <WorthSection {...props} />
       </div>
       <div className="only-print">
         <StripSheet

@@ -27,8 +27,6 @@ export function OfferedStripWay(props: OfferedStripWayProps) {
       <h3>{STRIP_METHOD_TITLES[method]}</h3>
       <WayFigure estimate={estimate} endCents={endCents} currency={currency} />
       <CostLines estimate={estimate} batch={reckoning.batch} currency={currency} />
-      <Steps steps={estimate.steps} />
-      <CautionList cautions={estimate.cautions} />
       <div className="est-way__foot">
         {isChosen ? (
           <strong className="est-way__chosen">
@@ -51,6 +49,8 @@ export function OfferedStripWay(props: OfferedStripWayProps) {
           </Button>
         )}
       </div>
+      <Steps steps={estimate.steps} />
+      <CautionList cautions={estimate.cautions} />
     </article>
   );
 }

@@ -6,12 +6,6 @@ const MARK_CLASSES: Record<SourceKind, string> = {
   part: "src src--part",
   shop: "src src--shop",
 };
-const MARK_WORDS: Record<SourceKind, string> = {
-  published: "Published: ",
-  memory: "",
-  part: "Part from memory: ",
-  shop: "",
-};
 
 interface SourceMarkProps {
   source: string;
@@ -21,8 +15,7 @@ interface SourceMarkProps {
 
 /** Where a figure comes from: by shape first, then in words. */
 export function SourceMark({ source, kind = sourceKind(source) }: SourceMarkProps) {
-  const words = source.replace(/[;,]? ?(?<!shop )from memory$/, (end) => (kind === "part" ? "" : end));
-  const said = `${MARK_WORDS[kind]}${words}`;
+  const said = kind === "published" ? `Published: ${source}` : source;
   return (
     <span className={MARK_CLASSES[kind]}>
       <span>{said.charAt(0).toUpperCase() + said.slice(1)}</span>

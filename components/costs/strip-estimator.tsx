@@ -15,7 +15,7 @@ import { currencySign } from "@/lib/costs/rate-fields";
 import type { ShopRates } from "@/lib/costs/rates";
 import { readStrip, type StripReading } from "@/lib/costs/read-strip";
 import { reckonStrip, type StripReckoning } from "@/lib/costs/reckon-strip";
-import { queryOf, type StripTyped } from "@/lib/costs/strip-address";
+import { EMPTY_STRIP, queryOf, type StripTyped } from "@/lib/costs/strip-address";
 import type { RatesWords } from "@/lib/costs/strip-basis";
 import type { StripTable } from "@/lib/costs/strip-plan";
 import { routes } from "@/lib/routes";
@@ -111,7 +111,7 @@ export function StripEstimator(props: StripEstimatorProps) {
         <StripBatchFields
           {...editing}
           currencySign={currencySign(props.ratesWords.currency)}
-          filledFrom={filledWords(origin, isTouched)}
+          filledFrom={filledWords(origin, typed)}
         />
         <noscript>
           <Button type="submit" variant="plain">
@@ -137,12 +137,13 @@ function keysOf(origin: StripOrigin | null): { case?: string; job?: string } {
   return origin ? { [origin.kind]: origin.key } : {};
 }
 
-function filledWords(origin: StripOrigin | null, isTouched: boolean): string {
-  if (origin)
-    return `Filled in from ${origin.kind === "case" ? "the case and its job" : "the job"}. Thickness as ordered, not measured.`;
-  return isTouched
-    ? ""
-    : "Nothing is filled in from a job: one steel part with the usual strike and 5 µm of nickel, to type over.";
+const EMPTY = JSON.stringify(EMPTY_STRIP);
+
+function filledWords(origin: StripOrigin | null, typed: StripTyped): string {
+  if (origin?.kind === "case") return "Filled in from the case and its job. Thickness as ordered, not measured.";
+  if (origin) return "Filled in from the job. Thickness as ordered, not measured.";
+  if (JSON.stringify(typed) !== EMPTY) return "";
+  return "To begin with: one steel part with the usual strike and 5 µm of nickel, to type over.";
 }
 
 /** Keeps the page's address in step with its fields, without a visit to the server. */

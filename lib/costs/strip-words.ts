@@ -79,6 +79,7 @@ export function priceShareWords(smallerCents: number, greaterCents: number): str
   if (times < 1.25) return "Almost the same price.";
   if (times < 1.75) return "Two thirds of the price.";
   const whole = Math.round(times);
+  if (whole === 2) return "Half the price.";
   if (whole > 1000) return "Less than a thousandth of the price.";
   return `${FRACTIONS[whole] ?? `One ${ordinal(whole)}`} of the price.`;
 }
