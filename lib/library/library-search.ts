@@ -1,14 +1,9 @@
 /** Search over classes, causes and fixes that knows the shop's words and forgives spelling. Pure: build once, ask often. */
-import Fuse, { type IFuseOptions } from "fuse.js";
-import {
-  documentsOf,
-  markBegun,
-  markWhole,
-  type LibraryEntries,
-  type SearchDocument,
-  type SearchPhrase,
-} from "@/lib/library/search-documents";
-import { mendWords, vocabularyOf } from "@/lib/library/search-words";
+import Fuse from "fuse.js";
+import { documentsOf, type LibraryEntries, type SearchDocument } from "@/lib/library/search-documents";
+import { placeWords, vocabularyOf } from "@/lib/library/search-words";
+import { buildWordIndex, holdersOf } from "@/lib/library/word-index";
+import { askedOf, matchOf, type WordMatch } from "@/lib/library/word-match";
 
 export interface LibraryHit {
   slug: string;
@@ -27,79 +22,75 @@ export type LibrarySearch = (typed: string) => LibraryHit[];
 const MOST_HITS = 24;
 
 /**
- * Words are mended before Fuse sees them, so it may be strict: at its looser setting 'dust' answers for 'rust'.
- * The looser one is kept for what the mending could not place.
+ * Least of what was typed that an entry must hold to answer: little, since people tell stories; more where it holds one
+ * word of it and the rest is strange to the library, else 'coffee machine' would be a drying ring. Set on the phrases and
+ * the nonsense in the tests.
  */
-const MENDED_THRESHOLD = 0.1;
-
-const FUSE_OPTIONS: IFuseOptions<SearchDocument> = {
-  useTokenSearch: true,
-  ignoreLocation: true,
-  threshold: 0.35,
-  includeScore: true,
-  ignoreFieldNorm: true,
-  keys: [
-    { name: "names", weight: 3 },
-    { name: "also", weight: 4 },
-    { name: "metals", weight: 1 },
-    { name: "all", weight: 3 },
-  ],
-};
-
-/** How much of a hit's score a phrase that says exactly what was typed takes off. */
-const PHRASE_SHARE = 0.9;
+const LEAST_MATCH = 0.3;
+const LEAST_AMONG_STRANGE = 0.55;
+/** Words placed less surely than this, on average, are strange to the library. */
+const STRANGE = 0.62;
 
 /**
- * Builds the search over a library. The result answers what was typed with the best hits first, at most 24;
- * nothing typed gives nothing. Words may come in any order, misspelt, as slang or as an alloy name.
+ * For what no word of the library is near to, its letters as a whole: 'pottmettle'. Only texts long enough for that to say
+ * something; the score is Fuse's, 0 for the same letters.
+ */
+const LETTERS = { leastTyped: 8, mostTyped: 60, threshold: 0.35, worstScore: 0.32, mostHits: 5 } as const;
+
+/** How much of the order is one phrase that says it all, against its words lying about in the entry. */
+const PHRASE_SHARE = 0.5;
+
+/**
+ * Builds the search over a library. The result answers what was typed with the best hits first, at most 24; nothing typed,
+ * or nothing that the library knows, gives nothing. Words may come in any order, misspelt, as slang or as an alloy name.
  * @example buildLibrarySearch(shelf)("sleepy brass")[0] // { slug: "underactivation", kind: "class", … }
  */
 export function buildLibrarySearch(entries: LibraryEntries): LibrarySearch {
   const documents = documentsOf(entries);
   const vocabulary = vocabularyOf(documents.map((document) => document.prose));
-  const exact = new Fuse(documents, { ...FUSE_OPTIONS, threshold: MENDED_THRESHOLD });
-  const loose = new Fuse(documents, FUSE_OPTIONS, exact.getIndex());
+  const index = buildWordIndex(documents);
+  const byLetters = lettersSearch(documents);
   return (typed) => {
-    const words = mendWords(typed, vocabulary);
-    if (words.length === 0) return [];
-    const marked = words.map((word) => (vocabulary.stems.has(word) ? markWhole(word) : markBegun(word)));
-    const found = exact.search(marked.join(" "), { limit: MOST_HITS });
-    const results = found.length > 0 ? found : loose.search(words.join(" "), { limit: MOST_HITS });
-    return results.map(({ item, score }) => toHit(item, score ?? 1, words)).sort((a, b) => a.score - b.score);
+    const placed = placeWords(typed, vocabulary);
+    const asked = askedOf(placed, index);
+    const hits = holdersOf(placed, index)
+      .map((document) => ({ document, match: matchOf(document, asked, index) }))
+      .filter(({ match }) => answers(match, asked.sureness))
+      .map(({ document, match }) => toHit(document, match))
+      .sort((a, b) => a.score - b.score)
+      .slice(0, MOST_HITS);
+    return hits.length > 0 ? hits : byLetters(typed.trim());
   };
 }
 
-/** Fuse's score, lowered where one phrase of the entry says what was typed, raised where the words lie scattered. */
-function toHit(document: SearchDocument, score: number, words: readonly string[]): LibraryHit {
-  const { said, likeness } = phraseNearest(document, words);
-  return {
-    slug: document.slug,
-    title: document.title,
-    kind: document.kind,
-    classes: document.classes,
-    score: Math.min(1, score * (1 - PHRASE_SHARE * likeness ** 2)),
-    matched: said,
+function lettersSearch(documents: readonly SearchDocument[]): LibrarySearch {
+  let fuse: Fuse<SearchDocument> | null = null;
+  return (typed) => {
+    if (typed.length < LETTERS.leastTyped || typed.length > LETTERS.mostTyped) return [];
+    fuse ??= new Fuse(documents, {
+      keys: ["phrases.said"],
+      threshold: LETTERS.threshold,
+      ignoreLocation: true,
+      ignoreFieldNorm: true,
+      includeScore: true,
+      includeMatches: true,
+    });
+    return fuse
+      .search(typed, { limit: LETTERS.mostHits })
+      .filter(({ score }) => (score ?? 1) <= LETTERS.worstScore)
+      .map(({ item, score, matches }) => hitOf(item, score ?? 1, matches?.[0]?.value ?? item.title));
   };
 }
 
-/**
- * The phrase of the entry most like what was typed, and how like (0 to 1: shared words over all words of both).
- * A metal's name is said when nothing better is, but counts for nothing: it stands in too many entries.
- * Failing that, the title: its prose answered.
- */
-function phraseNearest(document: SearchDocument, words: readonly string[]): { said: string; likeness: number } {
-  const phrase = nearestOf(document.phrases, words);
-  if (phrase.likeness > 0) return phrase;
-  const metal = nearestOf(document.metalPhrases, words);
-  return { said: metal.likeness > 0 ? metal.said : document.title, likeness: 0 };
+function answers({ held, cover, likeness }: WordMatch, sureness: number): boolean {
+  const least = held > 1 || sureness >= STRANGE ? LEAST_MATCH : LEAST_AMONG_STRANGE;
+  return Math.max(cover, likeness) >= least;
 }
 
-function nearestOf(phrases: readonly SearchPhrase[], words: readonly string[]): { said: string; likeness: number } {
-  let best = { said: "", likeness: 0 };
-  for (const phrase of phrases) {
-    const shared = words.filter((word) => phrase.words.some((own) => own.startsWith(word))).length;
-    const likeness = (2 * shared) / (words.length + Math.max(phrase.words.length, shared));
-    if (likeness > best.likeness) best = { said: phrase.said, likeness };
-  }
-  return best;
+function toHit(document: SearchDocument, { cover, likeness, said }: WordMatch): LibraryHit {
+  return hitOf(document, 1 - ((1 - PHRASE_SHARE) * cover + PHRASE_SHARE * likeness), said);
+}
+
+function hitOf({ slug, title, kind, classes }: SearchDocument, score: number, matched: string): LibraryHit {
+  return { slug, title, kind, classes, score, matched };
 }

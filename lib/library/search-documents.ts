@@ -1,7 +1,7 @@
 /** Each class, cause and fix as the text that is searched. */
-import { ALLOY_NAMES } from "@/lib/library/alloy-names";
-import { BASE_METAL_TITLES, SYMPTOMS, type BaseMetal } from "@/lib/cases/case-words";
+import { SYMPTOMS, type BaseMetal } from "@/lib/cases/case-words";
 import type { FixStep, LibraryCause, LibraryClass, LibraryFix } from "@/lib/library/library-entry";
+import { namesOfMetal, metalsNamedIn } from "@/lib/library/named-metals";
 import { searchWords } from "@/lib/library/search-words";
 
 export type SearchedClass = Pick<LibraryClass, "slug" | "title" | "short" | "atStrike" | "inFinalPlate" | "synonyms">;
@@ -23,32 +23,31 @@ export interface LibraryEntries {
 export interface SearchPhrase {
   said: string;
   words: string[];
+  /** How far it speaks for the entry (0 to 1). */
+  weight: number;
 }
 
-/** One entry as it is searched. `names`, `also`, `metals` and `all` hold index words, not prose. */
+/** One entry as it is searched. */
 export interface SearchDocument {
   slug: string;
   title: string;
   kind: "class" | "cause" | "fix";
   classes: string[];
-  /** Title and shop words, each as said and as indexed; then the names of the metals. */
+  /** Title, shop words, and names of the metals it is about: each as said and as indexed. */
   phrases: SearchPhrase[];
+  /** Names of the metals that it puts at risk besides. */
   metalPhrases: SearchPhrase[];
-  names: string;
-  also: string;
-  metals: string;
-  /** Names, other words and body text in one, so that words spread over the entry still count together. */
-  all: string;
+  /** Index words, each with how much it says about the entry (0 to 1): by where it stands. */
+  words: ReadonlyMap<string, number>;
   /** Its text as written, for the vocabulary. */
   prose: string;
 }
 
-/**
- * Words are marked where they begin and end, since Fuse looks for letters anywhere: 'stain' would answer for
- * 'stainless' and 'rust' for 'crust'. A word still being typed gets the first mark only.
- */
-export const markBegun = (word: string) => `_${word}`;
-export const markWhole = (word: string) => `_${word}_`;
+/** What a word says about an entry by where it stands: in its name, in its explanation, or in a metal's name. */
+const NAMED = 1;
+const EXPLAINED = 0.5;
+/** One metal at risk says nearly as much as a name; the more there are, the less each says. */
+const metalWeight = (metals: number) => Math.min(0.9, 1.1 / Math.max(1, metals));
 
 /** One document an entry: classes first, then causes, then fixes, each in shelf order. */
 export function documentsOf({ classes, causes, fixes }: LibraryEntries): SearchDocument[] {
@@ -78,7 +77,7 @@ function causeDocument(entry: SearchedCause, classes: readonly SearchedClass[]):
   const titles = classes.flatMap((owner) => (entry.classSlugs.includes(owner.slug) ? [owner.title] : []));
   return documentOf(entry.slug, entry.title, "cause", entry.classSlugs, {
     also: entry.synonyms,
-    metals: entry.baseMetals.flatMap(namesOfMetal),
+    metals: entry.baseMetals,
     body: [entry.why, entry.proof, ...titles],
   });
 }
@@ -96,30 +95,35 @@ function documentOf(
   title: string,
   kind: SearchDocument["kind"],
   classes: string[],
-  texts: { also: readonly string[]; metals: readonly string[]; body: readonly string[] },
+  texts: { also: readonly string[]; metals: readonly BaseMetal[]; body: readonly string[] },
 ): SearchDocument {
-  const index = (lines: readonly string[]) => lines.flatMap(searchWords).map(markWhole).join(" ");
-  const names = index([title]);
-  const also = index(texts.also);
-  const metals = index(texts.metals);
-  const asPhrases = (lines: readonly string[]) => lines.map((said) => ({ said, words: searchWords(said) }));
-  const all = [names, also, index(texts.body)].join(" ");
-  const prose = [title, ...texts.also, ...texts.metals, ...texts.body].join(" ");
+  const named = [title, ...texts.also];
+  const about = metalsNamedIn(title);
+  const atRisk = texts.metals.flatMap(namesOfMetal);
+  const words = new Map<string, number>();
+  weigh(words, atRisk, metalWeight(texts.metals.length));
+  weigh(words, texts.body, EXPLAINED);
+  weigh(words, about.names, about.weight);
+  weigh(words, named, NAMED);
   return {
     slug,
     title,
     kind,
     classes,
-    phrases: asPhrases([title, ...texts.also]),
-    metalPhrases: asPhrases(texts.metals),
-    names,
-    also,
-    metals,
-    all,
-    prose,
+    phrases: [
+      ...named.map((said) => asPhrase(said, NAMED)),
+      ...about.names.map((said) => asPhrase(said, about.weight)),
+    ],
+    metalPhrases: atRisk.map((said) => asPhrase(said, NAMED)),
+    words,
+    prose: [...named, ...about.names, ...atRisk, ...texts.body].join(" "),
   };
 }
 
-function namesOfMetal(metal: BaseMetal): string[] {
-  return [BASE_METAL_TITLES[metal], ...ALLOY_NAMES[metal]];
+function weigh(words: Map<string, number>, lines: readonly string[], weight: number): void {
+  for (const word of lines.flatMap(searchWords)) words.set(word, Math.max(weight, words.get(word) ?? 0));
+}
+
+function asPhrase(said: string, weight: number): SearchPhrase {
+  return { said, words: [...new Set(searchWords(said))], weight };
 }

@@ -2,51 +2,10 @@
  * Turns what a shop types into the words that the library is indexed by: small letters, one spelling, word stems,
  * no filler, and misspelt words mended against the library's own vocabulary.
  */
+import { nearestWords, nearWordsOf, type NearWords } from "@/lib/library/near-words";
+import { FILLER, ONE_SPELLING, STANDS_FOR } from "@/lib/library/shop-spellings";
 
-/** Words that say nothing about a fault. 'no', 'not', 'too' stay: they do. */
-const FILLER = new Set(
-  "a an and any are as at be been but by can did do does for from get gets got had has have he her his how i if in into is it its just like me my of on or our out so some that the their them then there these they this those to up was we very were what when where which who why will with would you your part parts job piece pieces".split(
-    " ",
-  ),
-);
-
-/** One spelling where shops use two. */
-const ONE_SPELLING: Record<string, string> = {
-  aluminum: "aluminium",
-  alum: "aluminium",
-  gray: "grey",
-  sulphur: "sulfur",
-  sulphuric: "sulfuric",
-  color: "colour",
-  colors: "colours",
-  colored: "coloured",
-  discolored: "discoloured",
-  discoloration: "discoloured",
-  mold: "mould",
-  smokey: "smoky",
-  zamac: "zamak",
-  mazak: "zamak",
-  no: "not",
-  non: "not",
-  without: "not",
-  never: "not",
-  wont: "not",
-  cant: "not",
-  dont: "not",
-  doesnt: "not",
-  didnt: "not",
-  isnt: "not",
-  wouldnt: "not",
-  amps: "current",
-  volts: "voltage",
-  muriatic: "hydrochloric",
-  hcl: "hydrochloric",
-  h2so4: "sulfuric",
-  di: "deionized",
-  deionised: "deionized",
-  inox: "stainless",
-  ss: "stainless",
-};
+export { editDistance } from "@/lib/library/edit-distance";
 
 /** The words of a text as written, one spelling each, filler left out unless there is nothing else. */
 export function plainWords(text: string): string[] {
@@ -73,109 +32,120 @@ export function searchWords(text: string): string[] {
 function stem(word: string): string {
   if (/\d/.test(word) || word.length < 4) return word;
   const single = word.replace(/(?<=[^s])s$/, "");
-  const cut = single.replace(/(ing|ed|ish|[iy]?ness)$/, "");
+  const cut = single.replace(/(ing|ed|ish|[iy]?ness|(?<=at)ion)$/, "");
   const base = cut.length > 2 && /[aeiouy]/.test(cut) ? cut : single;
   const bare = base.length > 3 ? base.replace(/(ie|e|y)$/, "") : base;
   return bare === single ? bare : bare.replace(/([bdgklmnprt])\1$/, "$1");
 }
 
-/** Every word of the library as written, with how often it stands there, and all their stems. */
+/** Every word of the library as written, with how often it stands there, all their stems, and what is near to what. */
 export interface Vocabulary {
   words: ReadonlyMap<string, number>;
   stems: ReadonlySet<string>;
+  near: NearWords;
 }
 
 export function vocabularyOf(texts: Iterable<string>): Vocabulary {
   const words = new Map<string, number>();
   for (const text of texts) for (const word of plainWords(text)) words.set(word, (words.get(word) ?? 0) + 1);
-  return { words, stems: new Set([...words.keys()].map(stem)) };
+  const stems = new Set([...words.keys()].map(stem));
+  return { words, stems, near: nearWordsOf(words, ONE_SPELLING, stems) };
+}
+
+/** One way to read a typed word: an index word, and how surely it is meant (0 to 1; 1 is the word itself). */
+export interface Reading {
+  stem: string;
+  sureness: number;
+}
+
+/** A typed word and every way it is read. None: the library has nothing like it. */
+export interface PlacedWord {
+  typed: string;
+  readings: Reading[];
 }
 
 /**
- * The index words of what was typed, misspelt ones mended: a word that the library neither holds nor continues becomes
- * the two words it was run together from, or its nearest one or two. A word with nothing near is dropped unless nothing
- * else is left. Words with digits are never mended.
+ * What was typed, word by word, with every way each word is read: as itself, as the beginning of a word, as words that
+ * the shop uses for it, or, when the library neither holds nor continues it, as the two words it was run together from or
+ * its nearest ones. Words with digits are never mended.
  */
-export function mendWords(typed: string, vocabulary: Vocabulary): string[] {
-  const words = plainWords(typed);
-  const mended = words.flatMap((word) => (isKnown(word, vocabulary) ? [word] : mendWord(word, vocabulary)));
-  return [...new Set((mended.length > 0 ? mended : words).map(stem))];
+export function placeWords(typed: string, vocabulary: Vocabulary): PlacedWord[] {
+  const placed = plainWords(typed).flatMap((word) => placeWord(word, vocabulary));
+  return [...new Map(placed.map((each) => [each.typed, each])).values()];
 }
 
-function isKnown(word: string, vocabulary: Vocabulary): boolean {
-  if (vocabulary.words.has(word) || vocabulary.stems.has(stem(word)) || /\d/.test(word)) return true;
-  for (const known of vocabulary.words.keys()) if (known.startsWith(word)) return true;
-  return false;
+const STANDS_FOR_SURENESS = 0.6;
+const BEGUN_SURENESS = 0.85;
+const LONGER_SURENESS = 0.5;
+/** Stems that a word still being typed may become: more say too little. */
+const MOST_BEGUN = 40;
+/** From this length on the beginning of a word may as well be another one misspelt: 'stripp'. */
+const LONG_BEGINNING = 5;
+
+function placeWord(word: string, vocabulary: Vocabulary): PlacedWord[] {
+  const own = stem(word);
+  const standing = standIns(word, own, vocabulary);
+  if (vocabulary.words.has(word) || vocabulary.stems.has(own)) {
+    return [{ typed: word, readings: [{ stem: own, sureness: 1 }, ...standing] }];
+  }
+  const begun = [...standing, ...stemsBeginning(word, vocabulary)];
+  if (/\d/.test(word) || (begun.length > 0 && word.length < LONG_BEGINNING)) return [{ typed: word, readings: begun }];
+  const halves = begun.length === 0 ? halvesOf(word, vocabulary) : null;
+  if (halves) return halves.flatMap((half) => placeWord(half, vocabulary));
+  const near = nearestWords(word, vocabulary.near);
+  const mended = (near.length > 0 ? near : nearestWords(own, vocabulary.near)).map((each) => ({
+    stem: stem(each.word),
+    sureness: each.sureness,
+  }));
+  const readings = [...begun, ...mended];
+  return [{ typed: word, readings: readings.length > 0 ? readings : knownInside(word, vocabulary) }];
 }
 
-function mendWord(word: string, vocabulary: Vocabulary): string[] {
+/** A word that the library has in a shorter form: weldments, weld. */
+function knownInside(word: string, vocabulary: Vocabulary): Reading[] {
+  for (let length = word.length - 1; length >= Math.max(4, 0.4 * word.length); length -= 1) {
+    const shorter = word.slice(0, length);
+    if (vocabulary.words.has(shorter)) return [{ stem: stem(shorter), sureness: LONGER_SURENESS }];
+  }
+  return [];
+}
+
+function standIns(word: string, own: string, vocabulary: Vocabulary): Reading[] {
+  const meant = STANDS_FOR[word] ?? STANDS_FOR_STEM.get(own) ?? [];
+  return meant
+    .map(stem)
+    .filter((each) => each !== own && vocabulary.stems.has(each))
+    .map((each) => ({ stem: each, sureness: STANDS_FOR_SURENESS }));
+}
+
+const STANDS_FOR_STEM = new Map(Object.entries(STANDS_FOR).map(([word, meant]) => [stem(word), meant]));
+
+function stemsBeginning(word: string, vocabulary: Vocabulary): Reading[] {
+  const begun: Reading[] = [];
+  for (const each of vocabulary.stems) {
+    if (each.startsWith(word) && begun.push({ stem: each, sureness: BEGUN_SURENESS }) === MOST_BEGUN) break;
+  }
+  return begun;
+}
+
+function halvesOf(word: string, vocabulary: Vocabulary): string[] | null {
   for (let at = 3; at <= word.length - 3; at += 1) {
     const halves = [word.slice(0, at), word.slice(at)];
     if (halves.every((half) => vocabulary.words.has(half))) return halves;
   }
-  return nearest(word, vocabulary);
+  return null;
 }
 
-const MOST_MENDINGS = 2;
-
-function nearest(word: string, vocabulary: Vocabulary): string[] {
-  const found: { known: string; far: number; count: number }[] = [];
-  for (const [known, count] of vocabulary.words) {
-    const far = distance(word, known);
-    if (far !== null) found.push({ known, far, count });
-  }
-  found.sort((a, b) => a.far - b.far || b.count - a.count || a.known.localeCompare(b.known));
-  const best = found[0]?.far;
-  return found
-    .filter((near) => near.far === best)
-    .slice(0, MOST_MENDINGS)
-    .map((near) => near.known);
-}
-
-/** How far apart two words are, or null when too far to be the same word misspelt. */
-function distance(typed: string, known: string): number | null {
-  if (known.length < 3 || typed.length < 3 || /\d/.test(known)) return null;
-  const allowed = typed.length < 6 ? 1 : typed.length < 10 ? 2 : 3;
-  if (Math.abs(typed.length - known.length) > allowed) return null;
-  const edits = editDistance(typed, known);
-  if (lettersSorted(typed) === lettersSorted(known)) return 1;
-  if (edits <= allowed) return typed[0] === known[0] ? edits : edits + 0.5;
-  return soundOf(typed) === soundOf(known) ? 1.25 : null;
-}
-
-/** Optimal string alignment: insertions, deletions, changes and swaps of neighbours, each one edit. */
-export function editDistance(from: string, to: string): number {
-  let before: number[] = [];
-  let above: number[] = Array.from({ length: to.length + 1 }, (_, index) => index);
-  for (let i = 1; i <= from.length; i += 1) {
-    const row = [i];
-    for (let j = 1; j <= to.length; j += 1) {
-      const change = from[i - 1] === to[j - 1] ? 0 : 1;
-      let least = Math.min((above[j] ?? 0) + 1, (row[j - 1] ?? 0) + 1, (above[j - 1] ?? 0) + change);
-      if (i > 1 && j > 1 && from[i - 1] === to[j - 2] && from[i - 2] === to[j - 1]) {
-        least = Math.min(least, (before[j - 2] ?? 0) + 1);
-      }
-      row.push(least);
-    }
-    before = above;
-    above = row;
-  }
-  return above[to.length] ?? 0;
-}
-
-function lettersSorted(word: string): string {
-  return [...word].sort().join("");
-}
-
-/** What is left when spelling is taken away: ruff and rough, flaik and flake sound alike. */
-function soundOf(word: string): string {
-  return word
-    .replace(/ph/g, "f")
-    .replace(/ough/g, "of")
-    .replace(/ck|q/g, "k")
-    .replace(/c(?=[eiy])/g, "s")
-    .replace(/c/g, "k")
-    .replace(/z/g, "s")
-    .replace(/(?!^)[aeiouywh]/g, "")
-    .replace(/(.)\1+/g, "$1");
+/**
+ * The index words of what was typed, each word as it is most surely meant (two or three where it is a toss-up). A word
+ * that the library has nothing like is dropped unless nothing else is left.
+ */
+export function mendWords(typed: string, vocabulary: Vocabulary): string[] {
+  const placed = placeWords(typed, vocabulary);
+  const best = placed.flatMap(({ typed: word, readings }) => {
+    const surest = Math.max(0, ...readings.map((each) => each.sureness));
+    if (surest === BEGUN_SURENESS) return [stem(word)];
+    return readings.filter((each) => each.sureness === surest).map((each) => each.stem);
+  });
+  return [...new Set(best.length > 0 ? best : placed.map((each) => stem(each.typed)))];
 }

@@ -127,6 +127,8 @@ export const immersionDeposit: ShelfPart = {
         "forgot to switch on",
         "rectifier off",
         "no live entry",
+        "not hot when it went in",
+        "dead hook",
       ],
     },
     {
@@ -204,7 +206,7 @@ export const immersionDeposit: ShelfPart = {
     {
       slug: "fix-live-entry",
       causeSlugs: ["dead-entry"],
-      title: "Make live entry the only entry",
+      title: "Make live (hot) entry the only entry",
       steps: [
         mend("strike", "Find the dead seconds", {
           detail: "Clamp meter on the rack lead: time from wet to amps, five racks.",

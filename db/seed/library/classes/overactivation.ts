@@ -313,7 +313,7 @@ export const overactivation: ShelfPart = {
     {
       slug: "correct-activator-strength",
       causeSlugs: ["activator-strong-or-warm"],
-      title: "Bring the activator back to strength",
+      title: "Dilute the activator back to its strength",
       steps: [
         mend("activate", "Titrate and measure", {
           detail: "Acid by titration, temperature by thermometer, at the end of the tank where parts hang.",

@@ -26,7 +26,11 @@ export const sound: ShelfPart = {
       "Tape at an edge and in the middle of one part in the rack.",
       "White cloth, then a look into recesses and at contacts.",
     ],
-    prevention: ["Photograph sound strikes of each base metal: they are what every suspect is held against."],
+    prevention: [
+      "Photograph a sound strike of each base metal you run, wet, under the lamp that suspects are photographed under: it is what every suspect is held against.",
+      "Take that picture again after a bath, an activator or a lamp was changed. Yesterday's pink is no measure for today's bath.",
+      "Log the time to first copper on sound racks too. Only then does a slow one show.",
+    ],
     stripNote:
       "Nothing to take off. Sound is said of the strike only; whether a part is fit for its use is for its engineer. High-strength steel still needs its bake (ASTM B850), sound or not.",
     otherLikelihood: 0,

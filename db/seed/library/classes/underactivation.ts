@@ -77,6 +77,7 @@ export const underactivation: ShelfPart = {
       "dull",
       "whitish",
       "grey haze",
+      "foggy copper",
       "half plated",
       "streaky haze",
       "wishy washy",
@@ -211,7 +212,16 @@ export const underactivation: ShelfPart = {
       likelihood: 0.09,
       baseMetals: ["steel", "stainless", "iron", "copper", "brass", "bronze"],
       sourceKeys: ["astm-b183", "astm-b254", "common-practice", "from-memory"],
-      synonyms: ["heat treat scale", "mill scale", "weld tint", "heat tint", "fire scale", "solder oxide", "blueing"],
+      synonyms: [
+        "heat treat scale",
+        "mill scale",
+        "scale on the weldment",
+        "weld tint",
+        "heat tint",
+        "fire scale",
+        "solder oxide",
+        "blueing",
+      ],
     },
     {
       slug: "strike-voltage-low",
@@ -344,7 +354,7 @@ export const underactivation: ShelfPart = {
     {
       slug: "longer-dwell",
       causeSlugs: ["activator-dwell-short"],
-      title: "Polish the haze off and give it its time",
+      title: "Polish the haze off and give it longer in the acid",
       steps: [
         polishBack({ detail: "Only the hazy patches, wet, until the copper is gone.", minutes: 4 }),
         rinseToWaterBreak({ detail: "Rinse the grit off and read the film. If it breaks, clean first." }),

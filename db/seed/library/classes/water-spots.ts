@@ -56,6 +56,8 @@ export const waterSpots: ShelfPart = {
       "white rings",
       "white spots",
       "lime marks",
+      "mineral spots",
+      "white residue",
       "salt rings",
       "dried drops",
       "spots",

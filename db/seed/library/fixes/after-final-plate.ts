@@ -7,7 +7,6 @@ import {
   photographAndTape,
   polishBack,
   rinse,
-  rinseToWaterBreak,
   strike,
 } from "@/db/seed/library/steps";
 

@@ -8,7 +8,6 @@ import {
   photographAndTape,
   polishBack,
   rinse,
-  rinseToWaterBreak,
   strike,
 } from "@/db/seed/library/steps";
 
@@ -74,7 +73,7 @@ export const fixesOfTools: LibraryFix[] = [
       }),
     ],
     whenNot: "Not with a cover that has been in another solution: one cover, one solution, thrown away together.",
-    materials: ["cotton batting and sleeves", "drip feed or pump", "A·h meter", "scrap plate"],
+    materials: ["anode wrap: cotton batting and sleeves", "drip feed or pump", "A·h meter", "scrap plate"],
     sourceKeys: ["guidebook-brush", "common-practice", "from-memory"],
   },
   {

@@ -153,7 +153,7 @@ export const fixesByBaseMetal: LibraryFix[] = [
   {
     slug: "sulfur-stainless-smut",
     causeSlugs: ["activator-dwell-long"],
-    title: "Free-machining stainless (303, 416): scrub the sulfide, cathodic acid, nickel strike",
+    title: "Free-machining stainless (303, 416): scrub the smut off, cathodic acid, nickel strike",
     steps: [
       polishBack({
         detail: "Wet, 1000 grit or pumice, until a white cloth stays white: the black is sulfide that acid laid open.",

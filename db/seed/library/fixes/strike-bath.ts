@@ -261,7 +261,7 @@ export const fixesOfBaths: LibraryFix[] = [
   {
     slug: "woods-bath-restore",
     causeSlugs: ["passive-base-no-nickel-strike"],
-    title: "Nickel strike that no longer holds: acid, anodes, copper and iron",
+    title: "Woods bath that no longer holds: bring back acid and anodes, dummy copper out",
     steps: [
       mend("strike", "Acid and nickel by titration", {
         detail:
