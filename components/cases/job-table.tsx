@@ -1,5 +1,7 @@
 import Link from "next/link";
+import { MisfitLine } from "@/components/metals/misfit-line";
 import { DataTable, type Column } from "@/components/ui/data-table";
+import type { Misfit } from "@/lib/metals/misfit";
 
 /** A job as its list shows it. */
 export interface JobView {
@@ -14,6 +16,10 @@ export interface JobView {
   held: string;
   /** "$42.00", "not set"; undefined for those who may not see money. */
   value?: string;
+  /** Where a part of it is weighed. */
+  weighHref: string;
+  /** A part of it weighed unlike what it declares: in words, who and when, and the way to that weighing. */
+  misfit?: Misfit;
   /** Where a senior changes it; undefined for the others. */
   changeHref?: string;
 }
@@ -38,11 +44,29 @@ const FACTS: readonly Column<JobView>[] = [
 const VALUE: Column<JobView> = { key: "value", head: "Value of a part", numeric: true, cell: (job) => job.value };
 const HELD: Column<JobView> = { key: "held", head: "Cases on hold", numeric: true, cell: (job) => job.held };
 
+const WEIGH: Column<JobView> = {
+  key: "weigh",
+  head: "Metal check",
+  cell: (job) => (
+    <Link href={job.weighHref} aria-label={`Weigh a part of ${job.number}`}>
+      Weigh a part
+    </Link>
+  ),
+};
+
 /** Jobs, one a row. */
 export function JobTable({ caption, jobs, brief }: JobTableProps) {
   const hasValue = jobs.some((job) => job.value !== undefined);
-  const all = [...NAMES, ...FACTS, ...(hasValue ? [VALUE] : []), HELD];
-  return <DataTable caption={caption} columns={brief ? NAMES : all} rows={jobs} rowKey={(job) => String(job.id)} />;
+  const all = [...NAMES, ...FACTS, ...(hasValue ? [VALUE] : []), HELD, WEIGH];
+  return (
+    <DataTable
+      caption={caption}
+      columns={brief ? NAMES : all}
+      rows={jobs}
+      rowKey={(job) => String(job.id)}
+      rowNote={brief ? undefined : (job) => job.misfit && <MisfitLine misfit={job.misfit} />}
+    />
+  );
 }
 
 /** For those who may change the job its number is the way there. */

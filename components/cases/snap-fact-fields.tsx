@@ -73,6 +73,9 @@ export function SnapFactFields(props: FieldsProps) {
           error={faults.alloy}
         />
       </div>
+      <Link className="solo" href={routes.partCheck(job && { job: job.number })}>
+        Not sure? Weigh it
+      </Link>
       <PickGroup
         legend="Method"
         name="method"

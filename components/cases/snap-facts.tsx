@@ -44,6 +44,7 @@ export function SnapFacts(props: SnapFactsProps) {
       </Section>
     );
   }
+  const misfit = misfitOf(choices, facts);
   return (
     <Section
       title={isLast ? "Same as last time" : "The part"}
@@ -55,8 +56,19 @@ export function SnapFacts(props: SnapFactsProps) {
       }
     >
       {open ? <SnapFactFields {...props} /> : <Slip rows={slipRows(choices, facts, now)} />}
+      {misfit && (
+        <Note tone="rust" title="The metal does not fit the job" className="snap-misfit">
+          {misfit} Hold the part; set its base metal if you know it.
+        </Note>
+      )}
     </Section>
   );
+}
+
+/** What was weighed against the job's metal, while the part is said to be of that metal. */
+function misfitOf(choices: SnapChoices, facts: Facts): string | undefined {
+  const job = choices.jobs.find((each) => each.id === facts.workOrderId);
+  return job?.baseMetal === facts.baseMetal ? job.misfit : undefined;
 }
 
 /** The facts in words, in the order of the mock: job, metal, run, solutions, where found. */

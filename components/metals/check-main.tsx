@@ -37,8 +37,8 @@ export function MainButton({ step, className }: { step: NextStep; className?: st
       );
     case "choose-job":
       return (
-        <Button {...look("ui-hold-tag")} onClick={step.onPress}>
-          Choose a job to keep it on
+        <Button {...look("ui-part")} onClick={step.onPress}>
+          Choose its job
         </Button>
       );
     case "keep":

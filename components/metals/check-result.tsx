@@ -1,8 +1,9 @@
 import { FitChart, type FitRow } from "@/components/metals/fit-chart";
 import { Note } from "@/components/ui/note";
 import { Rests } from "@/components/ui/rests";
-import { errorWords, openWords, restsWords } from "@/lib/metals/check-words";
+import { errorWords, openWords, rangeWords, restsWords, shortName } from "@/lib/metals/check-words";
 import type { DeclaredFit } from "@/lib/metals/declared";
+import type { Material } from "@/lib/metals/material";
 import type { PartReading } from "@/lib/metals/part-reading";
 
 export interface CheckResultProps {
@@ -25,8 +26,8 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
   const against = ruledOut.filter((each) => !isDeclared(each, declared)).slice(0, MOST_RULED_OUT);
   const more = candidates.length - fitting.length;
   const rows: FitRow[] = [
-    ...fitting.map((each) => ({ ...each, fits: true, why: "fits" })),
-    ...against.map((each) => ({ ...each, fits: false, why: each.reason })),
+    ...fitting.map((each) => ({ ...each, name: shortName(each), fits: true, why: "fits" })),
+    ...against.map((each) => ({ ...each, name: shortName(each), fits: false, why: each.reason })),
     ...(declared ? [declaredRow(declared, measured.densityGPerCm3)] : []),
   ];
   return (
@@ -38,15 +39,11 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
       <FitChart {...measured} rows={rows} />
       {more > 0 && (
         <p className="small">
-          {more} more fit as well:{" "}
-          {candidates
-            .slice(MOST_FITTING)
-            .map((each) => each.name)
-            .join(", ")}
-          .
+          {more} more fit as well: {candidates.slice(MOST_FITTING).map(shortName).join(", ")}.
         </p>
       )}
       <Rests>{restsWords(measured, [...fitting, ...against], { tempTyped, balanceErrorG })}</Rests>
+      <RangeSources metals={[...fitting, ...against]} />
       <Note tone="amber" title={candidates.length === 0 ? "What may have misled" : "Before you call it"}>
         <ul className="check-warnings">
           {warnings.map((words) => (
@@ -55,6 +52,23 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
         </ul>
       </Note>
     </div>
+  );
+}
+
+/** Where each range comes from, for whoever doubts one. */
+function RangeSources({ metals }: { metals: readonly Material[] }) {
+  if (metals.length === 0) return null;
+  return (
+    <details className="check-sources no-print">
+      <summary>Where the ranges come from</summary>
+      <ul>
+        {metals.map((each) => (
+          <li key={each.name}>
+            {each.name}, {rangeWords(each)} g/cm³<span>{each.source}</span>
+          </li>
+        ))}
+      </ul>
+    </details>
   );
 }
 

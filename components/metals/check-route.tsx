@@ -25,7 +25,6 @@ export function CheckRoute({ baseMetal }: { baseMetal: BaseMetal }) {
       <Section
         title={`4. Route, if it is ${metal}`}
         aside={<Link href={routes.metalRoute(baseMetal)}>In the library</Link>}
-        rests="Common practice, not advice. Read each solution's safety data sheet; local codes come first."
       >
         <p className="check-route__sum">{route.summary}</p>
         <RouteSteps route={route} />
@@ -36,9 +35,6 @@ export function CheckRoute({ baseMetal }: { baseMetal: BaseMetal }) {
         </Section>
         <Section title={`Activators on ${metal}`}>
           <RouteVerdicts {...route.activators} />
-        </Section>
-        <Section title={`Strikes on ${metal}`}>
-          <RouteVerdicts {...route.strike} />
         </Section>
       </div>
     </div>

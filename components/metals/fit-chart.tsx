@@ -44,8 +44,8 @@ export function FitChart({ densityGPerCm3, uncertaintyGPerCm3, rows }: FitChartP
       </ol>
       <div className="fit__axis" aria-hidden="true">
         {scale.ticks.map((tick) => (
-          <span key={tick} style={measures({ at: scale.at(tick) })}>
-            {tick}
+          <span key={tick.words} style={measures({ at: scale.at(tick.gPerCm3) })}>
+            {tick.words}
           </span>
         ))}
       </div>

@@ -50,25 +50,22 @@ export function PartCheckSheet({ start, units, jobs, seniors, givenRoute, back, 
   return (
     <>
       <header className="lead-block">
-        <h1>{reading ? verdictWords(reading.candidates, withDeclared) : "What is this part made of?"}</h1>
+        <h1 className="lead" aria-live="polite">
+          {reading ? verdictWords(reading.candidates, withDeclared) : "What is this part made of?"}
+        </h1>
         {job && <JobLine job={job} caseRef={check.caseRef} />}
       </header>
       <div className="check-verdict">
         <CheckAnswer state={answer} declared={withDeclared} seniors={seniors} />
         <div className="check-verdict__do no-print">
           <MainButton step={step} className="desk-only" />
-          {reading && (
-            <Button glyph="ui-print" onClick={() => window.print()}>
-              Print it
-            </Button>
-          )}
         </div>
       </div>
-      <div className="check">
+      <div className="weighing">
         <form
           ref={form}
           id={CHECK_FORM}
-          className="check__form no-print"
+          className="weighing__form no-print"
           method="get"
           action={routes.partCheck()}
           noValidate
@@ -90,16 +87,23 @@ export function PartCheckSheet({ start, units, jobs, seniors, givenRoute, back, 
         <Section
           title="3. What fits"
           aside={reading ? `${reading.candidates.length} of ${METALS_KNOWN} metals` : undefined}
-          className="check__result"
+          className="weighing__result"
         >
           <Weights check={check} units={units} />
           {reading && check.read.kind === "ready" ? (
-            <CheckResult
-              reading={reading}
-              declared={declared?.known ? declared : null}
-              tempTyped={`${typed.temp.trim()} ${tempUnit(units)}`}
-              balanceErrorG={check.read.input.balanceErrorG}
-            />
+            <>
+              <CheckResult
+                reading={reading}
+                declared={declared?.known ? declared : null}
+                tempTyped={`${typed.temp.trim()} ${tempUnit(units)}`}
+                balanceErrorG={check.read.input.balanceErrorG}
+              />
+              <div className="check-print no-print">
+                <Button glyph="ui-print" onClick={() => window.print()}>
+                  Print this check
+                </Button>
+              </div>
+            </>
           ) : (
             <NotYet isRefused={check.read.kind === "refused"} />
           )}

@@ -46,7 +46,13 @@ export function Band({ actor, places, here, strip, signOut }: BandProps) {
           <span className="find__word">Find</span>
           <KeyCap>/</KeyCap>
         </Link>
-        <MeMenu name={actor.name} initials={actor.initials} shopName={actor.shopName} signOut={signOut} />
+        <MeMenu
+          name={actor.name}
+          initials={actor.initials}
+          shopName={actor.shopName}
+          places={places.filter((place) => !place.isInBar)}
+          signOut={signOut}
+        />
       </div>
       <OfflineBar />
       {strip}

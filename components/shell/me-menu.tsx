@@ -2,6 +2,7 @@ import Link from "next/link";
 import type { ReactNode } from "react";
 import { KeysToggle } from "@/components/shell/keys-toggle";
 import { NightToggle } from "@/components/shell/night-toggle";
+import type { PlaceView } from "@/components/shell/places";
 
 const MENU_ID = "me-menu";
 
@@ -9,11 +10,13 @@ export interface MeMenuProps {
   name: string;
   initials: string;
   shopName: string;
+  /** Places that the bar has no room for. */
+  places: readonly PlaceView[];
   signOut: string | ReactNode;
 }
 
 /** The person's own corner: account, night shift, keys, sign out. */
-export function MeMenu({ name, initials, shopName, signOut }: MeMenuProps) {
+export function MeMenu({ name, initials, shopName, places, signOut }: MeMenuProps) {
   return (
     <>
       <button type="button" className="me" popoverTarget={MENU_ID} aria-label={`${name}, menu`}>
@@ -25,6 +28,11 @@ export function MeMenu({ name, initials, shopName, signOut }: MeMenuProps) {
           <br />
           {shopName}
         </p>
+        {places.map((place) => (
+          <Link key={place.slug} className="me-menu__row" href={place.href}>
+            {place.title}
+          </Link>
+        ))}
         <Link className="me-menu__row" href="/account">
           Account
         </Link>

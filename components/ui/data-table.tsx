@@ -1,6 +1,7 @@
 /* The phone layout takes the table display away, and with it the semantics: hence the roles spelled out. */
 /* eslint-disable jsx-a11y/no-redundant-roles, jsx-a11y/no-interactive-element-to-noninteractive-role */
 import Link from "next/link";
+import { Fragment } from "react";
 import type { ReactNode } from "react";
 
 export interface Column<Row> {
@@ -23,6 +24,8 @@ export interface DataTableProps<Row> {
   columns: readonly Column<Row>[];
   rows: readonly Row[];
   rowKey: (row: Row) => string;
+  /** A line across the table under a row that has something to say. */
+  rowNote?: (row: Row) => ReactNode;
   /** Cells of a last line, one a column; null leaves a cell empty. */
   foot?: readonly ReactNode[];
 }
@@ -45,8 +48,19 @@ function Head<Row>({ column }: { column: Column<Row> }) {
   );
 }
 
+function NoteLine({ note, span }: { note: ReactNode; span: number }) {
+  if (!note) return null;
+  return (
+    <tr role="row" className="tb__note">
+      <td role="cell" colSpan={span}>
+        {note}
+      </td>
+    </tr>
+  );
+}
+
 /** A plain table. On a phone each row turns into lines of head and value, so nothing scrolls sideways. */
-export function DataTable<Row>({ caption, showCaption, columns, rows, rowKey, foot }: DataTableProps<Row>) {
+export function DataTable<Row>({ caption, showCaption, columns, rows, rowKey, rowNote, foot }: DataTableProps<Row>) {
   return (
     <table className="tb" role="table">
       <caption className={showCaption ? undefined : "sr-only"}>{caption}</caption>
@@ -59,13 +73,16 @@ export function DataTable<Row>({ caption, showCaption, columns, rows, rowKey, fo
       </thead>
       <tbody role="rowgroup">
         {rows.map((row) => (
-          <tr role="row" key={rowKey(row)}>
-            {columns.map((column) => (
-              <td role="cell" key={column.key} className={cellClass(column)} data-head={column.head}>
-                <span>{column.cell(row)}</span>
-              </td>
-            ))}
-          </tr>
+          <Fragment key={rowKey(row)}>
+            <tr role="row">
+              {columns.map((column) => (
+                <td role="cell" key={column.key} className={cellClass(column)} data-head={column.head}>
+                  <span>{column.cell(row)}</span>
+                </td>
+              ))}
+            </tr>
+            <NoteLine note={rowNote?.(row)} span={columns.length} />
+          </Fragment>
         ))}
       </tbody>
       {foot && (

@@ -47,6 +47,8 @@ const factColumns = {
     id: workOrders.id,
     number: workOrders.number,
     partName: workOrders.partName,
+    baseMetal: workOrders.baseMetal,
+    alloy: workOrders.alloy,
     quantity: workOrders.quantity,
     finalStack: workOrders.finalStack,
     customer: customers.name,

@@ -1,5 +1,6 @@
 import { and, asc, desc, eq, inArray, isNull } from "drizzle-orm";
-import type { LastSnap, RunChoice, SnapChoices } from "@/lib/cases/same-as-last";
+import type { JobChoice, LastSnap, RunChoice, SnapChoices } from "@/lib/cases/same-as-last";
+import { checkWarning } from "@/lib/metals/check-warning";
 import type { Handle } from "../open";
 import {
   cases,
@@ -13,6 +14,7 @@ import {
   workOrders,
 } from "../schema";
 import { listSolutions, listStations } from "./line";
+import { listLatestPartChecks } from "./part-checks";
 
 /** More open jobs than fit a phone's list are no help; the newest are what hangs on the racks. */
 const JOBS = 200;
@@ -21,12 +23,22 @@ const RUNS = 200;
 /** Everything of the shop that a snap may name. */
 export function listSnapChoices(db: Handle, shopId: number): SnapChoices {
   return {
-    jobs: listOpenJobs(db, shopId),
+    jobs: withMisfits(db, shopId, listOpenJobs(db, shopId)),
     stations: listStations(db, shopId),
     solutions: listSolutions(db, shopId),
     runs: listRunsOfOpenJobs(db, shopId),
     classes: listClasses(db, shopId),
   };
+}
+
+/** Each job with what its newest weighing says against its metal. */
+function withMisfits(db: Handle, shopId: number, jobs: JobChoice[]): JobChoice[] {
+  const checks = listLatestPartChecks(
+    db,
+    shopId,
+    jobs.map((job) => job.id),
+  );
+  return jobs.map((job) => ({ ...job, misfit: checkWarning(checks.get(job.id), job) ?? undefined }));
 }
 
 /** The classes that may be called, in the library's order. */

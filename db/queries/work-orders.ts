@@ -116,7 +116,7 @@ export function insertWorkOrder(tx: Handle, job: NewJob): number {
 
 type JobColumns = Pick<
   typeof workOrders.$inferInsert,
-  "quantity" | "areaDm2" | "partValueCents" | "finalStack" | "closedAt"
+  "baseMetal" | "alloy" | "quantity" | "areaDm2" | "partValueCents" | "finalStack" | "closedAt"
 >;
 
 /** Writes some columns of a job of the shop. */

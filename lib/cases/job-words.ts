@@ -1,4 +1,5 @@
-import { counted } from "./part-words";
+import type { BaseMetal } from "./case-words";
+import { counted, metalInside } from "./part-words";
 
 /** What of a job its later prices rest on. */
 export interface JobCostFacts {
@@ -31,4 +32,17 @@ export function jobChanges(before: JobCostFacts, after: JobCostFacts, money: (ce
     ["layers", layersWords(before.finalStack), layersWords(after.finalStack)],
   ];
   return facts.flatMap(([name, from, to]) => (from === to ? [] : [`${name} from ${from} to ${to}`]));
+}
+
+/** The same for what its parts are made of. */
+export function metalChanges(before: JobMetal, after: JobMetal): string[] {
+  const from = metalInside(before.baseMetal, before.alloy);
+  const to = metalInside(after.baseMetal, after.alloy);
+  return from === to ? [] : [`base metal from ${from} to ${to}`];
+}
+
+/** What a job card says its parts are made of. */
+export interface JobMetal {
+  baseMetal: BaseMetal;
+  alloy: string | null;
 }

@@ -25,6 +25,9 @@ const words = (what: string, most: number) =>
 
 const jobId = z.coerce.number({ error: "Choose a job." }).int("Choose a job.").positive("Choose a job.");
 
+const baseMetal = z.enum(BASE_METALS, { error: "Choose the base metal." });
+const alloy = z.string().trim().max(LIMITS.nameChars, `Keep it to ${LIMITS.nameChars} characters.`).default("");
+
 const quantity = z
   .string({ error: "Give the number of parts." })
   .trim()
@@ -132,24 +135,29 @@ export const openJobInput = z
     number: words("the job's number", JOB_LIMITS.numberChars),
     customer: words("the customer", LIMITS.nameChars),
     partName: words("the part a name", LIMITS.nameChars),
-    baseMetal: z.enum(BASE_METALS, { error: "Choose the base metal." }),
-    alloy: z.string().trim().max(LIMITS.nameChars, `Keep it to ${LIMITS.nameChars} characters.`).default(""),
+    baseMetal,
+    alloy,
     ...costFacts,
   })
-  .transform(({ number, customer, partName, baseMetal, alloy, ...typed }, context) => ({
+  .transform(({ number, customer, partName, baseMetal: metal, alloy: typedAlloy, ...typed }, context) => ({
     number,
     customer,
     partName,
-    baseMetal,
-    alloy: alloy || null,
+    baseMetal: metal,
+    alloy: typedAlloy || null,
     ...costFactsFrom(typed, context),
   }));
 export type OpenJob = z.output<typeof openJobInput>;
 
-/** What may be changed of an open job: that on which the prices of later cases rest. */
+/** What may be changed of an open job: that on which the prices of later cases rest, and the metal that its card got wrong. */
 export const changeJobInput = z
-  .object({ jobId, ...costFacts })
-  .transform(({ jobId: id, ...typed }, context) => ({ jobId: id, ...costFactsFrom(typed, context) }));
+  .object({ jobId, baseMetal: baseMetal.optional(), alloy, ...costFacts })
+  .transform(({ jobId: id, baseMetal: metal, alloy: typedAlloy, ...typed }, context) => ({
+    jobId: id,
+    /** Undefined: the form did not ask. */
+    metal: metal && { baseMetal: metal, alloy: typedAlloy || null },
+    ...costFactsFrom(typed, context),
+  }));
 export type ChangeJob = z.output<typeof changeJobInput>;
 
 export const jobIdInput = z.object({ jobId });

@@ -9,6 +9,8 @@ export interface JobChoice {
   baseMetal: BaseMetal;
   alloy: string | null;
   quantity: number;
+  /** Its newest weighing does not fit its metal: said in words. */
+  misfit?: string;
 }
 
 export interface StationChoice {

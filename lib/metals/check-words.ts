@@ -24,6 +24,12 @@ export const errorWords = (uncertaintyGPerCm3: number): string =>
 export const rangeWords = (range: { lowGPerCm3: number; highGPerCm3: number }): string =>
   `${Number(range.lowGPerCm3.toFixed(2))} to ${Number(range.highGPerCm3.toFixed(2))}`;
 
+/** What stands in brackets tells specialists more and everybody else nothing. */
+const BRACKETS = / \(.*\)$/;
+
+/** "Zinc die cast Alloy 3": a metal as a line of its own, without what stands in brackets. */
+export const shortName = ({ name }: Pick<Material, "name">): string => capital(name.replace(BRACKETS, ""));
+
 /**
  * The kinds of metal among candidates, best first: base metals, and by name those outside our base metals.
  * @example kindsOf([Alloy 3, Alloy 5]) // ["zinc die cast"]
@@ -55,8 +61,7 @@ export function verdictWords(
     const isSameKind = kinds.length === 1 && kinds[0] === says;
     return `${like} The job says ${isSameKind ? metalInSentence(declared.metal.baseMetal, declared.metal.alloy) : says}.`;
   }
-  if (kinds.length === 1 && kinds[0] === says)
-    return `${like} So does the job.`.replace("So does the job.", "The job says so too.");
+  if (kinds.length === 1 && kinds[0] === says) return `${like} The job says so too.`;
   return kinds.includes(says) ? `${like} The job says ${says}.` : `${like} By weight alone the job's ${says} fits too.`;
 }
 
@@ -73,7 +78,7 @@ export function openWords(candidates: readonly Material[]): string {
   if (!best) return "Nothing in the table fits. See what may have misled.";
   const kinds = kindsOf(candidates);
   if (kinds.length > 1) return `The weight leaves ${countWords(kinds.length)} metals open. Their routes differ.`;
-  if (candidates.length === 1) return `Only ${best.name} fits.`;
+  if (candidates.length === 1) return `Only ${best.name.replace(BRACKETS, "")} fits.`;
   return `${capital(kinds[0] ?? "")}. This does not tell its alloys apart; the route is the same.`;
 }
 
@@ -95,8 +100,8 @@ export function restsWords(
 }
 
 function sourceWords(shown: readonly Pick<Material, "name" | "source">[]): string {
-  const remembered = shown.filter(({ source }) => source.includes("from memory")).map(({ name }) => name);
-  if (remembered.length === 0) return "Ranges published; press one for its source.";
+  const remembered = shown.filter(({ source }) => source.includes("from memory")).map(shortName);
+  if (remembered.length === 0) return "Ranges published.";
   if (remembered.length === shown.length) return "Ranges from memory.";
   return `Ranges: ${remembered.join(", ")} from memory, the rest published.`;
 }

@@ -9,7 +9,7 @@ export interface FitScale {
   /** 0 at the left end, 100 at the right. */
   at: (gPerCm3: number) => number;
   /** Densities to write under the scale. */
-  ticks: number[];
+  ticks: { gPerCm3: number; words: string }[];
 }
 
 /** The side of a bar on which its words stand, and the density at which they begin (after) or end (before). */
@@ -23,7 +23,7 @@ const MARGIN = 0.05;
 /** The longest reason takes this share of a phone's width. */
 const ROOM_FOR_WORDS = 0.47;
 const STEPS = [0.01, 0.02, 0.05, 0.1, 0.2, 0.5, 1, 2, 5];
-const MOST_TICKS = 5;
+const MOST_TICKS = 6;
 
 /**
  * One scale for the measured band and every range drawn with it. It reaches further right where some bar's words would
@@ -41,11 +41,15 @@ export function fitScale(band: DensityRange, ranges: readonly DensityRange[]): F
   return { at: (gPerCm3) => ((gPerCm3 - from) / width) * 100, ticks: ticksOf(from, width) };
 }
 
-function ticksOf(from: number, width: number): number[] {
+function ticksOf(from: number, width: number): FitScale["ticks"] {
   const step = STEPS.find((each) => width / each <= MOST_TICKS) ?? 10;
   const first = Math.ceil(from / step);
   const count = Math.floor((from + width) / step) - first + 1;
-  return Array.from({ length: count }, (_, index) => Number(((first + index) * step).toFixed(2)));
+  const decimals = step < 0.1 ? 2 : step < 1 ? 1 : 0;
+  return Array.from({ length: count }, (_, index) => {
+    const gPerCm3 = (first + index) * step;
+    return { gPerCm3, words: gPerCm3.toFixed(decimals) };
+  });
 }
 
 /** The roomiest place for a bar's words: behind bar and band, before both, or between the two. */

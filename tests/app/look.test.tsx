@@ -106,6 +106,7 @@ describe("places", () => {
       "Rework",
       "Casebook",
       "Library",
+      "Part check",
     ]);
   });
 
@@ -117,8 +118,16 @@ describe("places", () => {
       "Rework",
       "Casebook",
       "Library",
+      "Part check",
+      "Strip",
       "Ledger",
       "Crew",
+    ]);
+  });
+
+  it("the desktop bar holds no more than it has room for: the part check stands in the menus", () => {
+    expect(placesFor(["owner", "senior", "plater"]).filter((place) => !place.isInBar)).toMatchObject([
+      { slug: "metals", title: "Part check", href: "/metals/check" },
     ]);
   });
 });

@@ -10,7 +10,7 @@ import {
   updateWorkOrder,
   type JobRow,
 } from "@/db/queries/work-orders";
-import { jobChanges } from "@/lib/cases/job-words";
+import { jobChanges, metalChanges } from "@/lib/cases/job-words";
 import type { ChangeJob, OpenJob } from "@/lib/cases/job.schema";
 import type { AuditAction } from "@/lib/crew/audit-words";
 import { fault } from "@/lib/fault";
@@ -49,16 +49,17 @@ export function openJob(db: Db, member: SignedIn, input: OpenJob, now: number): 
  * @throws FaultError "not-found" for no job of this shop, "conflict" for a closed one or where nothing changes
  */
 export function changeJob(db: Db, member: SignedIn, input: ChangeJob, now: number): { number: string } {
-  const { jobId, partValueCents, ...facts } = input;
+  const { jobId, partValueCents, metal, ...facts } = input;
   demandMoney(member, partValueCents);
   return db.transaction(
     (tx) => {
       const job = demandJob(tx, member.shopId, jobId);
       if (job.closedAt !== null) throw fault("conflict", `${job.number} is closed. Open it again to change it.`);
       const after = { ...facts, partValueCents: partValueCents ?? job.partValueCents };
-      const changed = jobChanges(job, after, (cents) => formatMoney(cents, member.shop.currency));
+      const figures = jobChanges(job, after, (cents) => formatMoney(cents, member.shop.currency));
+      const changed = [...(metal ? metalChanges(job, metal) : []), ...figures];
       if (changed.length === 0) throw fault("conflict", "Nothing differs from what holds. Change a figure first.");
-      updateWorkOrder(tx, member.shopId, jobId, after);
+      updateWorkOrder(tx, member.shopId, jobId, { ...after, ...metal });
       priceOpenCases(tx, { shopId: member.shopId, now }, jobId);
       record(tx, member, "job.changed", job.number, now, { changed });
       return { number: job.number };

@@ -6,6 +6,7 @@ import { CaseHead } from "@/components/cases/case-head";
 import { CaseHistory } from "@/components/cases/case-history";
 import { CaseTrace } from "@/components/cases/case-trace";
 import { LineStrip } from "@/components/line/line-strip";
+import { MisfitNote } from "@/components/metals/misfit-line";
 import type { MainAction } from "@/components/shell/main-action";
 import { ShopShell } from "@/components/shell/shop-shell";
 import { LinkButton } from "@/components/ui/button";
@@ -14,9 +15,11 @@ import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
 import { getCaseFacts, type CaseFacts } from "@/db/queries/case-page";
 import type { SignedIn } from "@/db/queries/crew";
+import { getLatestPartCheck } from "@/db/queries/part-checks";
 import { CASE_REF_PATTERN } from "@/lib/cases/case-ref";
 import { callWords } from "@/lib/cases/part-words";
 import { traceWords } from "@/lib/cases/trace-words";
+import { caseMisfit } from "@/lib/metals/misfit";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
@@ -41,7 +44,10 @@ export default async function CasePage({ params }: CasePageProps) {
   const db = getDb();
   const facts = CASE_REF_PATTERN.test(ref) ? getCaseFacts(db, member.shopId, ref) : null;
   if (!facts) notFound();
-  const loaded = loadCase(db, member.shopId, facts, { now: Date.now(), timeZone: member.shop.timeZone });
+  const now = Date.now();
+  const loaded = loadCase(db, member.shopId, facts, { now, timeZone: member.shop.timeZone });
+  const check = getLatestPartCheck(db, member.shopId, { workOrderId: facts.job.id });
+  const misfit = caseMisfit(check, facts, { shop: member.shop, now });
   const { actor, counts, stations } = shellFor(member);
   const main = mainAction(member, facts);
   return (
@@ -79,6 +85,7 @@ export default async function CasePage({ params }: CasePageProps) {
           Print the tag
         </LinkButton>
       </div>
+      {misfit && <MisfitNote misfit={misfit} />}
       {facts.selfConfirmed && (
         <Note title="First call and second look by the same person" className="case-note">
           {facts.confirmedBy} confirmed their own first call. It stays out of the agreement figures.
@@ -100,7 +107,7 @@ export default async function CasePage({ params }: CasePageProps) {
       <div className="case-cols">
         <div>
           <CasePhotos member={member} facts={facts} shots={loaded.shots} />
-          <Section title="What is known">
+          <Section title="What is known" aside={<Link href={routes.partCheck({ case: facts.ref })}>Weigh a part</Link>}>
             <CaseFactSlips facts={facts} solutions={loaded.solutions} />
           </Section>
         </div>

@@ -1,13 +1,17 @@
 import { JobChangeForm } from "@/components/cases/job-change-form";
 import { JobTurnForm } from "@/components/cases/job-turn-form";
+import { MisfitNote } from "@/components/metals/misfit-line";
 import { ShopShell } from "@/components/shell/shop-shell";
 import { Lead } from "@/components/ui/lead";
 import { Note } from "@/components/ui/note";
 import { Section } from "@/components/ui/section";
+import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
+import { getLatestPartCheck } from "@/db/queries/part-checks";
 import type { JobRow } from "@/db/queries/work-orders";
 import { counted, metalInside } from "@/lib/cases/part-words";
 import { currencySign } from "@/lib/costs/rate-fields";
+import { jobMisfit } from "@/lib/metals/misfit";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { shellFor } from "@/lib/server/shell-data";
@@ -20,6 +24,8 @@ const FORM_ID = "job";
 export function ChangeView({ member, job }: { member: SignedIn; job: JobRow }) {
   const { actor, counts } = shellFor(member);
   const isClosed = job.closedAt !== null;
+  const check = getLatestPartCheck(getDb(), member.shopId, { workOrderId: job.id });
+  const misfit = jobMisfit(check, job, { shop: member.shop, now: Date.now() });
   return (
     <ShopShell
       actor={actor}
@@ -34,6 +40,7 @@ export function ChangeView({ member, job }: { member: SignedIn; job: JobRow }) {
       >
         {isClosed ? `Job ${job.number} is closed` : `Job ${job.number}`}
       </Lead>
+      {misfit && <MisfitNote misfit={misfit} />}
       {isClosed ? (
         <Section title="Open it again">
           <JobTurnForm id={FORM_ID} jobId={job.id} label="Open it again" variant="main" action={reopenJob}>
@@ -50,10 +57,11 @@ export function ChangeView({ member, job }: { member: SignedIn; job: JobRow }) {
 function OpenJob({ member, job }: { member: SignedIn; job: JobRow }) {
   return (
     <div className="cols--main">
-      <Section title="What its prices rest on">
+      <Section title="The job card">
         <JobChangeForm
           id={FORM_ID}
           jobId={job.id}
+          metal={{ baseMetal: job.baseMetal, alloy: job.alloy }}
           figures={jobFigures(job, member)}
           currencySign={can(member, "money.case") ? currencySign(member.shop.currency) : null}
           action={changeJob}

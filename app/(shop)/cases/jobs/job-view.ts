@@ -4,12 +4,16 @@ import type { SignedIn } from "@/db/queries/crew";
 import type { JobRow } from "@/db/queries/work-orders";
 import { layersWords } from "@/lib/cases/job-words";
 import { metalWords } from "@/lib/cases/part-words";
+import type { Misfit } from "@/lib/metals/misfit";
 import { formatMoney } from "@/lib/money";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 
-/** A job for its list: the value only for those who may see money, the way in only for those who may change it. */
-export function jobView(job: JobRow, member: SignedIn): JobView {
+/**
+ * A job for its list: the value only for those who may see money, the way in only for those who may change it.
+ * @param misfit where its newest weighing does not fit what it declares
+ */
+export function jobView(job: JobRow, member: SignedIn, misfit?: Misfit): JobView {
   const { partValueCents, closedAt } = job;
   const value = partValueCents === 0 ? "not set" : formatMoney(partValueCents, member.shop.currency);
   return {
@@ -20,6 +24,8 @@ export function jobView(job: JobRow, member: SignedIn): JobView {
     metal: metalWords(job.baseMetal, job.alloy),
     quantity: job.quantity,
     layers: layersWords(job.finalStack),
+    weighHref: routes.partCheck({ job: job.number }),
+    misfit,
     held: job.heldCases === 0 ? "" : String(job.heldCases),
     ...(can(member, "money.case") ? { value } : {}),
     ...(can(member, "job.change")

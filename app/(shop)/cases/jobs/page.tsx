@@ -10,9 +10,11 @@ import { Pager } from "@/components/ui/pager";
 import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
+import { listLatestPartChecks } from "@/db/queries/part-checks";
 import { countOpenJobs, getJob, listJobs, placeOfJob } from "@/db/queries/work-orders";
 import { readJobCursor, writeJobCursor } from "@/lib/cases/job-cursor";
 import { countWords } from "@/lib/cases/part-words";
+import { jobMisfit } from "@/lib/metals/misfit";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
@@ -54,6 +56,12 @@ function ListView({ member, isClosed, after }: { member: SignedIn; isClosed: boo
   const keeps = can(member, "job.keep");
   const main: MainAction | null = keeps ? { label: "Open a job", href: routes.jobs({ open: "1" }), keyCap: "N" } : null;
   const closed: Record<string, string> = isClosed ? { closed: "1" } : {};
+  const checks = listLatestPartChecks(
+    db,
+    member.shopId,
+    shown.map((job) => job.id),
+  );
+  const now = Date.now();
   const { actor, counts } = shellFor(member);
   return (
     <ShopShell
@@ -89,7 +97,9 @@ function ListView({ member, isClosed, after }: { member: SignedIn; isClosed: boo
         ) : (
           <JobTable
             caption={isClosed ? "Closed jobs, the last closed first" : "Open jobs, newest first"}
-            jobs={shown.map((job) => jobView(job, member))}
+            jobs={shown.map((job) =>
+              jobView(job, member, jobMisfit(checks.get(job.id), job, { shop: member.shop, now })),
+            )}
           />
         )}
       </Section>

@@ -6,6 +6,7 @@ import { stagePhotos } from "@/components/cases/case-shots";
 import { Against, MostAlike } from "@/components/cases/second-look-against";
 import { SecondLookForm } from "@/components/cases/second-look-form";
 import { Stake } from "@/components/cases/second-look-stake";
+import { MisfitNote } from "@/components/metals/misfit-line";
 import { InStepArea } from "@/components/photos/photo-stage-view";
 import { PhotoStage } from "@/components/photos/photo-stage";
 import { Section } from "@/components/ui/section";
@@ -15,12 +16,14 @@ import { getCaseFacts, type CaseFacts } from "@/db/queries/case-page";
 import type { CaseCall } from "@/db/queries/case-records";
 import type { SignedIn } from "@/db/queries/crew";
 import { getStation } from "@/db/queries/line";
+import { getLatestPartCheck } from "@/db/queries/part-checks";
 import { CASE_REF_PATTERN } from "@/lib/cases/case-ref";
 import { opinionWords } from "@/lib/cases/history-words";
 import { dayWords } from "@/lib/cases/moment-words";
 import { metalInSentence } from "@/lib/cases/metal-words";
 import { partsOf } from "@/lib/cases/part-words";
 import { tagStanding } from "@/lib/cases/tag-standing";
+import { caseMisfit } from "@/lib/metals/misfit";
 import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
@@ -73,38 +76,47 @@ function Desk({ member, facts, nextHref, now }: DeskProps) {
   const stageable = stagePhotos(facts.ref, look.shots);
   const firstCall = look.calls.find((call) => call.kind === "first");
   const standing = tagStanding(facts, now);
+  const check = getLatestPartCheck(getDb(), member.shopId, { workOrderId: facts.job.id });
+  const misfit = caseMisfit(check, facts, { shop: member.shop, now });
   return (
-    <InStepArea className="sl-desk">
-      <div className="sl-look">
-        <PhotoStage photos={stageable} startAt={newestReady(look.shots)} />
-        <Section title="What is known" className="sl-known">
-          <CaseFactSlips facts={facts} solutions={look.solutions} />
-          <CallsTable calls={look.calls} caption="Calls so far" />
-        </Section>
-      </div>
-      <div className="sl-against">
-        <Against classes={look.against} />
-        <MostAlike
-          cases={look.alike}
-          allHref={routes.casebook({ metal: facts.baseMetal, ...classFilter(look.startWith) })}
+    <>
+      {misfit && (
+        <div className="sl-misfit">
+          <MisfitNote misfit={misfit} />
+        </div>
+      )}
+      <InStepArea className="sl-desk">
+        <div className="sl-look">
+          <PhotoStage photos={stageable} startAt={newestReady(look.shots)} />
+          <Section title="What is known" className="sl-known">
+            <CaseFactSlips facts={facts} solutions={look.solutions} />
+            <CallsTable calls={look.calls} caption="Calls so far" />
+          </Section>
+        </div>
+        <div className="sl-against">
+          <Against classes={look.against} />
+          <MostAlike
+            cases={look.alike}
+            allHref={routes.casebook({ metal: facts.baseMetal, ...classFilter(look.startWith) })}
+          />
+        </div>
+        <SecondLookForm
+          key={`${facts.ref}-${facts.round}`}
+          caseRef={facts.ref}
+          stateWords={standing.words}
+          sub={<SubLines facts={facts} firstCall={firstCall} />}
+          ownCall={firstCall?.memberId === member.memberId}
+          offer={look.offer}
+          first={look.first}
+          rest={look.rest}
+          startWith={look.startWith}
+          stake={can(member, "money.case") && <StakeOf member={member} facts={facts} />}
+          nextHref={nextHref}
+          onConfirm={confirmCase}
+          onRelease={releaseCase}
         />
-      </div>
-      <SecondLookForm
-        key={`${facts.ref}-${facts.round}`}
-        caseRef={facts.ref}
-        stateWords={standing.words}
-        sub={<SubLines facts={facts} firstCall={firstCall} />}
-        ownCall={firstCall?.memberId === member.memberId}
-        offer={look.offer}
-        first={look.first}
-        rest={look.rest}
-        startWith={look.startWith}
-        stake={can(member, "money.case") && <StakeOf member={member} facts={facts} />}
-        nextHref={nextHref}
-        onConfirm={confirmCase}
-        onRelease={releaseCase}
-      />
-    </InStepArea>
+      </InStepArea>
+    </>
   );
 }
 
