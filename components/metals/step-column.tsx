@@ -1,7 +1,8 @@
 import { stationGlyph } from "@/components/cases/class-glyph";
 import { Caution } from "@/components/ui/caution";
 import { Glyph } from "@/components/ui/glyph";
-import type { RouteStep, StepLiquid } from "@/lib/metals/pretreatment/route";
+import type { RouteCaution, RouteStep, StepLiquid } from "@/lib/metals/pretreatment/route";
+import { bindUnits } from "@/lib/metals/pretreatment/unit-words";
 
 const LIQUID_WORDS: Partial<Record<StepLiquid, string>> = { acid: "Acid", cyanide: "Cyanide", alkali: "Alkali" };
 
@@ -28,13 +29,13 @@ function Step({ step }: { step: RouteStep }) {
           <strong>{step.title}</strong>
           {step.minutesWords && <span className="fig">{step.minutesWords}</span>}
         </p>
-        <p>{step.detail}</p>
+        <p>{bindUnits(step.detail)}</p>
         {step.proof && (
           <p>
-            <b>Proof:</b> {step.proof}
+            <b>Proof:</b> {bindUnits(step.proof)}
           </p>
         )}
-        {step.cautions.map((caution) => (
+        {stopsFirst(step.cautions).map((caution) => (
           <Caution key={caution.text} level={caution.level}>
             {caution.text}
           </Caution>
@@ -45,4 +46,9 @@ function Step({ step }: { step: RouteStep }) {
       </div>
     </li>
   );
+}
+
+/** What people get hurt by is read before the usual care. */
+function stopsFirst(cautions: readonly RouteCaution[]): RouteCaution[] {
+  return cautions.toSorted((a, b) => Number(b.level === "stop") - Number(a.level === "stop"));
 }

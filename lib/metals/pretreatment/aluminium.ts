@@ -1,4 +1,4 @@
-import { ACID, CYANIDE_NEXT, FLUORIDE, HOT_ALKALI, LIVE_ENTRY, CYANIDE, NITRIC, SHEET } from "./cautions";
+import { ACID, CYANIDE_NEXT, FLUORIDE, HOT_ALKALI, HOT_PART, LIVE_ENTRY, CYANIDE, NITRIC, SHEET } from "./cautions";
 import type { RouteStep, WrittenRoute } from "./route";
 import { COMMON, MEMORY } from "./sources";
 import { acidDip, liveCyanideStrike, look, rinse, rinseBeforeCyanide, soak, waterBreak } from "./steps";
@@ -9,7 +9,7 @@ function zincateCoat(own: Pick<RouteStep, "title" | "minutesWords" | "proof"> & 
   return {
     station: "activate",
     liquid: "alkali",
-    cautions: [HOT_ALKALI, SHEET],
+    cautions: [HOT_ALKALI],
     source: `ASTM B253; Guidebook, aluminium; times ${MEMORY}`,
     ...own,
   };
@@ -40,7 +40,7 @@ export const aluminium: WrittenRoute = {
       detail: "Wrought: nitric acid 50 to 100 % by volume, or 15 to 25 % with sulfuric 10 to 20 %. Room temperature.",
       minutesWords: "15 to 60 s",
       proof: "White, and a white paper towel wipes off clean.",
-      cautions: [NITRIC, ACID, SHEET],
+      cautions: [NITRIC, ACID],
       source: `Guidebook, aluminium; time ${MEMORY}`,
     }),
     rinse(),
@@ -84,6 +84,7 @@ export const aluminium: WrittenRoute = {
     }),
     look({
       detail: "Tape one part, then heat one to 220 °C and quench: zincate faults blister. Then the final plate.",
+      cautions: [HOT_PART],
       source: `${COMMON}; 220 °C (ISO 2819) ${MEMORY}`,
     }),
   ],

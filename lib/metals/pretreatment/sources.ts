@@ -46,7 +46,15 @@ export const SOURCES: readonly RouteSource[] = [
     citation:
       "ASTM B850, bake of coated steel against hydrogen embrittlement; ISO 9588 is its equal. Table from a public bake chart; the 4 hours to the start from memory.",
   },
+  {
+    name: "ASTM D3359",
+    citation: "ASTM D3359, rating adhesion by tape. Written for paint films: on a strike its use is shop practice.",
+  },
   { name: "ASTM F22", citation: "ASTM F22, water-break test for hydrophobic surface films (from memory)." },
+  {
+    name: "ISO 2819",
+    citation: "ISO 2819, review of adhesion tests for electrodeposited coatings (temperatures from memory).",
+  },
   {
     name: "CRC potentials",
     citation: "CRC Handbook of Chemistry and Physics, standard electrode potentials (values from memory).",

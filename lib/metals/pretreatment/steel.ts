@@ -11,7 +11,7 @@ const HIGH_STRENGTH_STEPS: readonly RouteStep[] = [
     detail:
       "If ground, straightened or formed after hardening: bake at 190 to 230 °C before any plating, by the engineer's card.",
     liquid: "none",
-    cautions: [HYDROGEN, HOT_PART],
+    cautions: [HOT_PART],
     source: "ASTM B849",
   },
   {
@@ -30,7 +30,7 @@ const HIGH_STRENGTH_STEPS: readonly RouteStep[] = [
       "Within 4 h of the last plate: 190 to 220 °C for 8 h (1001 to 1100 MPa) rising by 2 h a step to 22 h (1701 to 1800 MPa).",
     minutesWords: "8 to 22 h",
     liquid: "none",
-    cautions: [HYDROGEN, HOT_PART],
+    cautions: [HOT_PART],
     source: `ASTM B850; the 4 h ${MEMORY}`,
   },
 ];

@@ -1,5 +1,5 @@
 /** The steps that nearly every route shares, so that their cautions are the same on every one. */
-import { ACID, CYANIDE, CYANIDE_NEXT, HOT_ALKALI, LIVE_ENTRY, POWER, SHEET } from "./cautions";
+import { ACID, CYANIDE, CYANIDE_NEXT, HOT_ALKALI, LIVE_ENTRY, POWER } from "./cautions";
 import type { RouteStep } from "./route";
 import { COMMON, MEMORY } from "./sources";
 
@@ -12,7 +12,7 @@ export function soak(own: Own): RouteStep {
     title: "Soak clean",
     liquid: "alkali",
     minutesWords: "3 to 10 min",
-    cautions: [HOT_ALKALI, SHEET],
+    cautions: [HOT_ALKALI],
     source: `${COMMON}; times and temperatures ${MEMORY}`,
     ...own,
   };
@@ -110,7 +110,7 @@ export function look(own: Partial<RouteStep> = {}): RouteStep {
     detail: "Look dry under good light, tape one part of the rack, photograph what is not sound. Then the final plate.",
     liquid: "water",
     cautions: [],
-    source: `${COMMON}; tape on a strike is shop practice`,
+    source: `${COMMON}; ASTM D3359`,
     ...own,
   };
 }

@@ -1,4 +1,4 @@
-import { ACID, CYANIDE, LIVE_ENTRY, SHEET } from "./cautions";
+import { ACID, CYANIDE, HOT_PART, LIVE_ENTRY, SHEET } from "./cautions";
 import type { WrittenRoute } from "./route";
 import { COMMON, MEMORY } from "./sources";
 import { acidDip, electroclean, liveCyanideStrike, look, rinseBeforeCyanide, soak, waterBreak } from "./steps";
@@ -44,6 +44,7 @@ export const zinc: WrittenRoute = {
     }),
     look({
       detail: "Look into recesses and along parting lines, tape one part. Heat one to 150 °C if blisters are feared.",
+      cautions: [HOT_PART],
       source: `${COMMON}; 150 °C (ISO 2819) ${MEMORY}`,
     }),
   ],

@@ -51,11 +51,7 @@ export default async function MetalRoutePage({ params }: MetalRoutePageProps) {
       </nav>
       <Lead below={route.summary}>{route.title}</Lead>
       <div className="metal-cols">
-        <Section
-          title="Route"
-          aside="From the bench to the strike"
-          rests="Common practice, not advice. Read each solution's safety data sheet; local codes and licensed practice come first."
-        >
+        <Section title="Route" aside="From the bench to the strike">
           <RouteSteps route={route} />
         </Section>
         <div>
