@@ -53,7 +53,7 @@ export function WorthCheck({ headingLevel = 3, ...props }: WorthCheckProps) {
 function Basis(props: Omit<WorthCheckProps, "headingLevel"> & { breakEvenRate: number }) {
   const { checkCents, checkSeconds, checkFrom, currency, missCents, missFrom, breakEvenRate } = props;
   const doubled = breakEvenRate * 2;
-  const half = doubled < 1 ? `above ${shareWords(doubled)}` : "never";
+  const half = doubled < 1 ? `pays above ${shareWords(doubled)}` : "never pays";
   return (
     <>
       <Rests>
@@ -70,7 +70,7 @@ function Basis(props: Omit<WorthCheckProps, "headingLevel"> & { breakEvenRate: n
         </p>
         <p>
           It takes for granted that who looks sees a bad part, and that the parts to come are like these. A check that
-          sees only half of them pays {half}.
+          sees only half of them {half}.
         </p>
       </details>
     </>

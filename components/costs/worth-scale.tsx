@@ -76,5 +76,5 @@ function saidWords(breakEvenRate: number, rate: number | undefined, interval: re
   const even =
     breakEvenRate >= 1 ? "Checking never pays" : `Checking pays above ${shareWords(breakEvenRate)} bad parts`;
   if (rate === undefined) return `${even}. No share of your own yet.`;
-  return `${even}. Yours: ${shareWords(rate)}, between ${shareRangeWords(...interval)}.`;
+  return `${even}. Yours: ${shareWords(rate)}, ${shareRangeWords(...interval)}.`;
 }

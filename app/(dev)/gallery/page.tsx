@@ -13,7 +13,7 @@ import { GlyphShelf } from "./glyph-shelf";
 import { NotThereShelf } from "./not-there-shelf";
 import { RouteShelf } from "./route-shelf";
 import { TagCards, TagForms, TagLists } from "./tag-shelf";
-import { WorthShelf } from "./worth-shelf";
+import { TestPieceShelf, WorthShelf } from "./worth-shelf";
 
 export const metadata: Metadata = { title: "Parts and states", robots: { index: false } };
 
@@ -59,6 +59,7 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <FigureShelf />
       <TableShelf />
       <WorthShelf />
+      <TestPieceShelf />
       <RouteShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">

@@ -1,5 +1,7 @@
+import { TestPieces } from "@/components/costs/test-pieces";
 import { WorthCheck, type WorthCheckProps } from "@/components/costs/worth-check";
 import { Section } from "@/components/ui/section";
+import type { TypedTestPieces } from "@/lib/costs/test-piece-words";
 
 const SHOP: WorthCheckProps = {
   checkCents: 53,
@@ -24,6 +26,35 @@ const PANELS: readonly { title: string; props: WorthCheckProps }[] = [
   { title: "A check dearer than a miss", props: { ...SHOP, missCents: 40 } },
   { title: "A miss that costs nothing", props: { ...SHOP, missCents: 0 } },
 ];
+
+const PIECES: TypedTestPieces = {
+  badPercent: "10",
+  wantedPercent: "90",
+  pieceMoney: "0.50",
+  faultyRunPercent: "5",
+  spoiltRunMoney: "840.00",
+};
+const PIECE_PANELS: readonly { title: string; start: TypedTestPieces }[] = [
+  { title: "They pay", start: PIECES },
+  { title: "They do not", start: { ...PIECES, pieceMoney: "4.00" } },
+  { title: "Bad figures", start: { ...PIECES, badPercent: "0", wantedPercent: "100" } },
+];
+
+/** Test pieces first, in every state. */
+export function TestPieceShelf() {
+  return (
+    <Section title="A test piece first">
+      <div className="cols">
+        {PIECE_PANELS.map(({ title, start }) => (
+          <div key={title} className="stack">
+            <p className="small quiet">{title}</p>
+            <TestPieces start={start} currency="USD" rests="Figures of the gallery." />
+          </div>
+        ))}
+      </div>
+    </Section>
+  );
+}
 
 /** Is the check worth it, in every state. */
 export function WorthShelf() {
