@@ -38,6 +38,13 @@ export const PLACES = [
     roles: ["plater", "trainee", "senior", "owner"],
   },
   {
+    slug: "practice",
+    title: "Practice",
+    href: "/practice",
+    glyph: "station-inspect",
+    roles: ["plater", "trainee", "senior"],
+  },
+  {
     slug: "metals",
     title: "Part check",
     href: "/metals/check",

@@ -1,6 +1,6 @@
-import { asc, eq } from "drizzle-orm";
+import { and, asc, eq } from "drizzle-orm";
 import type { Handle } from "../open";
-import { libraryClasses } from "../schema";
+import { libraryCauses, libraryClasses } from "../schema";
 
 /** The shop's classes as practice needs them: names and what tells them apart, in shelf order. */
 export function listTellableClasses(db: Handle, shopId: number) {
@@ -18,3 +18,14 @@ export function listTellableClasses(db: Handle, shopId: number) {
 }
 
 export type TellableClass = ReturnType<typeof listTellableClasses>[number];
+
+/** A cause in words: what it is and why it does that. */
+export function getCauseWords(db: Handle, shopId: number, causeId: number) {
+  return (
+    db
+      .select({ title: libraryCauses.title, why: libraryCauses.why })
+      .from(libraryCauses)
+      .where(and(eq(libraryCauses.shopId, shopId), eq(libraryCauses.id, causeId)))
+      .get() ?? null
+  );
+}

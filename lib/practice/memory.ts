@@ -1,4 +1,4 @@
-import { createEmptyCard, fsrs, Rating, type FSRSParameters, type Grade } from "ts-fsrs";
+import { createEmptyCard, fsrs, Rating, type CardInput, type FSRSParameters, type Grade } from "ts-fsrs";
 import type { Sureness } from "@/lib/cases/case-words";
 
 /** What the scheduler keeps of one photo for one person: its own fields, with the moment as UTC milliseconds. */
@@ -50,9 +50,13 @@ export function remember(
   at: number,
   settings: Partial<FSRSParameters> = MEMORY_SETTINGS,
 ): { memory: PhotoMemory; dueAt: number } {
-  const { lastReviewAt, ...kept } = memory ?? { ...createEmptyCard(at), lastReviewAt: null };
-  const before = { ...kept, due: at, last_review: lastReviewAt };
-  const { card } = fsrs(settings).next(before, at, gradeOf(call));
+  const { card } = fsrs(settings).next(cardOf(memory, at), at, gradeOf(call));
   const { due, last_review, ...after } = card;
   return { memory: { ...after, lastReviewAt: last_review?.getTime() ?? null }, dueAt: due.getTime() };
+}
+
+function cardOf(memory: PhotoMemory | null, at: number): CardInput {
+  if (!memory) return createEmptyCard(at);
+  const { lastReviewAt, ...kept } = memory;
+  return { ...kept, due: at, last_review: lastReviewAt };
 }
