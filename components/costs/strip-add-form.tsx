@@ -92,7 +92,7 @@ function TakesOff({ metals, state }: { metals: StripAddFormProps["metals"]; stat
   const sent = state && !state.ok ? [state.values.takesOff ?? []].flat() : [];
   const error = fieldFault(state, "takesOff");
   return (
-    <fieldset className="strip-takes" aria-invalid={error ? true : undefined}>
+    <fieldset className="strip-takes">
       <legend>Takes off</legend>
       <div className="strip-takes__metals">
         {metals.map(({ symbol, name }) => (
@@ -102,6 +102,7 @@ function TakesOff({ metals, state }: { metals: StripAddFormProps["metals"]; stat
             name="takesOff[]"
             value={symbol}
             defaultChecked={sent.includes(symbol)}
+            aria-invalid={error ? true : undefined}
           />
         ))}
       </div>

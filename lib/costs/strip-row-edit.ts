@@ -21,6 +21,7 @@ export function editedBath(before: DissolvingRow, figures: BathFigures): Dissolv
   const isHoldingSame = holdingGPerL === before.holdingGPerL;
   const safeBecause = Object.fromEntries(safe.flatMap(({ metal, reason }) => (reason ? [[metal, reason]] : [])));
   const kept = new Set([...shippedCautions(before.id), ...cautions]);
+  const added = CAUTION_KEYS.filter((key) => kept.has(key) && !before.cautions.includes(key));
   return {
     ...before,
     ...given,
@@ -29,7 +30,7 @@ export function editedBath(before: DissolvingRow, figures: BathFigures): Dissolv
     holdingSource: isHoldingSame ? before.holdingSource : given.rateSource,
     safeOn: safe.map(({ metal }) => metal),
     safeBecause,
-    cautions: CAUTION_KEYS.filter((key) => kept.has(key)),
+    cautions: [...before.cautions.filter((key) => kept.has(key)), ...added],
   };
 }
 

@@ -9,7 +9,7 @@ export const NAMED_BASE_METALS = BASE_METALS.filter((metal): metal is NamedBaseM
 export const STANDINGS = ["unknown", "safe", "attacks"] as const;
 export type Standing = (typeof STANDINGS)[number];
 export const STANDING_TITLES: Record<Standing, string> = {
-  unknown: "Nobody vouches for it",
+  unknown: "Nobody vouches",
   safe: "Safe",
   attacks: "Goes on into it",
 };

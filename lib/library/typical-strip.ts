@@ -3,6 +3,7 @@ import type { ReworkEstimate } from "@/lib/costs/estimate-plan";
 import type { ShopRates } from "@/lib/costs/rates";
 import { compareAtStrike, type StrikeComparison } from "@/lib/costs/strip-estimate";
 import type { StripMethod } from "@/lib/costs/strip-methods";
+import { SHIPPED_STRIP_TABLE, type StripTable } from "@/lib/costs/strip-plan";
 import { strikeThenPlate } from "@/lib/costs/case-stack";
 import type { LibraryCause } from "@/lib/library/library-entry";
 import type { Layer } from "@/lib/plating/deposit-stack";
@@ -80,8 +81,13 @@ export function typicalBaseMetals(causes: readonly Pick<LibraryCause, "baseMetal
 /**
  * What putting one part of 1 dm² right typically costs: at the strike, and after each usual final plate. Null when nothing
  * can be reckoned: no base metal, or no price for any of the plates.
+ * @param table the shop's own ways to strip; left out: those that ship
  */
-export function typicalStrip(baseMetals: readonly BaseMetal[], rates: ShopRates): TypicalStrip | null {
+export function typicalStrip(
+  baseMetals: readonly BaseMetal[],
+  rates: ShopRates,
+  table: StripTable = SHIPPED_STRIP_TABLE,
+): TypicalStrip | null {
   const unpriced = new Set<string>();
   const rows: TypicalStripRow[] = [];
   const estimates: ReworkEstimate[] = [];
@@ -92,7 +98,7 @@ export function typicalStrip(baseMetals: readonly BaseMetal[], rates: ShopRates)
     for (const { metal } of missing) unpriced.add(nameOf(metal));
     if (missing.length > 0) continue;
     for (const baseMetal of baseMetals) {
-      const compared = compareOne(baseMetal, stack, rates);
+      const compared = compareOne(baseMetal, stack, rates, table);
       atStrike ??= costOf(compared.atStrike);
       estimates.push(compared.atStrike, compared.later);
       addRow(rows, plate.words, baseMetal, compared.later);
@@ -109,7 +115,12 @@ export function typicalStrip(baseMetals: readonly BaseMetal[], rates: ShopRates)
   };
 }
 
-function compareOne(baseMetal: BaseMetal, stack: readonly Layer[], rates: ShopRates): StrikeComparison {
+function compareOne(
+  baseMetal: BaseMetal,
+  stack: readonly Layer[],
+  rates: ShopRates,
+  table: StripTable,
+): StrikeComparison {
   return compareAtStrike({
     quantity: 1,
     areaDm2: TYPICAL_AREA_DM2,
@@ -117,6 +128,7 @@ function compareOne(baseMetal: BaseMetal, stack: readonly Layer[], rates: ShopRa
     stack,
     stageFound: "after-final-plate",
     rates,
+    table,
   });
 }
 

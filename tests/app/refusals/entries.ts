@@ -5,6 +5,7 @@ import * as caseActions from "@/app/(shop)/cases/actions";
 import * as jobActions from "@/app/(shop)/cases/jobs/actions";
 import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
 import * as costActions from "@/app/(shop)/costs/actions";
+import * as wayActions from "@/app/(shop)/costs/strip/ways/actions";
 import * as crew from "@/app/(shop)/crew/actions";
 import * as callsRoute from "@/app/api/cases/[ref]/calls/route";
 import * as confirmationRoute from "@/app/api/cases/[ref]/confirmation/route";
@@ -22,12 +23,14 @@ import * as libraryRoute from "@/app/api/library/route";
 import * as partCheckRoute from "@/app/api/part-check/route";
 import * as photoSizeRoute from "@/app/api/photos/[id]/[size]/route";
 import * as photoRoute from "@/app/api/photos/[id]/route";
+import { getStripRow } from "@/db/queries/strip-table";
 import { priceFieldName } from "@/lib/costs/rate-fields";
 import type { ActState } from "@/lib/act-state";
 import type { FaultCode } from "@/lib/fault";
 import type { Permission } from "@/lib/permissions";
 import { TEST_PASSWORD } from "@/tests/fixtures/crew-factory";
 import { makeConfirmation, makeSnap } from "@/tests/fixtures/shop-factory";
+import { bathForm, newBathForm, polishForm } from "@/tests/fixtures/strip-form";
 import {
   closedCase,
   closedJob,
@@ -56,6 +59,13 @@ export interface Entry {
   prepare: (aim: Aim) => () => Promise<Ending>;
 }
 
+/** Sends a form that is made already, as the browser would. */
+async function endingOf(action: unknown, data: FormData): Promise<Ending> {
+  const state = await (action as Action)(null, data);
+  if (!state) throw new Error("The action gave nothing back.");
+  return state.ok ? "ok" : state.fault.code;
+}
+
 type Action = (previous: ActState<never>, form: FormData) => Promise<ActState<unknown>>;
 type Route = (request: NextRequest, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
 
@@ -69,11 +79,7 @@ function form(values: Record<string, unknown>): FormData {
   return data;
 }
 
-async function ending(action: unknown, values: Record<string, unknown>): Promise<Ending> {
-  const state = await (action as Action)(null, form(values));
-  if (!state) throw new Error("The action gave nothing back.");
-  return state.ok ? "ok" : state.fault.code;
-}
+const ending = (action: unknown, values: Record<string, unknown>) => endingOf(action, form(values));
 
 async function answered(
   route: unknown,
@@ -99,7 +105,15 @@ async function answered(
 const CASES = "app/(shop)/cases/actions.ts";
 const JOBS = "app/(shop)/cases/jobs/actions.ts";
 const CREW = "app/(shop)/crew/actions.ts";
+const WAYS = "app/(shop)/costs/strip/ways/actions.ts";
 const ACCOUNT = "app/(shop)/account/actions.ts";
+
+/** A way to strip as the aim's shop has it. */
+function wayOf(aim: Aim, slug: string) {
+  const way = getStripRow(aim.db, aim.shop.shopId, slug);
+  if (!way) throw new Error(`The shop has no way ${slug}.`);
+  return way;
+}
 
 /** Flattens a confirmation into what a form sends: the steps are one JSON field. */
 const confirmationForm = (aim: Aim, ref: string) => {
@@ -353,6 +367,42 @@ export const ENTRIES: readonly Entry[] = [
         [priceFieldName("Au")]: "130",
         [priceFieldName("Cu")]: "10",
       }),
+  },
+  {
+    name: `${WAYS} changeBath`,
+    permission: "strips.set",
+    aims: "row",
+    prepare: (aim) => {
+      const { id, row } = wayOf(aim, "zinc-hydrochloric");
+      if (row.method === "polish-back") throw new Error("That is no bath.");
+      const data = bathForm(id, row, { price: "7" });
+      return () => endingOf(wayActions.changeBath, data);
+    },
+  },
+  {
+    name: `${WAYS} changePolishing`,
+    permission: "strips.set",
+    aims: "row",
+    prepare: (aim) => {
+      const { id, row } = wayOf(aim, "polish-back");
+      const data = polishForm(id, row, { source: "clocked here" });
+      return () => endingOf(wayActions.changePolishing, data);
+    },
+  },
+  {
+    name: `${WAYS} turnWay`,
+    permission: "strips.set",
+    aims: "row",
+    prepare: (aim) => {
+      const { id, row } = wayOf(aim, "zinc-hydrochloric");
+      return () => ending(wayActions.turnWay, { slug: row.id, startedFrom: id, retired: "true" });
+    },
+  },
+  {
+    name: `${WAYS} addBath`,
+    permission: "strips.set",
+    aims: "shop",
+    prepare: () => () => endingOf(wayActions.addBath, newBathForm()),
   },
   {
     name: "app/api/library/route.ts GET",

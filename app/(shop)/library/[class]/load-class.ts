@@ -8,6 +8,7 @@ import { getLibraryClass, type ClassPage } from "@/db/queries/library-class";
 import { listStations } from "@/db/queries/line";
 import { getRatesAt } from "@/db/queries/rates";
 import { listExemplars } from "@/db/queries/second-look-against";
+import { getStripTableAt } from "@/db/queries/strip-table";
 import type { StationKind } from "@/lib/cases/case-words";
 import { standingOf } from "@/lib/library/shelf-words";
 import { byLikelihood, shareHere } from "@/lib/library/shop-share";
@@ -41,7 +42,7 @@ export function loadClass(db: Db, shopId: number, slug: string, stationKind: Sta
     fixes: fixViews(page, shown),
     sources: citeSources(usedKeys(page), page.sources),
     rates,
-    strip: typicalStrip(typicalBaseMetals(page.causes), rates),
+    strip: typicalStrip(typicalBaseMetals(page.causes), rates, getStripTableAt(db, shopId, now)),
   };
 }
 

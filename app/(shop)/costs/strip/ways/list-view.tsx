@@ -38,7 +38,7 @@ export function ListView({ member }: { member: SignedIn }) {
       </p>
       <div className="rates-head">
         <Lead main={main}>
-          {counted(offered.length, "way")} to take a deposit off. The rates of {memory} rest on memory.
+          {counted(offered.length, "way")} to take a deposit off. {memoryWords(memory, offered.length)}
         </Lead>
         <Rests>
           Every estimate is made from these. A bath is offered only on base metals that somebody vouches for. What you
@@ -47,7 +47,7 @@ export function ListView({ member }: { member: SignedIn }) {
       </div>
       <div className="strip-ways">
         {groups(offered).map(({ title, rows, also }) => (
-          <Section key={title} title={title} aside={counted(rows.length, "way")}>
+          <Section key={title} title={title} aside={rows.length > 0 ? counted(rows.length, "way") : undefined}>
             {rows.map((row) => (
               <StripWay key={row.id} way={wayView(row, mostOf(rows), currency)} />
             ))}
@@ -77,6 +77,12 @@ export function ListView({ member }: { member: SignedIn }) {
       </Section>
     </ShopShell>
   );
+}
+
+function memoryWords(memory: number, all: number): string {
+  if (memory === 0) return "No rate rests on memory.";
+  if (memory === all) return "All their rates rest on memory.";
+  return memory === 1 ? "One rate rests on memory." : `${memory} of the rates rest on memory.`;
 }
 
 /** The newest row of each way, in the order in which baths are preferred. */
