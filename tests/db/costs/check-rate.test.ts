@@ -26,14 +26,20 @@ beforeEach(async () => {
 });
 
 let codes = 0;
-function makeRun(partsStruck: number, { struckAt = TEST_NOW - 60_000, on = shop, jobId = on.jobId } = {}): number {
+interface RunFacts {
+  struckAt?: number;
+  on?: TestShop;
+  jobId?: number;
+}
+
+function makeRun(partsStruck: number, { struckAt = TEST_NOW - 60_000, on = shop, jobId }: RunFacts = {}): number {
   codes += 1;
   return db
     .insert(runs)
     .values({
       shopId: on.shopId,
       code: `R-${codes}`,
-      workOrderId: jobId,
+      workOrderId: jobId ?? on.jobId,
       method: "bath",
       memberId: on.members.plater.memberId,
       partsStruck,
