@@ -48,7 +48,6 @@ export function requireWhole(field: string, value: number, low: number, high: nu
 
 /** One of a closed list of words. Throws `InputError` that names the field and the words. */
 export function requireOneOf<Word extends string>(field: string, value: string, words: readonly Word[]): Word {
-  const found = words.find((word) => word === value);
-  if (found === undefined) throw new InputError(field, `Use one of: ${words.join(", ")}.`);
-  return found;
+  for (const word of words) if (word === value) return word;
+  throw new InputError(field, `Use one of: ${words.join(", ")}.`);
 }

@@ -4,5 +4,6 @@
  * all its cases priced again, at the rates and with the table of their day; recorded minutes stay.
  *
  * 1: ways to strip from the shop's own table, minutes corrected by the shop's own record.
+ * 2: at the strike too the cheapest safe way, where that is not polishing back.
  */
-export const COST_MODEL = 1;
+export const COST_MODEL = 2;

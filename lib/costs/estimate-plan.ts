@@ -1,13 +1,12 @@
-import { intervalOf, pertMean, type ThreePoint } from "@/lib/costs/pert";
-import type { CheckedRework } from "@/lib/costs/rework-input";
-import { tallyTerms, type AllowedPlan, type NamedRange, type Tally } from "@/lib/costs/rework-tally";
-import { COST_LINE_KEYS, COST_LINES, lostShare, type CostLine } from "@/lib/costs/rework-terms";
+import { intervalOf, type ThreePoint } from "@/lib/costs/pert";
+import { emptyFigures, FIGURE_AT, meanByList, multiplyOut, type PriceList } from "@/lib/costs/price-list";
+import { batchSizes, type CheckedRework } from "@/lib/costs/rework-input";
+import { COST_LINE_KEYS, COST_LINES, type CostLine } from "@/lib/costs/rework-terms";
 import type { StripMethod } from "@/lib/costs/strip-methods";
 import { cautionsFor, sourcesFor, type StripStep } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
 import { splitCents } from "@/lib/money";
 import type { Layer } from "@/lib/plating/deposit-stack";
-import { layerMassG } from "@/lib/plating/faraday";
 import { metalOf } from "@/lib/plating/metals";
 
 /** A three-point figure with its PERT mean. */
@@ -41,90 +40,131 @@ export interface ReworkEstimate {
 export const NO_PART_VALUE = "No part value given: scrap risk is left out.";
 
 /** The figures of one way, without the words: what is compared, summed and stored. */
-export type ReworkFigures = Omit<
-  ReworkEstimate,
-  "widest" | "spread" | "steps" | "cautions" | "sources" | "assumed"
-> & {
-  /** Least and most cents of each uncertain thing. */
-  ranges: NamedRange[];
-};
+export type ReworkFigures = Omit<ReworkEstimate, "widest" | "spread" | "steps" | "cautions" | "sources" | "assumed">;
 
-/** Works a plan out: every uncertain thing is a term; means add by line, variances add over all. */
-export function planFigures(facts: CheckedRework, plan: AllowedPlan): ReworkFigures {
-  const tally = tallyTerms(facts, plan);
-  addThicknessRanges(tally, facts, plan);
-  const exactByLine = COST_LINE_KEYS.map((key) => tally.meanByLine[key]);
-  const exact = sumOf(exactByLine);
-  if (!(exact < Number.MAX_SAFE_INTEGER)) {
-    throw new InputError("quantity", "This comes to more money than can be counted.");
+/** Filled anew for each batch; what is worked out is copied out of it before anything else can run. */
+const SUMS = emptyFigures();
+
+/**
+ * Multiplies a price list out for a batch: means add by line, variances add over all. Money is rounded to cents once,
+ * here. Throws `InputError` when it comes to more money than can be counted.
+ */
+export function figuresByList(facts: CheckedRework, list: PriceList): ReworkFigures {
+  const sums = multiplyOut(list, facts.sizes, SUMS);
+  const exact = COST_LINE_KEYS.map((_, line) => sums[line] ?? 0);
+  let exactCents = 0;
+  for (const cents of exact) exactCents += cents;
+  if (!(exactCents < Number.MAX_SAFE_INTEGER)) {
+    throw new InputError("quantity", "This comes to more money than can be counted. Give fewer parts.");
   }
-  const least = sumOf(tally.ranges.map((range) => range.low));
-  const most = sumOf(tally.ranges.map((range) => range.high));
-  const interval = intervalOf(exact, varianceOf(tally.ranges), Math.max(0, least), most);
-  const lineCents = splitCents(exactByLine);
-  const meanCents = sumOf(lineCents);
+  const { low90Cents, high90Cents } = rangeByList(facts, list, exactCents, sums);
+  const lineCents = splitCents(exact);
   return {
-    method: plan.method,
-    meanCents,
-    low90Cents: Math.min(meanCents, Math.round(interval.low90)),
-    high90Cents: Math.max(meanCents, Math.round(interval.high90)),
-    lines: COST_LINE_KEYS.map((key, index) => ({ key, name: COST_LINES[key], meanCents: lineCents[index] ?? 0 })),
-    minutes: withMean(tally.handsOn),
-    tankMinutes: withMean(tally.tank),
-    metalWrittenOffG: writtenOffG(facts, plan),
-    ranges: tally.ranges,
+    method: list.way.method,
+    meanCents: Math.round(exactCents),
+    low90Cents,
+    high90Cents,
+    lines: COST_LINE_KEYS.map((key, line) => ({ key, name: COST_LINES[key], meanCents: lineCents[line] ?? 0 })),
+    minutes: minutesAt(sums, FIGURE_AT.handsOnLow),
+    tankMinutes: minutesAt(sums, FIGURE_AT.tankLow),
+    metalWrittenOffG: sums[FIGURE_AT.metalLostG] ?? 0,
   };
 }
 
-/** Puts the words to the figures: what widens the range, cautions, sources, what was assumed. */
-export function describeEstimate(facts: CheckedRework, plan: AllowedPlan, figures: ReworkFigures): ReworkEstimate {
-  const { ranges, ...rest } = figures;
-  const spread = spreadOf(ranges);
+/** The 90 % range around the mean, whole cents: the variances of what is independent add, and so do the ends. */
+function rangeByList(facts: CheckedRework, list: PriceList, exactCents: number, sums: Float64Array) {
+  const spread = thicknessRanges(facts, list);
+  let variance = varianceByList(list, facts.sizes);
+  let least = sums[FIGURE_AT.leastCents] ?? 0;
+  let most = sums[FIGURE_AT.mostCents] ?? 0;
+  for (const { low, high } of spread) {
+    variance += ((high - low) / 6) ** 2;
+    least += low;
+    most += high;
+  }
+  const { low90, high90 } = intervalOf(exactCents, variance, Math.max(0, least), most);
+  const meanCents = Math.round(exactCents);
+  return { low90Cents: Math.min(meanCents, Math.round(low90)), high90Cents: Math.max(meanCents, Math.round(high90)) };
+}
+
+function varianceByList({ spreads }: PriceList, sizes: readonly number[]): number {
+  let variance = 0;
+  let width = 0;
+  for (const { size, withNext, lowCents, highCents } of spreads) {
+    width += (highCents - lowCents) * (sizes[size] ?? 0);
+    if (withNext) continue;
+    variance += (width / 6) ** 2;
+    width = 0;
+  }
+  return variance;
+}
+
+/** Figures and words of a way: what widens the range, cautions, sources, what was assumed. */
+export function describeByList(facts: CheckedRework, list: PriceList, steps: readonly StripStep[]): ReworkEstimate {
+  const spread = sharesOf([...namedRanges(list, facts.sizes), ...thicknessRanges(facts, list)]);
   return {
-    ...rest,
+    ...figuresByList(facts, list),
     widest: spread.filter(({ share }) => share >= LEAST_NAMED_SHARE).map(({ name }) => name),
     spread,
-    steps: plan.steps,
-    cautions: cautionsFor(plan.steps, facts.baseMetal, facts.stageFound),
-    sources: [...sourcesFor(plan.steps), facts.times.source],
+    steps,
+    cautions: cautionsFor(steps, facts.baseMetal, facts.stageFound),
+    sources: [...sourcesFor(steps), facts.times.source],
     assumed: facts.partValueStated ? [] : [NO_PART_VALUE],
   };
 }
 
-function addThicknessRanges(tally: Tally, facts: CheckedRework, plan: AllowedPlan): void {
-  for (const [index, layer] of facts.onPart.entries()) {
-    const range = thicknessRange(facts, plan, index, layer);
-    if (range) tally.ranges.push(range);
-  }
+/** One uncertain thing and the cents that it may cost at least and at most. */
+interface NamedRange {
+  name: string;
+  low: number;
+  high: number;
 }
+
+/** Each uncertain thing of a batch; things that move together are one. */
+function namedRanges({ spreads }: PriceList, sizes: readonly number[]): NamedRange[] {
+  const ranges: NamedRange[] = [];
+  let low = 0;
+  let high = 0;
+  for (const { name, size, withNext, lowCents, highCents } of spreads) {
+    low += lowCents * (sizes[size] ?? 0);
+    high += highCents * (sizes[size] ?? 0);
+    if (withNext) continue;
+    ranges.push({ name, low, high });
+    low = 0;
+    high = 0;
+  }
+  return ranges;
+}
+
+const SURE: readonly NamedRange[] = [];
 
 /**
  * How far the cost moves when one layer is as thin or as thick as it may be, around its mean. Cost is linear in thickness,
  * so the two ends say it all. The range is around 0: the mean is already counted.
  */
-function thicknessRange(facts: CheckedRework, plan: AllowedPlan, index: number, layer: Layer): NamedRange | undefined {
-  const { thicknessLowUm: low, thicknessHighUm: high } = layer;
-  if (low === undefined || high === undefined || low === high) return undefined;
-  const costAt = (thicknessUm: number) => {
-    const steps = plan.steps.map((step) =>
-      step.layer === layer ? { ...step, layer: { ...layer, thicknessUm } } : step,
-    );
-    const { meanByLine } = tallyTerms(facts, { ...plan, steps });
-    return COST_LINE_KEYS.reduce((sum, key) => sum + meanByLine[key], 0);
-  };
-  const middle = costAt(layer.thicknessUm);
-  return {
-    name: `Thickness of the ${metalOf(layer.metal).name}, layer ${index + 1}`,
-    low: costAt(low) - middle,
-    high: costAt(high) - middle,
-  };
+function thicknessRanges(facts: CheckedRework, list: PriceList): readonly NamedRange[] {
+  if (facts.onPart.every(isSure)) return SURE;
+  return facts.onPart.flatMap((layer, index): NamedRange[] => {
+    if (layer.thicknessLowUm === undefined || layer.thicknessHighUm === undefined || isSure(layer)) return [];
+    const costAt = (thicknessUm: number) => {
+      const onPart = facts.onPart.with(index, { ...layer, thicknessUm });
+      return meanByList(list, batchSizes({ ...facts, onPart }));
+    };
+    const middle = costAt(layer.thicknessUm);
+    const name = `Thickness of the ${metalOf(layer.metal).name}, layer ${index + 1}`;
+    return [{ name, low: costAt(layer.thicknessLowUm) - middle, high: costAt(layer.thicknessHighUm) - middle }];
+  });
+}
+
+function isSure({ thicknessLowUm, thicknessHighUm }: Layer): boolean {
+  return thicknessLowUm === thicknessHighUm;
 }
 
 /** Below a twentieth of the spread a contributor is not worth a name. */
 const LEAST_NAMED_SHARE = 0.05;
 
-function spreadOf(ranges: readonly NamedRange[]): { name: string; share: number }[] {
-  const variance = varianceOf(ranges);
+function sharesOf(ranges: readonly NamedRange[]): { name: string; share: number }[] {
+  const variance = ranges.reduce((sum, { low, high }) => sum + ((high - low) / 6) ** 2, 0);
   if (!(variance > 0)) return [];
   return ranges
     .map(({ name, low, high }) => ({ name, share: ((high - low) / 6) ** 2 / variance }))
@@ -132,22 +172,10 @@ function spreadOf(ranges: readonly NamedRange[]): { name: string; share: number 
     .sort((a, b) => b.share - a.share);
 }
 
-function writtenOffG({ quantity, areaDm2, rates }: CheckedRework, plan: AllowedPlan): number {
-  return plan.steps.reduce(
-    (sum, step) => sum + layerMassG(step.layer, quantity * areaDm2, step.layer.thicknessUm) * lostShare(step, rates),
-    0,
-  );
-}
-
-function varianceOf(ranges: readonly NamedRange[]): number {
-  return ranges.reduce((sum, range) => sum + ((range.high - range.low) / 6) ** 2, 0);
-}
-
-function sumOf(amounts: readonly number[]): number {
-  return amounts.reduce((sum, amount) => sum + amount, 0);
-}
-
-function withMean(minutes: ThreePoint): Minutes {
-  const { low, likely, high } = minutes;
-  return { low, likely, high, mean: pertMean(minutes) };
+/** Low, likely and high stand one behind the other. */
+function minutesAt(sums: Float64Array, at: number): Minutes {
+  const low = sums[at] ?? 0;
+  const likely = sums[at + 1] ?? 0;
+  const high = sums[at + 2] ?? 0;
+  return { low, likely, high, mean: (low + 4 * likely + high) / 6 };
 }

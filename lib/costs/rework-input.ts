@@ -1,4 +1,5 @@
 import { BASE_METALS, LIMITS, STAGES_FOUND, type BaseMetal, type StageFound } from "@/lib/cases/case-words";
+import { sizesOf } from "@/lib/costs/price-list";
 import { metalPrice, HIGHEST_RATE_CENTS, type ShopRates } from "@/lib/costs/rates";
 import type { MinutesCorrections } from "@/lib/costs/estimate-record";
 import { MOST_CORRECTION } from "@/lib/costs/correction";
@@ -7,6 +8,8 @@ import { STRIP_METHODS, type StripMethod } from "@/lib/costs/strip-methods";
 import { SHIPPED_STRIP_TABLE, type StripTable } from "@/lib/costs/strip-plan";
 import { requireBetween, requireOneOf, requirePositive, requireWhole } from "@/lib/input-error";
 import { checkStack, strikeOf, type Layer } from "@/lib/plating/deposit-stack";
+import type { DepositMetal } from "@/lib/plating/metals";
+import { usualPlateMinutes } from "@/lib/plating/plate-practice";
 
 /** What a rework estimate needs to know about a batch of like parts. */
 export interface ReworkInput {
@@ -17,7 +20,7 @@ export interface ReworkInput {
   /** The whole deposit as it is or would have become, from the base metal out. */
   stack: readonly Layer[];
   stageFound: StageFound;
-  /** Left out: the cheapest one that does not attack the base metal; at the strike, polishing back. */
+  /** Left out: the cheapest one that does not attack the base metal. */
   method?: StripMethod;
   /** Of one part, before plating. Left out: scrap risk is not reckoned, and the estimate says so. */
   partValueCents?: number;
@@ -38,6 +41,8 @@ export const REWORK_LIMITS = {
 export interface CheckedRework extends Required<Omit<ReworkInput, "method" | "stack">> {
   method: StripMethod | undefined;
   onPart: readonly Layer[];
+  /** What a price list is multiplied with. */
+  sizes: readonly number[];
   partValueStated: boolean;
 }
 
@@ -50,20 +55,37 @@ export function checkReworkInput(input: ReworkInput): CheckedRework {
   if (input.method !== undefined) requireOneOf("method", input.method, STRIP_METHODS);
   checkStack(input.stack);
   checkMoney(input);
+  const onPart = (input.stageFound === "at-strike" ? strikeOf(input.stack) : input.stack).map(meanLayer);
+  const times = input.times ?? USUAL_REWORK_TIMES;
+  const partValueCents = input.partValueCents ?? 0;
+  const { quantity, areaDm2 } = input;
   return {
-    quantity: input.quantity,
-    areaDm2: input.areaDm2,
+    quantity,
+    areaDm2,
     baseMetal: input.baseMetal,
     stageFound: input.stageFound,
     method: input.method,
-    onPart: (input.stageFound === "at-strike" ? strikeOf(input.stack) : input.stack).map(meanLayer),
-    partValueCents: input.partValueCents ?? 0,
+    onPart,
+    sizes: batchSizes({ quantity, areaDm2, onPart, times, partValueCents }),
+    partValueCents,
     partValueStated: input.partValueCents !== undefined,
     rates: input.rates,
     minutesCorrection: input.minutesCorrection ?? 1,
-    times: input.times ?? USUAL_REWORK_TIMES,
+    times,
     table: input.table ?? SHIPPED_STRIP_TABLE,
   };
+}
+
+/** The sizes of a batch: parts, area, plating minutes, value, and each layer's area times its thickness. */
+export function batchSizes(
+  batch: Pick<CheckedRework, "quantity" | "areaDm2" | "onPart" | "times" | "partValueCents">,
+): number[] {
+  const { quantity, onPart: layers, times } = batch;
+  const batchAreaDm2 = quantity * batch.areaDm2;
+  let minutes = 0;
+  for (const layer of layers) minutes += usualPlateMinutes(layer);
+  const platingMinutes = (minutes * batchAreaDm2) / times.loadDm2;
+  return sizesOf({ quantity, batchAreaDm2, platingMinutes, valueCents: quantity * batch.partValueCents, layers });
 }
 
 function checkMoney({ partValueCents, minutesCorrection, rates, stack }: ReworkInput): void {
@@ -76,10 +98,16 @@ function checkMoney({ partValueCents, minutesCorrection, rates, stack }: ReworkI
   requireBetween("solutionCentsPerL", rates.solutionCentsPerL, 0, HIGHEST_RATE_CENTS);
   requireBetween("wasteCentsPerL", rates.wasteCentsPerL, 0, HIGHEST_RATE_CENTS);
   requireBetween("abrasiveCentsPerMinute", rates.abrasiveCentsPerMinute, 0, HIGHEST_RATE_CENTS);
-  for (const { metal } of stack) {
-    requireBetween(`metalCentsPerG.${metal}`, metalPrice(rates, metal), 0, HIGHEST_RATE_CENTS);
-    requireBetween(`recoveryShare.${metal}`, rates.recoveryShare[metal] ?? 0, 0, 1);
-  }
+  for (const { metal } of stack) checkMetalMoney(rates, metal);
+}
+
+/** The field's name is put together only for a refusal: this runs for every case that is priced. */
+function checkMetalMoney(rates: ShopRates, metal: DepositMetal): void {
+  const price = metalPrice(rates, metal);
+  if (!(price >= 0 && price <= HIGHEST_RATE_CENTS))
+    requireBetween(`metalCentsPerG.${metal}`, price, 0, HIGHEST_RATE_CENTS);
+  const share = rates.recoveryShare[metal] ?? 0;
+  if (!(share >= 0 && share <= 1)) requireBetween(`recoveryShare.${metal}`, share, 0, 1);
 }
 
 function checkCorrection(ratio: number): void {

@@ -35,7 +35,7 @@ export function stripAnswerFor(input: StripInput, shop: StripShop): StripAnswer 
   const stageFound = input.stageFound.word;
   const all = compareMethods({ ...facts, stageFound });
   const options = input.method ? all.filter((option) => option.method === input.method?.word) : all;
-  const atStrike = estimateRework({ ...facts, stageFound: "at-strike", method: "polish-back" });
+  const atStrike = estimateRework({ ...facts, stageFound: "at-strike" });
   const estimates = [...options.flatMap((option) => (option.allowed ? [option.estimate] : [])), atStrike];
   return {
     given: givenIn(input),

@@ -1,6 +1,7 @@
-import { describeEstimate, planFigures, type ReworkEstimate, type ReworkFigures } from "@/lib/costs/estimate-plan";
+import { allowedWays } from "@/lib/costs/allowed-ways";
+import { describeByList, figuresByList, type ReworkEstimate, type ReworkFigures } from "@/lib/costs/estimate-plan";
+import { meanByList, priceLists, type PriceList } from "@/lib/costs/price-list";
 import { checkReworkInput, type CheckedRework, type ReworkInput } from "@/lib/costs/rework-input";
-import type { AllowedPlan } from "@/lib/costs/rework-tally";
 import { STRIP_METHODS, type DissolvingRow, type StripMethod } from "@/lib/costs/strip-methods";
 import { planStrip, type StripPlan } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
@@ -14,18 +15,21 @@ export type MethodOption =
 /**
  * What it costs to put a batch right at the stage at which the fault was found: labour, line time, metal written off and
  * put on again, chemistry, waste and scrap risk (the design's section 2), as mean with a 90 % range. Without a method it
- * takes polishing at the strike, later the cheapest that does not attack the base metal.
+ * takes the cheapest that does not attack the base metal; at the strike that is nearly always polishing.
  * Throws `InputError` naming the field; for a method that attacks the base metal, field `method` with the reason.
  */
 export function estimateRework(input: ReworkInput): ReworkEstimate {
   const facts = checkReworkInput(input);
-  const { plan, figures } = workOut(facts);
-  return describeEstimate(facts, plan, figures);
+  const list = chosenList(facts);
+  const plan = planFor(facts, list.way.method);
+  if (!plan.allowed) throw new InputError("method", plan.why);
+  return describeByList(facts, list, plan.steps);
 }
 
 /** The figures of `estimateRework` without its words, for many cases at once. Throws as it does. */
 export function reworkFigures(input: ReworkInput): ReworkFigures {
-  return workOut(checkReworkInput(input)).figures;
+  const facts = checkReworkInput(input);
+  return figuresByList(facts, chosenList(facts));
 }
 
 /** Every way to take it off, in the order polish back, chemical, electrolytic; refused ones with the reason and no figure. */
@@ -43,39 +47,36 @@ export interface StrikeComparison {
   savedCents: number;
 }
 
-/** Puts polishing back at the strike beside the ways to do it later. Throws `InputError` as `estimateRework`. */
+/** Puts seeing it at the strike beside the ways to do it later. Throws `InputError` as `estimateRework`. */
 export function compareAtStrike(input: ReworkInput): StrikeComparison {
   const stageFound = input.stageFound === "at-strike" ? "after-final-plate" : input.stageFound;
   const later = estimateRework({ ...input, stageFound });
   const options = compareMethods({ ...input, stageFound });
-  const atStrike = estimateRework({ ...input, stageFound: "at-strike", method: "polish-back" });
+  const atStrike = estimateRework({ ...input, stageFound: "at-strike", method: undefined });
   return { atStrike, later, options, savedCents: Math.max(0, later.meanCents - atStrike.meanCents) };
 }
 
-interface WorkedOut {
-  plan: AllowedPlan;
-  figures: ReworkFigures;
-}
-
-function workOut(facts: CheckedRework): WorkedOut {
-  const method = facts.method ?? (facts.stageFound === "at-strike" ? "polish-back" : undefined);
-  if (method === undefined) return workOutCheapest(facts);
-  const plan = planFor(facts, method);
-  if (!plan.allowed) throw new InputError("method", plan.why);
-  return { plan, figures: planFigures(facts, plan) };
-}
-
-function workOutCheapest(facts: CheckedRework): WorkedOut {
-  let best: WorkedOut | undefined;
-  for (const method of STRIP_METHODS) {
-    const plan = planFor(facts, method);
-    if (!plan.allowed) continue;
-    const figures = planFigures(facts, plan);
-    if (best === undefined || figures.meanCents < best.figures.meanCents) best = { plan, figures };
+/** The price list of the way that was given, or of the cheapest that is allowed; of two that cost the same the first. */
+function chosenList(facts: CheckedRework): PriceList {
+  let best: PriceList | undefined;
+  let bestCents = Infinity;
+  for (const list of listsOf(facts)) {
+    if (facts.method !== undefined && facts.method !== list.way.method) continue;
+    const cents = Math.round(meanByList(list, facts.sizes));
+    if (best !== undefined && cents >= bestCents) continue;
+    best = list;
+    bestCents = cents;
   }
-  // Polishing is always allowed, so this is a fault of the table, not of the input.
-  if (best === undefined) throw new InputError("method", "No way to take this deposit off is in the table.");
-  return best;
+  if (best !== undefined) return best;
+  const plan = facts.method === undefined ? undefined : planFor(facts, facts.method);
+  // Polishing is always allowed, so without a method this is a fault of the table, not of the input.
+  const why = plan?.allowed === false ? plan.why : "No way to take this deposit off is in the table.";
+  throw new InputError("method", why);
+}
+
+/** The price lists of every way that is allowed, in the usual order. */
+function listsOf(facts: CheckedRework): readonly PriceList[] {
+  return priceLists(allowedWays(facts.table, facts.baseMetal, facts.onPart), facts);
 }
 
 function planFor(facts: CheckedRework, method: StripMethod): StripPlan {
@@ -85,5 +86,7 @@ function planFor(facts: CheckedRework, method: StripMethod): StripPlan {
 function optionFor(facts: CheckedRework, method: StripMethod): MethodOption {
   const plan = planFor(facts, method);
   if (!plan.allowed) return plan;
-  return { method, allowed: true, estimate: describeEstimate(facts, plan, planFigures(facts, plan)) };
+  const list = listsOf(facts).find((each) => each.way.method === method);
+  if (!list) throw new InputError("method", "This way is planned, but not among those that are allowed.");
+  return { method, allowed: true, estimate: describeByList(facts, list, plan.steps) };
 }

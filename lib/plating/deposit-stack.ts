@@ -1,5 +1,5 @@
 import { InputError, requirePositive } from "@/lib/input-error";
-import { METALS, metalOf, requireValence, type DepositMetal } from "@/lib/plating/metals";
+import { DEPOSIT_METALS, metalOf, requireValence, type DepositMetal } from "@/lib/plating/metals";
 import { layerMassG } from "@/lib/plating/faraday";
 
 /** One layer of a deposit. A stack is listed from the base metal out: strike first, final plate last. */
@@ -21,6 +21,7 @@ export const USUAL_STRIKE_UM = 0.5;
 
 /** Finishes on which no shop lays copper, nickel or another undercoat: seen there, the list is upside down. */
 const FINISHES: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Au", "Ag", "Rh", "Pt", "Pd", "Cr"]);
+const KNOWN: ReadonlySet<string> = new Set(DEPOSIT_METALS);
 const UNDERCOATS: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Cu", "Ni", "Zn", "Fe", "Co"]);
 
 /** Throws `InputError("stack…")` when the stack is empty, has an impossible layer or lists its layers upside down. */
@@ -30,7 +31,9 @@ export function checkStack(stack: readonly Layer[]): void {
     throw new InputError("stack", `List at most ${STACK_LIMITS.layers} layers.`);
   }
   let finish: Layer | undefined;
-  for (const [index, layer] of stack.entries()) {
+  let index = -1;
+  for (const layer of stack) {
+    index += 1;
     checkLayer(layer, index);
     if (finish && UNDERCOATS.has(layer.metal)) {
       throw new InputError(
@@ -43,16 +46,17 @@ export function checkStack(stack: readonly Layer[]): void {
 }
 
 function checkLayer(layer: Layer, index: number): void {
-  const field = `stack.${index}`;
-  if (!Object.hasOwn(METALS, layer.metal)) throw new InputError(`${field}.metal`, "This metal is not in the table.");
-  requirePositive(`${field}.thicknessUm`, layer.thicknessUm, STACK_LIMITS.thicknessUm);
-  if (layer.valence !== undefined) requireValence(layer.metal, layer.valence, `${field}.valence`);
-  const { thicknessLowUm: low, thicknessHighUm: high } = layer;
+  const { thicknessUm, thicknessLowUm: low, thicknessHighUm: high } = layer;
+  if (!KNOWN.has(layer.metal)) throw new InputError(`stack.${index}.metal`, "This metal is not in the table.");
+  // The field's name is put together only for a refusal: this runs for every case that is priced.
+  if (!(thicknessUm > 0 && thicknessUm <= STACK_LIMITS.thicknessUm))
+    requirePositive(`stack.${index}.thicknessUm`, thicknessUm, STACK_LIMITS.thicknessUm);
+  if (layer.valence !== undefined) requireValence(layer.metal, layer.valence, `stack.${index}.valence`);
   if (low === undefined && high === undefined) return;
   if (low === undefined || high === undefined || !(low > 0 && low <= layer.thicknessUm && layer.thicknessUm <= high)) {
-    throw new InputError(`${field}.thicknessUm`, "A range runs from low over likely to high, all above 0.");
+    throw new InputError(`stack.${index}.thicknessUm`, "A range runs from low over likely to high, all above 0.");
   }
-  requirePositive(`${field}.thicknessHighUm`, high, STACK_LIMITS.thicknessUm);
+  requirePositive(`stack.${index}.thicknessHighUm`, high, STACK_LIMITS.thicknessUm);
 }
 
 /** A layer weighed, for all parts together. */
