@@ -58,7 +58,11 @@ export default async function MetalRoutePage({ params }: MetalRoutePageProps) {
           <Section title="Watch out" id="watch">
             <RouteWatchOuts watchOuts={route.watchOuts} />
           </Section>
-          <Section title="What goes wrong at the strike" id="wrong">
+          <Section
+            title="What goes wrong at the strike"
+            id="wrong"
+            rests="Common practice. Each class has its own checks."
+          >
             <RouteFaults faults={route.goesWrong} />
           </Section>
           {route.baseMetal === "steel" && (
