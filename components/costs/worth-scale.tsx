@@ -25,6 +25,9 @@ export function WorthScale({ breakEvenRate, rate, interval }: WorthScaleProps) {
       </p>
       <div className="worth-scale__track" style={even}>
         <i className="worth-scale__pays" />
+        {ticksOf(decades).map((tick) => (
+          <i key={tick} className="worth-scale__tick" style={{ "--x": at(tick) } as Place} />
+        ))}
         {rate !== undefined && (
           <>
             <i className="worth-scale__range" style={own} />

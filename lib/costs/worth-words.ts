@@ -35,7 +35,7 @@ export function worthWords(figures: WorthFigures): WorthWords {
   const answer = inspectAdvice({ checkCost: checkCents, missCost: missCents, inspected, bad });
   return {
     answer,
-    headline: HEADLINES[headlineKey(answer, inspected)],
+    headline: HEADLINES[headlineKey(answer, figures)],
     why: `${costWords(figures)} ${standingWords(answer, figures)}`,
     then: thenWords(answer, figures),
   };
@@ -45,13 +45,18 @@ const HEADLINES = {
   all: "Check every part.",
   none: "Do not check every part.",
   few: "Too few runs to say.",
+  near: "Too close to call.",
   nothing: "No runs to go by yet.",
 } as const;
 
-function headlineKey({ advice }: InspectAnswer, inspected: number): keyof typeof HEADLINES {
+function headlineKey(
+  { advice, breakEvenRate }: InspectAnswer,
+  { inspected, bad }: WorthFigures,
+): keyof typeof HEADLINES {
   if (advice === "check-all") return "all";
   if (advice === "check-none") return "none";
-  return inspected === 0 ? "nothing" : "few";
+  if (inspected === 0) return "nothing";
+  return morePartsToTell({ breakEvenRate, inspected, bad }) === null ? "near" : "few";
 }
 
 function costWords({ checkCents, missCents, currency }: WorthFigures): string {

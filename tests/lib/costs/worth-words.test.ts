@@ -44,7 +44,7 @@ describe("is the check worth it, in words (Deming, Out of the Crisis, chapter 15
 
   it("does not promise an end where shop and break-even lie too close", () => {
     const near = worthWords({ ...SHOP, missCents: Math.round((53 * 14_102) / 634) });
-    expect(near.headline).toBe("Too few runs to say.");
+    expect(near.headline).toBe("Too close to call.");
     expect(near.then).toContain("more than 100,000 more parts");
   });
 
