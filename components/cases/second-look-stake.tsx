@@ -1,3 +1,4 @@
+import Link from "next/link";
 import { Range } from "@/components/ui/range";
 import { Rests } from "@/components/ui/rests";
 import { formatMoney } from "@/lib/money";
@@ -16,10 +17,12 @@ interface StakeProps {
   ratesFrom: string;
   /** What was assumed because nobody said. */
   assumed: readonly string[];
+  /** Where the ways to take it off stand side by side; absent for those who may not see it. */
+  stripHref?: string;
 }
 
 /** What letting it go on is likely to cost, against putting it right now. Only for those who may see money. */
-export function Stake({ money, currency, quantity, ratesFrom, assumed }: StakeProps) {
+export function Stake({ money, currency, quantity, ratesFrom, assumed, stripHref }: StakeProps) {
   const { atRisk, rightNow } = money;
   const words = (cents: number) => formatMoney(cents, currency, { whole: true });
   return (
@@ -55,6 +58,11 @@ export function Stake({ money, currency, quantity, ratesFrom, assumed }: StakePr
         }
       />
       <Rests>Estimates, 90% ranges.{assumed.length > 0 && ` ${assumed.join(" ")}`}</Rests>
+      {stripHref && (
+        <Link className="solo" href={stripHref}>
+          Work out the strip
+        </Link>
+      )}
     </div>
   );
 }

@@ -8,22 +8,22 @@ import { Button } from "@/components/ui/button";
 import { Glyph } from "@/components/ui/glyph";
 import { PickGroup } from "@/components/ui/pick";
 import { Section } from "@/components/ui/section";
-import { BASE_METAL_TITLES, BASE_METALS, type BaseMetal } from "@/lib/cases/case-words";
+import { BASE_METAL_TITLES, BASE_METALS } from "@/lib/cases/case-words";
 import { sectionScale } from "@/lib/costs/section-scale";
 import { changeStack, withThicknessUnit } from "@/lib/costs/strip-typing";
-import { STACK_LIMITS, type Layer, type WeighedLayer } from "@/lib/plating/deposit-stack";
+import { STACK_LIMITS, type WeighedLayer } from "@/lib/plating/deposit-stack";
 
 interface StripLayersProps extends StripEditing {
-  /** What is drawn and weighed: the last stack that could be read. */
-  drawn: { stack: readonly Layer[]; layers: readonly WeighedLayer[]; baseMetal: BaseMetal } | null;
+  /** Weights of the last stack that could be reckoned. */
+  weighed: readonly WeighedLayer[] | null;
 }
 
 /** What is on the part: the deposit cut through, and a row for each layer to change it by. */
-export function StripLayers({ drawn, ...editing }: StripLayersProps) {
-  const { typed, faults, onChange } = editing;
-  // While a row is half typed the drawing keeps its rows apart; it follows as soon as the stack can be read.
-  const isInStep = drawn !== null && drawn.stack.length === typed.layers.length;
-  const scale = drawn && isInStep ? sectionScale(drawn.stack.map((layer) => layer.thicknessUm)) : null;
+export function StripLayers({ weighed, ...editing }: StripLayersProps) {
+  const { typed, faults, reading, onChange } = editing;
+  const { section } = reading;
+  const scale = section && sectionScale(section.stack.map((layer) => layer.thicknessUm));
+  const isInStep = reading.batch !== null && weighed?.length === typed.layers.length;
   const isAllToScale = scale?.bands.every((band) => band.isToScale) ?? true;
   return (
     <Section
@@ -33,7 +33,11 @@ export function StripLayers({ drawn, ...editing }: StripLayersProps) {
     >
       <div className="est-cut">
         <div className="est-cut__drawing">
-          {drawn && scale && <CrossSection layers={drawn.stack} scale={scale} baseMetal={drawn.baseMetal} />}
+          {section && scale ? (
+            <CrossSection layers={section.stack} scale={scale} baseMetal={section.baseMetal} />
+          ) : (
+            <p className="est-cut__waits">Drawn once each layer has its metal and thickness</p>
+          )}
         </div>
         <div className="est-cut__leaders">{scale && <SectionLeaders scale={scale} />}</div>
         <ol className="est-cut__rows" reversed start={typed.layers.length}>
@@ -44,7 +48,7 @@ export function StripLayers({ drawn, ...editing }: StripLayersProps) {
                 {...editing}
                 layer={layer}
                 place={index + 1}
-                weighed={isInStep ? drawn.layers[index] : undefined}
+                weighed={isInStep ? weighed[index] : undefined}
                 isToScale={scale?.bands[index]?.isToScale ?? true}
               />
             ))

@@ -4,8 +4,7 @@ import type { ReworkEstimate } from "@/lib/costs/estimate-plan";
 import type { StripBatch } from "@/lib/costs/read-strip";
 import { isStopCaution } from "@/lib/costs/strip-cautions";
 import type { StripStep } from "@/lib/costs/strip-plan";
-import { figureWords, massWords, metalTitle, minutesWords, roundMoney } from "@/lib/costs/strip-words";
-import { formatMoney } from "@/lib/money";
+import { figureWords, linesWords, massWords, metalTitle, minutesWords, roundMoney } from "@/lib/costs/strip-words";
 
 interface WayFigureProps {
   estimate: ReworkEstimate;
@@ -43,34 +42,37 @@ export function WayFigure({ estimate, endCents, currency }: WayFigureProps) {
   );
 }
 
-/** What the sum is made of; lines of nothing are left out. They add up to the cent. */
-export function CostLines({
-  estimate,
-  batch,
-  currency,
-}: {
+interface CostLinesProps {
   estimate: ReworkEstimate;
   batch: StripBatch;
   currency: string;
-}) {
-  const isWhole = estimate.meanCents >= 10_000;
+}
+
+/** What the sum is made of; lines of nothing are left out. As they are shown they add up: whole units are shared out. */
+export function CostLines({ estimate, batch, currency }: CostLinesProps) {
   const total = batch.quantity === 1 ? "The part" : `All ${batch.quantity.toLocaleString("en-US")} parts`;
+  const words = linesWords(
+    estimate.lines.map((line) => line.meanCents),
+    currency,
+  );
+  const nothing = linesWords([0], currency).concat(roundMoney(0, currency));
+  const lines = estimate.lines.map((line, index) => ({ ...line, words: words[index] ?? "" }));
   return (
     <dl className="est-lines">
-      {estimate.lines
-        .filter((line) => line.meanCents > 0)
+      {lines
+        .filter((line) => !nothing.includes(line.words))
         .map((line) => (
           <div key={line.key}>
             <dt>
               {line.name}
               {lineAside(line.key, estimate, batch, currency)}
             </dt>
-            <dd>{formatMoney(line.meanCents, currency, { whole: isWhole })}</dd>
+            <dd>{line.words}</dd>
           </div>
         ))}
       <div className="est-lines__total">
         <dt>{total}</dt>
-        <dd>{formatMoney(estimate.meanCents, currency, { whole: isWhole })}</dd>
+        <dd>{roundMoney(estimate.meanCents, currency)}</dd>
       </div>
     </dl>
   );

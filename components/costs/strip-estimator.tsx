@@ -90,11 +90,6 @@ export function StripEstimator(props: StripEstimatorProps) {
   const { typed, reading, reckoning } = shown;
   useAddress(isTouched ? routes.strip(queryOf(typed, keysOf(origin))) : null);
   const editing: StripEditing = { typed, faults: reading.faults, reading, onChange: change };
-  const drawn = reckoning && {
-    stack: reckoning.batch.stack,
-    layers: reckoning.layers,
-    baseMetal: reckoning.batch.baseMetal,
-  };
   return (
     <div className="est">
       <StripAnswer {...props} reckoning={reckoning} isWaiting={reading.batch === null} />
@@ -107,7 +102,7 @@ export function StripEstimator(props: StripEstimatorProps) {
       >
         {origin && <input type="hidden" name={origin.kind} value={origin.key} />}
         <input type="hidden" name="way" value={typed.way} />
-        <StripLayers {...editing} drawn={drawn} />
+        <StripLayers {...editing} weighed={reckoning?.layers ?? null} />
         <StripBatchFields
           {...editing}
           currencySign={currencySign(props.ratesWords.currency)}

@@ -26,6 +26,9 @@ export function StripSheet(props: StripSheetProps) {
   const { reckoning, ratesWords } = props;
   const isShop = props.for === "shop";
   const { chosen } = reckoning;
+  // The lines stand in the shorter column, so that even twelve layers stay on one page.
+  const isLong = chosen.steps.length > chosen.cautions.length;
+  const lines = isShop && <CostLines estimate={chosen} batch={reckoning.batch} currency={ratesWords.currency} />;
   return (
     <article className="strip-sheet">
       <header className="strip-sheet__from">
@@ -56,11 +59,12 @@ export function StripSheet(props: StripSheetProps) {
               </li>
             ))}
           </ol>
-          {isShop && <CostLines estimate={chosen} batch={reckoning.batch} currency={ratesWords.currency} />}
+          {!isLong && lines}
         </section>
         <section>
           <h3>Cautions</h3>
           <CautionList cautions={chosen.cautions} />
+          {isLong && lines}
         </section>
       </div>
       <Foot {...props} />

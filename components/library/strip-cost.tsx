@@ -1,3 +1,5 @@
+import Link from "next/link";
+import type { ReactNode } from "react";
 import { Caution } from "@/components/ui/caution";
 import { Range } from "@/components/ui/range";
 import { BASE_METAL_TITLES } from "@/lib/cases/case-words";
@@ -9,10 +11,12 @@ export interface StripCostProps {
   strip: TypicalStrip;
   /** Cents as the shop writes money, whole units. */
   money: (cents: number) => string;
+  /** Where a row is worked out for a batch; absent for those who may not. */
+  hrefFor?: (row: TypicalStripRow) => string;
 }
 
 interface CostRowProps {
-  label: string;
+  label: ReactNode;
   sub: string;
   cost: Cost;
   maxCents: number;
@@ -40,6 +44,9 @@ function CostRow({ label, sub, cost, maxCents, money }: CostRowProps) {
   );
 }
 
+/** "After nickel 10 µm" */
+const plateWords = ({ plate }: TypicalStripRow) => `After ${plate.charAt(0).toLowerCase()}${plate.slice(1)}`;
+
 /** "on steel and brass, polish back" */
 function rowWords({ baseMetals, method }: TypicalStripRow): string {
   const metals = baseMetals.map((metal) => BASE_METAL_TITLES[metal].toLowerCase());
@@ -48,7 +55,7 @@ function rowWords({ baseMetals, method }: TypicalStripRow): string {
 }
 
 /** What one part typically costs to put right, at the strike and after each usual final plate, on one scale. */
-export function StripCost({ strip, money }: StripCostProps) {
+export function StripCost({ strip, money, hrefFor }: StripCostProps) {
   const maxCents = Math.max(strip.atStrike.highCents, ...strip.rows.map((row) => row.highCents));
   const cautions = strip.cautions.toSorted((a, b) => Number(isStopCaution(b)) - Number(isStopCaution(a)));
   return (
@@ -64,7 +71,15 @@ export function StripCost({ strip, money }: StripCostProps) {
         {strip.rows.map((row) => (
           <CostRow
             key={`${row.plate} ${row.baseMetals.join(" ")}`}
-            label={`After ${row.plate.charAt(0).toLowerCase()}${row.plate.slice(1)}`}
+            label={
+              hrefFor ? (
+                <Link className="solo" href={hrefFor(row)}>
+                  {plateWords(row)}
+                </Link>
+              ) : (
+                plateWords(row)
+              )
+            }
             sub={rowWords(row)}
             cost={row}
             maxCents={maxCents}

@@ -27,7 +27,12 @@ export interface StripBatch {
 export type StripFaults = Readonly<Partial<Record<string, string>>>;
 
 /** A batch, or what has to be mended before there is one. */
-export type StripReading = { batch: StripBatch; faults: StripFaults } | { batch: null; faults: StripFaults };
+export interface StripReading {
+  batch: StripBatch | null;
+  /** What can be drawn, whatever else is wrong: the stack from the base metal out, and what it lies on. */
+  section: { stack: readonly Layer[]; baseMetal: BaseMetal } | null;
+  faults: StripFaults;
+}
 
 const CM_PER_INCH = 2.54;
 
@@ -51,10 +56,13 @@ export function readStrip(typed: StripTyped): StripReading {
   const stack = readStack(typed, note);
   const method = oneOf(typed.way, STRIP_METHODS);
   if (typed.way !== "" && !method) note("way", "This way is not known. The cheapest is taken.");
+  const isDrawn = stack.length === typed.layers.length && faults.stack === undefined;
+  const section = isDrawn ? { stack, baseMetal: baseMetal ?? "other" } : null;
   const isReady = Object.keys(faults).every((field) => field === "way");
-  if (!isReady || !baseMetal || !stageFound) return { batch: null, faults };
+  if (!isReady || !baseMetal || !stageFound) return { batch: null, section, faults };
   const alloy = typed.alloy || null;
-  return { batch: { quantity, areaDm2, partValueCents, baseMetal, alloy, stageFound, stack, method }, faults };
+  const batch = { quantity, areaDm2, partValueCents, baseMetal, alloy, stageFound, stack, method };
+  return { batch, section, faults };
 }
 
 type NoteFault = (field: string, problem: string) => number;

@@ -4,10 +4,10 @@ import { metalField, MOST_LAYER_FIELDS, STRIP_FIELDS, thicknessField, toField } 
 /** Longer than anything that a field of the estimator can mean. */
 const MOST_CHARS = 60;
 
-/** One text of an address: the first of several, cut to a length; what is no text is not there. */
+/** One text of an address: the last of several (a pressed button comes after the field of its name), cut to a length; what is no text is not there. */
 const text = z
   .preprocess(
-    (raw: unknown) => (Array.isArray(raw) ? (raw as unknown[])[0] : raw),
+    (raw: unknown) => (Array.isArray(raw) ? (raw as unknown[]).at(-1) : raw),
     z
       .string()
       .trim()

@@ -68,7 +68,7 @@ function bathRows(bath: DissolvingRow, title: string): BasisRow[] {
 }
 
 function timesRow(): BasisRow {
-  return row("Set-up, handling, line, scrap", "minutes and shares of a small job shop", USUAL_REWORK_TIMES.source);
+  return row("Set-up, handling, line, scrap", "Minutes and shares of a small job shop", USUAL_REWORK_TIMES.source);
 }
 
 function rateRows(steps: readonly StripStep[], rates: ShopRates, words: RatesWords): BasisRow[] {
@@ -104,6 +104,13 @@ export function narrowWords(name: string): string | undefined {
   if (name.startsWith("Stripping the")) return "Time the first load, then work it out again.";
   if (name.startsWith("Polishing the")) return "Polish one part against the clock.";
   return undefined;
+}
+
+/** The spread with one share a name: layers of one metal that are polished one by one are one thing to a reader. */
+export function spreadByName(spread: readonly { name: string; share: number }[]): { name: string; share: number }[] {
+  const shares = new Map<string, number>();
+  for (const { name, share } of spread) shares.set(name, (shares.get(name) ?? 0) + share);
+  return [...shares].map(([name, share]) => ({ name, share })).toSorted((a, b) => b.share - a.share);
 }
 
 /** The chance of scrap behind a way, "2 to 18%". */

@@ -2,7 +2,7 @@ import type { StageFound } from "@/lib/cases/case-words";
 import { counted } from "@/lib/cases/part-words";
 import type { StripReckoning } from "@/lib/costs/reckon-strip";
 import type { StripBatch } from "@/lib/costs/read-strip";
-import { formatMoney } from "@/lib/money";
+import { formatMoney, splitCents } from "@/lib/money";
 import { metalOf, type DepositMetal } from "@/lib/plating/metals";
 
 /** Below this cents matter. */
@@ -11,6 +11,18 @@ const WHOLE_FROM_CENTS = 10_000;
 /** Money as an estimate says it: whole units from a hundred up. @example roundMoney(177_517, "USD") === "$1,775" */
 export function roundMoney(cents: number, currency: string): string {
   return formatMoney(cents, currency, { whole: cents === 0 || cents >= WHOLE_FROM_CENTS });
+}
+
+/**
+ * The lines of a sum as `roundMoney` writes the sum: where that is in whole units the lines are too, and still add up.
+ * @example linesWords([14_070, 2_560, 53_700], "USD") is $141, $25, $537, which make $703
+ */
+export function linesWords(cents: readonly number[], currency: string): string[] {
+  const total = cents.reduce((sum, each) => sum + each, 0);
+  if (total < WHOLE_FROM_CENTS) return cents.map((each) => formatMoney(each, currency));
+  return splitCents(cents.map((each) => each / 100)).map((units) =>
+    formatMoney(units * 100, currency, { whole: true }),
+  );
 }
 
 /** "5 h 15 min"; from a hundred hours up in whole hours. */

@@ -13,6 +13,7 @@ import { GlyphShelf } from "./glyph-shelf";
 import { NotThereShelf } from "./not-there-shelf";
 import { RouteShelf } from "./route-shelf";
 import { TagCards, TagForms, TagLists } from "./tag-shelf";
+import { StripShelf } from "./strip-shelf";
 import { TestPieceShelf, WorthShelf } from "./worth-shelf";
 
 export const metadata: Metadata = { title: "Parts and states", robots: { index: false } };
@@ -61,6 +62,7 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <WorthShelf />
       <TestPieceShelf />
       <RouteShelf />
+      <StripShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">
           <LineStrip mode="thin" stations={STATIONS} pressed="activate" hrefFor={hrefFor} label="Thin line" />

@@ -8,7 +8,14 @@ import { sectionScale } from "@/lib/costs/section-scale";
 import { STARTING_RATES } from "@/lib/costs/starting-rates";
 import { basisRows, sourceKind } from "@/lib/costs/strip-basis";
 import { SHIPPED_STRIP_TABLE } from "@/lib/costs/strip-plan";
-import { answerWords, massWords, minutesWords, priceShareWords, refusalWords } from "@/lib/costs/strip-words";
+import {
+  answerWords,
+  linesWords,
+  massWords,
+  minutesWords,
+  priceShareWords,
+  refusalWords,
+} from "@/lib/costs/strip-words";
 
 const shop: StripShop = { rates: STARTING_RATES, table: SHIPPED_STRIP_TABLE, corrections: NO_CORRECTIONS };
 const shells: StripBatch = {
@@ -139,6 +146,12 @@ describe("words", () => {
     expect(priceShareWords(50, 100)).toBe("Half the price.");
     expect(priceShareWords(100, 110)).toBe("Almost the same price.");
     expect(priceShareWords(200, 100)).toBe("No cheaper.");
+  });
+
+  it("show lines that add up to the sum as it is shown", () => {
+    // 140.70 + 25.60 + 537.00 is 703.30: rounded one by one they would make 704.
+    expect(linesWords([14_070, 2_560, 53_700], "USD")).toEqual(["$141", "$25", "$537"]);
+    expect(linesWords([50, 49], "USD")).toEqual(["$0.50", "$0.49"]);
   });
 
   it("write minutes and grams as people do", () => {

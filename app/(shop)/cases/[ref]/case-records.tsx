@@ -1,6 +1,7 @@
 import { CallsTable } from "@/components/cases/case-calls";
 import { CaseCards } from "@/components/cases/case-cards";
 import { CaseMoneyTable } from "@/components/cases/case-money";
+import { LinkButton } from "@/components/ui/button";
 import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
 import { getCaseMoney } from "@/db/queries/case-costs";
@@ -9,6 +10,7 @@ import type { SignedIn } from "@/db/queries/crew";
 import { dayWords } from "@/lib/cases/moment-words";
 import { counted } from "@/lib/cases/part-words";
 import { can } from "@/lib/permissions";
+import { routes } from "@/lib/routes";
 import type { LoadedCase } from "./load-case";
 
 interface RecordsProps {
@@ -50,6 +52,13 @@ function MoneySection({ member, facts }: Pick<RecordsProps, "member" | "facts">)
         ratesFrom={dayWords(money.rates.validFromAt, member.shop.timeZone)}
         assumed={money.assumed}
       />
+      {can(member, "strip.estimate") && (
+        <p className="mt-3">
+          <LinkButton href={routes.strip({ case: facts.ref })} glyph="station-strike">
+            Work out the strip
+          </LinkButton>
+        </p>
+      )}
     </Section>
   );
 }

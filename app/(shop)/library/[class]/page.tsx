@@ -8,6 +8,7 @@ import { getDb } from "@/db/client";
 import { getLibraryClass } from "@/db/queries/library-class";
 import { getStation } from "@/db/queries/line";
 import { formatMoney } from "@/lib/money";
+import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { currentMember, guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
@@ -76,6 +77,7 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
         loaded={loaded}
         money={(cents) => formatMoney(cents, currency, { whole: true })}
         timeZone={timeZone}
+        canEstimate={can(member, "strip.estimate")}
       />
       <Sources loaded={loaded} />
     </ShopShell>

@@ -156,6 +156,7 @@ function StakeOf({ member, facts }: { member: SignedIn; facts: CaseFacts }) {
       quantity={facts.quantity}
       ratesFrom={dayWords(money.rates.validFromAt, member.shop.timeZone)}
       assumed={money.assumed}
+      stripHref={can(member, "strip.estimate") ? routes.strip({ case: facts.ref }) : undefined}
     />
   );
 }
