@@ -17,12 +17,14 @@ export interface CheckAnswerProps {
   /** The server's answer to these weights; null while they have not been sent. */
   state: ActState<KeptCheckAnswer>;
   declared: { metal: Declared; fit: DeclaredFit } | null;
+  /** The declared base metal is among what fits, only its alloy is not. */
+  isKindRight: boolean;
   /** First names of those who decide. */
   seniors: readonly string[];
 }
 
 /** What the weighing means for the job: a warning before it is kept, and where it stands once it is. */
-export function CheckAnswer({ state, declared, seniors }: CheckAnswerProps) {
+export function CheckAnswer({ state, declared, isKindRight, seniors }: CheckAnswerProps) {
   if (state?.ok) return <KeptNote kept={state.value} seniors={seniors} />;
   return (
     <>
@@ -32,13 +34,18 @@ export function CheckAnswer({ state, declared, seniors }: CheckAnswerProps) {
         </Note>
       )}
       {declared && !declared.fit.fits && (
-        <Note tone="rust" title={`Do not run it as ${metalInSentence(declared.metal.baseMetal, null)}`}>
+        <Note tone="rust" title={doNotWords(declared.metal, isKindRight)}>
           {declared.fit.words} Keep it on the job, so that the job carries the warning, and ask {askWords(seniors)}. A
           hollow part or a bubble reads low too.
         </Note>
       )}
     </>
   );
+}
+
+function doNotWords({ baseMetal, alloy }: Declared, isKindRight: boolean): string {
+  if (isKindRight) return `It is not ${metalInSentence(baseMetal, alloy)}`;
+  return `Do not run it as ${metalInSentence(baseMetal, null)}`;
 }
 
 function KeptNote({ kept, seniors }: { kept: KeptCheckAnswer; seniors: readonly string[] }) {
@@ -53,8 +60,8 @@ function KeptNote({ kept, seniors }: { kept: KeptCheckAnswer; seniors: readonly 
   return (
     <Note tone="rust" title={`${kept.job} carries the warning now`} role="status">
       Kept on {where}. It shows with the job, at the snap and on each of its cases, until a part that fits is weighed or
-      the job&rsquo;s metal is put right. Hold the parts and ask {askWords(seniors)}.
-      <Link className="solo" href={kept.caseRef === null ? routes.jobs() : routes.case(kept.caseRef)}>
+      the job&rsquo;s metal is put right. Hold the parts and ask {askWords(seniors)}.{" "}
+      <Link className="misfit__way" href={kept.caseRef === null ? routes.jobs() : routes.case(kept.caseRef)}>
         {kept.caseRef === null ? "See the jobs" : `See ${kept.caseRef}`}
       </Link>
     </Note>

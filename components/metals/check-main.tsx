@@ -50,7 +50,7 @@ export function MainButton({ step, className }: { step: NextStep; className?: st
     case "hold":
       return (
         <LinkButton {...look("ui-camera")} href={routes.snap()}>
-          Snap the part to hold it
+          Snap the part
         </LinkButton>
       );
     case "weigh-another":

@@ -19,6 +19,7 @@ import { Section } from "@/components/ui/section";
 import type { ActState } from "@/lib/act-state";
 import type { BaseMetal } from "@/lib/cases/case-words";
 import { verdictWords } from "@/lib/metals/check-words";
+import { COLOUR_TITLES, PULL_TITLES } from "@/lib/metals/material-words";
 import { METALS_KNOWN } from "@/lib/metals/part-reading";
 import { CHECK_FIELDS, tempUnit, type ShopUnits } from "@/lib/metals/typed-check";
 import { routes } from "@/lib/routes";
@@ -56,7 +57,12 @@ export function PartCheckSheet({ start, units, jobs, seniors, givenRoute, back, 
         {job && <JobLine job={job} caseRef={check.caseRef} />}
       </header>
       <div className="check-verdict">
-        <CheckAnswer state={answer} declared={withDeclared} seniors={seniors} />
+        <CheckAnswer
+          state={answer}
+          declared={withDeclared}
+          isKindRight={reading?.candidates.some((each) => each.baseMetal === job?.baseMetal) ?? false}
+          seniors={seniors}
+        />
         <div className="check-verdict__do no-print">
           <MainButton step={step} className="desk-only" />
         </div>
@@ -158,11 +164,13 @@ function Weights({ check, units }: { check: PartCheckState; units: ShopUnits }) 
   if (!check.reading) return null;
   return (
     <p className="only-print">
-      {air} g in air, {water} g in water of {temp} {tempUnit(units)}, balance ± {error} g. Magnet: {pull || "not tried"}
-      . Colour: {colour || "not seen"}.
+      {air} g in air, {water} g in water of {temp} {tempUnit(units)}, balance ± {error} g. Magnet:{" "}
+      {titleOf(PULL_TITLES, pull, "not tried")}. Colour: {titleOf(COLOUR_TITLES, colour, "not seen")}.
     </p>
   );
 }
+
+const titleOf = (titles: Record<string, string>, word: string, none: string) => (titles[word] ?? none).toLowerCase();
 
 function NotYet({ isRefused }: { isRefused: boolean }) {
   return isRefused ? (

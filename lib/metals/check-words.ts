@@ -58,8 +58,9 @@ export function verdictWords(
   if (!declared || !declared.fit.known) return like;
   const says = metalInSentence(declared.metal.baseMetal, null);
   if (!declared.fit.fits) {
-    const isSameKind = kinds.length === 1 && kinds[0] === says;
-    return `${like} The job says ${isSameKind ? metalInSentence(declared.metal.baseMetal, declared.metal.alloy) : says}.`;
+    // The kind may be right and the alloy wrong: then the alloy is what the job says wrongly.
+    const said = kinds.includes(says) ? metalInSentence(declared.metal.baseMetal, declared.metal.alloy) : says;
+    return `${like} The job says ${said}.`;
   }
   if (kinds.length === 1 && kinds[0] === says) return `${like} The job says so too.`;
   return kinds.includes(says) ? `${like} The job says ${says}.` : `${like} By weight alone the job's ${says} fits too.`;

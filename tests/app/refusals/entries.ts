@@ -4,6 +4,7 @@ import * as account from "@/app/(shop)/account/actions";
 import * as caseActions from "@/app/(shop)/cases/actions";
 import * as jobActions from "@/app/(shop)/cases/jobs/actions";
 import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
+import * as metalActions from "@/app/(shop)/metals/actions";
 import * as costActions from "@/app/(shop)/costs/actions";
 import * as wayActions from "@/app/(shop)/costs/strip/ways/actions";
 import * as crew from "@/app/(shop)/crew/actions";
@@ -403,6 +404,16 @@ export const ENTRIES: readonly Entry[] = [
     permission: "strips.set",
     aims: "shop",
     prepare: () => () => endingOf(wayActions.addBath, newBathForm()),
+  },
+  {
+    name: "app/(shop)/metals/actions.ts keepPartCheck",
+    permission: "part.check",
+    aims: "row",
+    prepare: (aim) => {
+      const { ref } = heldCase(aim);
+      const weights = { air: "48.6", water: "41.3", temp: "22", error: "0.1", pull: "none", colour: "blue-grey" };
+      return () => ending(metalActions.keepPartCheck, { ...weights, jobId: aim.shop.jobId, case: ref });
+    },
   },
   {
     name: "app/api/library/route.ts GET",

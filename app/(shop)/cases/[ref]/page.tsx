@@ -66,6 +66,7 @@ export default async function CasePage({ params }: CasePageProps) {
       }
     >
       <Crumb neighbours={loaded.neighbours} />
+      {misfit && <MisfitNote misfit={misfit} />}
       <CaseHead
         caseRef={facts.ref}
         state={loaded.standing.state}
@@ -85,7 +86,6 @@ export default async function CasePage({ params }: CasePageProps) {
           Print the tag
         </LinkButton>
       </div>
-      {misfit && <MisfitNote misfit={misfit} />}
       {facts.selfConfirmed && (
         <Note title="First call and second look by the same person" className="case-note">
           {facts.confirmedBy} confirmed their own first call. It stays out of the agreement figures.
