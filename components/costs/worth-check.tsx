@@ -57,7 +57,7 @@ function Basis(props: Omit<WorthCheckProps, "headingLevel"> & { breakEvenRate: n
   return (
     <>
       <Rests>
-        Bad parts among those looked at {props.periodWords}, with the 95% interval. A check: {checkSeconds} s,{" "}
+        Bad parts among those looked at {props.periodWords}, with the 95% interval. A check: {`${checkSeconds}\u00a0s`},{" "}
         {amountWords(checkCents, currency)}
         {checkFrom ? ` (${checkFrom})` : ""}. A miss: {amountWords(missCents, currency)} a part, {missFrom}.
       </Rests>

@@ -16,7 +16,8 @@ export function WorthScale({ breakEvenRate, rate, interval }: WorthScaleProps) {
   const [low, high] = interval;
   const decades = decadesFor(breakEvenRate, rate === undefined ? [] : [rate, low]);
   const at = (share: number) => placeOf(share, decades);
-  const even: Place = { "--x": at(breakEvenRate) };
+  const place = (share: number): Place => ({ "--x": at(share) });
+  const even = place(breakEvenRate);
   const own: Place = { "--x": at(rate ?? 0), "--a": at(low), "--b": at(high) };
   return (
     <div className="worth-scale" role="img" aria-label={saidWords(breakEvenRate, rate, interval)}>
@@ -26,7 +27,7 @@ export function WorthScale({ breakEvenRate, rate, interval }: WorthScaleProps) {
       <div className="worth-scale__track" style={even}>
         <i className="worth-scale__pays" />
         {ticksOf(decades).map((tick) => (
-          <i key={tick} className="worth-scale__tick" style={{ "--x": at(tick) } as Place} />
+          <i key={tick} className="worth-scale__tick" style={place(tick)} />
         ))}
         {rate !== undefined && (
           <>
@@ -46,7 +47,7 @@ export function WorthScale({ breakEvenRate, rate, interval }: WorthScaleProps) {
       )}
       <div className="worth-scale__axis">
         {ticksOf(decades).map((tick) => (
-          <span key={tick} style={{ "--x": at(tick) } as Place}>
+          <span key={tick} style={place(tick)}>
             {tickWords(tick)}
           </span>
         ))}
