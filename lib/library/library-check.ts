@@ -28,7 +28,9 @@ export function checkShelf(shelf: Shelf): string[] {
     ...shelf.classes.flatMap((entry) => checkClass(entry, shelf.causes, known)),
     ...shelf.causes.flatMap((entry) => checkCause(entry, known)),
     ...shelf.fixes.flatMap((entry) => checkFix(entry, known)),
-    ...shelf.cautions.flatMap((entry) => unknown(`caution ${entry.key}`, "source", [entry.sourceKey], known.sources)),
+    ...shelf.cautions.flatMap((entry) =>
+      checkSources(`caution ${entry.key}`, entry.sourceKey.trim() ? [entry.sourceKey] : [], known),
+    ),
     ...shelf.sources.filter((entry) => !entry.citation.trim()).map((entry) => `source ${entry.key} has no citation`),
   ];
 }
@@ -83,6 +85,7 @@ function checkFix(entry: LibraryFix, known: Known): string[] {
     ...entry.steps.flatMap((step, index) => {
       const place = `${name}, step ${index + 1}`;
       return [
+        ...(step.detail.trim() ? [] : [`${place} says nothing`]),
         ...(step.minutes > 0 ? [] : [`${place} has no minutes`]),
         ...unknown(place, "caution", step.cautionKeys, known.cautions),
       ];

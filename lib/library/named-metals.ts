@@ -8,6 +8,7 @@ import { BASE_METAL_TITLES, type BaseMetal } from "@/lib/cases/case-words";
  */
 const FAMILIES: readonly { said: RegExp; names: readonly string[] }[] = [
   { said: /leaded/, names: ["C353", "C360", "C385", "C544", "C932", "C36000", "leaded brass", "free-cutting brass"] },
+  { said: /silicon-bearing aluminium/, names: ["A356", "A360", "A380", "A413", "ADC12", "die cast aluminium"] },
   { said: /beryllium/, names: ["C172", "C17200", "C17500", "BeCu", "beryllium copper"] },
   {
     said: /(aluminium|silicon)( or silicon)? bronze/,

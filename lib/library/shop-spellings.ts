@@ -2,7 +2,7 @@
 
 /** Words that say nothing about a fault. 'no', 'not', 'too' stay: they do. */
 export const FILLER = new Set(
-  "a an and any are as at be been but by can did do does for from get gets got had has have he her his how i if in into is it its just like me my of on or our out so some that the their them then there these they this those to up was we very were what when where which who why will with would you your part parts job piece pieces".split(
+  "a an and any are as at be been but by can did do does for from get gets got had has have he her his how i if in into is it its just like me my of on or our out so some that the their them then there these they this those to up was we very were what when where which who why will with would you your part parts job piece pieces since someone somebody somebodys again still really monday tuesday wednesday thursday friday saturday sunday today yesterday route procedure problem problems issue issues trouble help 0 1 2 3 4 5 6 7 8 9".split(
     " ",
   ),
 );

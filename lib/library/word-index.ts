@@ -6,6 +6,8 @@ export interface WordIndex {
   documents: readonly SearchDocument[];
   /** Index word → places of the entries that hold it. */
   holders: ReadonlyMap<string, readonly number[]>;
+  /** How telling each index word is: the fewer entries hold it, the more. */
+  telling: ReadonlyMap<string, number>;
 }
 
 export function buildWordIndex(documents: readonly SearchDocument[]): WordIndex {
@@ -17,12 +19,21 @@ export function buildWordIndex(documents: readonly SearchDocument[]): WordIndex 
       else holders.set(word, [place]);
     }
   }
-  return { documents, holders };
+  const telling = new Map([...holders].map(([word, held]) => [word, Math.log(1 + documents.length / held.length)]));
+  return { documents, holders, telling };
 }
 
-/** How telling a word is: the fewer entries hold it, the more. A word that none holds tells as much as one that one does. */
-export function tellingOf(word: string, { documents, holders }: WordIndex): number {
-  return Math.log(1 + documents.length / Math.max(1, holders.get(word)?.length ?? 0));
+/** Entries that a word is taken to stand in when the library does not know it: it may as well be the shop's name for a part. */
+const STRANGE_HOLDERS = 6;
+
+/** How telling a word is that the library does not know. */
+export function strangeTelling({ documents }: WordIndex): number {
+  return Math.log(1 + documents.length / STRANGE_HOLDERS);
+}
+
+/** How telling a word of the library is. */
+export function tellingOf(word: string, index: WordIndex): number {
+  return index.telling.get(word) ?? strangeTelling(index);
 }
 
 /** Every entry that holds a reading of any of the words. */

@@ -1,7 +1,7 @@
 /** How well an entry answers what was typed. */
 import type { SearchDocument, SearchPhrase } from "@/lib/library/search-documents";
 import type { PlacedWord } from "@/lib/library/search-words";
-import { tellingOf, type WordIndex } from "@/lib/library/word-index";
+import { strangeTelling, tellingOf, type WordIndex } from "@/lib/library/word-index";
 
 /** What was typed, each word with its readings and how telling it is. */
 export interface Asked {
@@ -26,11 +26,14 @@ export interface WordMatch {
 }
 
 export function askedOf(placed: readonly PlacedWord[], index: WordIndex): Asked {
-  const words = placed.map(({ typed, readings }) => {
+  const words = placed.map(({ readings }) => {
     const known = readings.map(({ stem }) => tellingOf(stem, index));
     return {
-      readings: new Map(readings.map(({ stem, sureness }) => [stem, sureness])),
-      telling: known.length > 0 ? Math.max(...known.slice(0, 3)) : tellingOf(typed, index),
+      // The surest last, so that it is the one that stays.
+      readings: new Map(
+        readings.toSorted((a, b) => a.sureness - b.sureness).map(({ stem, sureness }) => [stem, sureness]),
+      ),
+      telling: known.length > 0 ? Math.max(...known.slice(0, 3)) : strangeTelling(index),
     };
   });
   const surest = placed.map(({ readings }) => Math.max(0, ...readings.map(({ sureness }) => sureness)));

@@ -2,21 +2,31 @@
 import { describe, expect, test } from "vitest";
 import { shelf } from "@/db/seed/library/shelf";
 import { buildLibrarySearch, type LibraryHit } from "@/lib/library/library-search";
-import { LATER_PHRASES, SEARCH_PHRASES, type SearchPhrase } from "./search-phrases";
+import {
+  HELD_OUT_PHRASES,
+  LATER_PHRASES,
+  NONSENSE,
+  SEARCH_PHRASES,
+  THIRD_PHRASES,
+  type SearchPhrase,
+} from "./search-phrases";
 
 const search = buildLibrarySearch(shelf);
 
 function isFound({ finds }: SearchPhrase, hits: readonly LibraryHit[]): boolean {
   return hits.slice(0, 3).some((hit) => {
     if ("class" in finds) return hit.classes.includes(finds.class);
-    return hit.slug === ("cause" in finds ? finds.cause : finds.fix) && hit.kind === ("cause" in finds ? "cause" : "fix");
+    return (
+      hit.slug === ("cause" in finds ? finds.cause : finds.fix) && hit.kind === ("cause" in finds ? "cause" : "fix")
+    );
   });
 }
 
-/** Share found of those that pass, printed by name: an average hides the half that fails. */
-function printShare(name: string, phrases: readonly SearchPhrase[]): void {
+/** Share found within the first three, printed by name: an average hides the half that fails. */
+function shareFound(name: string, phrases: readonly SearchPhrase[]): number {
   const found = phrases.filter((phrase) => isFound(phrase, search(phrase.typed))).length;
   console.info(`search, ${name}: ${found} of ${phrases.length} (${((100 * found) / phrases.length).toFixed(1)} %)`);
+  return found / phrases.length;
 }
 
 describe("the library answers in the shop's words", () => {
@@ -34,16 +44,15 @@ describe("the library answers in the shop's words", () => {
 
   test("95 of 100 phrases find their class, cause or fix within the first three", () => {
     const missed = SEARCH_PHRASES.filter((phrase) => !isFound(phrase, search(phrase.typed)));
-    const share = 1 - missed.length / SEARCH_PHRASES.length;
-    printShare("all", SEARCH_PHRASES);
+    const share = shareFound("all", SEARCH_PHRASES);
     for (const kind of ["plain", "slang", "typo"] as const) {
-      printShare(
+      shareFound(
         kind,
         SEARCH_PHRASES.filter((phrase) => phrase.kind === kind),
       );
     }
     for (const kind of ["class", "cause", "fix"] as const) {
-      printShare(
+      shareFound(
         `finds a ${kind}`,
         SEARCH_PHRASES.filter(({ finds }) => kind in finds),
       );
@@ -68,14 +77,34 @@ describe("the library answers in the shop's words", () => {
     expect(share).toBeGreaterThanOrEqual(0.95);
   });
 
-  test("every phrase finds something, best first, and says what matched", () => {
+  test("95 of 100 phrases of the third and the held-out set find their class, cause or fix within the first three", () => {
+    expect(HELD_OUT_PHRASES).toHaveLength(40);
+    expect(shareFound("third set", THIRD_PHRASES)).toBeGreaterThanOrEqual(0.95);
+    expect(shareFound("held out", HELD_OUT_PHRASES)).toBeGreaterThanOrEqual(0.95);
+  });
+
+  test("nearly every phrase finds something; all say what matched, best first", () => {
+    const silent = SEARCH_PHRASES.filter(({ typed }) => search(typed).length === 0);
+    expect(silent.length).toBeLessThanOrEqual(2);
     for (const { typed } of SEARCH_PHRASES) {
       const hits = search(typed);
       const scores = hits.map((hit) => hit.score);
-      expect(hits.length, typed).toBeGreaterThan(0);
       expect(scores, typed).toEqual([...scores].sort((a, b) => a - b));
       expect(hits.every((hit) => hit.matched.length > 0 && hit.classes.length > 0)).toBe(true);
     }
+  });
+
+  test("an alloy number alone finds what is written for that alloy", () => {
+    const first = (typed: string) =>
+      search(typed)
+        .slice(0, 3)
+        .map((hit) => hit.slug);
+    expect(first("C17200")).toContain("beryllium-copper-oxide");
+    expect(first("C954")).toContain("aluminium-bronze-route");
+    expect(first("416")).toContain("sulfur-stainless-smut");
+    expect(first("german silver")).toContain("nickel-silver-route");
+    expect(first("zamak 5")).toContain("gentle-zinc-route");
+    expect(first("britannia")).toContain("pewter-gentle-route");
   });
 });
 
@@ -84,6 +113,20 @@ describe("the library at the edges of what is typed", () => {
     expect(search("")).toEqual([]);
     expect(search("   ")).toEqual([]);
     expect(search("?! …")).toEqual([]);
+  });
+
+  test("what has nothing to do with the shop finds nothing", () => {
+    expect(NONSENSE.filter((typed) => search(typed).length > 0)).toEqual([]);
+  });
+
+  test("one word of the shop's among strange ones is no answer unless it is most of what was typed", () => {
+    expect(search("parking permit for the north gate")).toEqual([]);
+    expect(search("greasy doodad")[0]?.slug).toBe("dewetting");
+  });
+
+  test("words run together are found by their letters", () => {
+    expect(search("wontstick").map((hit) => hit.slug)).toContain("peeling");
+    expect(search("lefttoolong")[0]?.slug).toBe("activator-dwell-long");
   });
 
   test("the order of the words does not matter", () => {

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { editDistance, mendWords, searchWords, vocabularyOf } from "@/lib/library/search-words";
+import { editDistance, mendWords, placeWords, searchWords, vocabularyOf } from "@/lib/library/search-words";
 
 const vocabulary = vocabularyOf([
   "tear tracks",
@@ -42,6 +42,38 @@ describe("what a shop types becomes words that can be looked up", () => {
   test("a word with nothing near is dropped beside words that say something, and kept alone", () => {
     expect(mendWords("xylophone ring", vocabulary)).toEqual(["ring"]);
     expect(mendWords("xylophone", vocabulary)).toHaveLength(1);
+  });
+});
+
+describe("how surely a typed word is meant", () => {
+  const surenessOf = (typed: string) =>
+    Math.max(0, ...placeWords(typed, vocabulary).flatMap((each) => each.readings.map((way) => way.sureness)));
+
+  test("a word spelt right is sure, a beginning less, a misspelling less by every letter, and a stranger not at all", () => {
+    expect(surenessOf("islands")).toBe(1);
+    expect(surenessOf("isl")).toBeLessThan(1);
+    expect(surenessOf("isl")).toBeGreaterThan(surenessOf("ilands"));
+    expect(surenessOf("ilands")).toBeGreaterThan(surenessOf("ilnds"));
+    expect(surenessOf("xylophone")).toBe(0);
+  });
+
+  test("a shop word is read as the library's, less surely than as itself", () => {
+    const words = vocabularyOf(["acid", "glove"]);
+    expect(placeWords("pickle", words)[0]?.readings).toEqual([{ stem: "acid", sureness: 0.6 }]);
+    expect(placeWords("mitts", words)[0]?.readings.map((way) => way.stem)).toEqual(searchWords("glove"));
+  });
+
+  test("spelt by ear, a word is found; another spelling that shops use is one word with it", () => {
+    const words = vocabularyOf(["oxidation", "rough", "chromium"]);
+    expect(mendWords("oxadashun", words)).toEqual(searchWords("oxidation"));
+    expect(mendWords("ruff", words)).toEqual(searchWords("rough"));
+    expect(mendWords("krome", words)).toEqual(searchWords("chromium"));
+  });
+
+  test("a shape that the library does not use is found by its stem or by the shorter word in it", () => {
+    const words = vocabularyOf(["contamination", "weld"]);
+    expect(mendWords("contaminated", words)).toEqual(searchWords("contamination"));
+    expect(mendWords("weldments", words)).toEqual(searchWords("weld"));
   });
 });
 

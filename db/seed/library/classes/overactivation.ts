@@ -429,7 +429,7 @@ export const overactivation: ShelfPart = {
     {
       slug: "fluoride-desmut-aluminium",
       causeSlugs: ["zinc-or-aluminium-attacked"],
-      title: "Aluminium: take the silicon smut off before zincate",
+      title: "Silicon-bearing aluminium: fluoride desmut before zincate",
       steps: [
         {
           title: "Strip in nitric",

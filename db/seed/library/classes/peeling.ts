@@ -217,40 +217,9 @@ export const peeling: ShelfPart = {
   ],
   fixes: [
     {
-      slug: "nickel-strike-first",
-      causeSlugs: ["passive-base-no-nickel-strike"],
-      title: "All copper off, nickel strike first",
-      steps: [
-        polishBack({
-          detail: "All of it, wet, also where it held. Break the base metal's shine.",
-          minutes: 8,
-          cautionKeys: ["nickel"],
-        }),
-        clean("Electroclean, end cathodic on nickel", { detail: "1 to 2 min.", minutes: 5 }),
-        rinseToWaterBreak(),
-        activate("Hydrochloric dip", {
-          detail: "20 to 50 % by volume, 30 to 60 s, on to the nickel strike wet.",
-          minutes: 2,
-        }),
-        {
-          title: "Woods nickel strike",
-          detail:
-            "Nickel chloride 225 to 240 g/L, hydrochloric acid 110 to 125 mL/L, 1 to 3 min, 21 to 32 °C (trade columns). Two full rinses: acid bath before an alkaline one.",
-          minutes: 4,
-          perPart: false,
-          cautionKeys: ["nickel", "acid-cyanide", "acid-splash", "power", "embrittlement"],
-          station: "strike",
-        },
-        strike({ detail: "Under 15 s, wet. Tape every part of this rack." }),
-      ],
-      whenNot: "Not aluminium, zinc or pewter: the acid eats them.",
-      materials: ["Woods nickel strike", "hydrochloric acid", "nickel anodes"],
-      sourceKeys: ["astm-b254", "woods-columns", "common-practice", "from-memory"],
-    },
-    {
       slug: "double-zincate",
       causeSlugs: ["zincate-poor"],
-      title: "Strip, zincate twice, live entry",
+      title: "Aluminium: strip, zincate twice (double zincate), live entry",
       steps: [
         {
           title: "Strip copper and zincate in nitric",

@@ -134,6 +134,7 @@ export const underactivation: ShelfPart = {
         "weak acid",
         "dead pickle",
         "acid too old",
+        "acid never changed",
         "worn out dip",
         "activator exhausted",
         "flat acid",
@@ -371,11 +372,12 @@ export const underactivation: ShelfPart = {
     },
     {
       slug: "right-route-stainless-nickel",
-      causeSlugs: ["activator-wrong", "repassivated-in-transfer"],
+      causeSlugs: ["activator-wrong", "repassivated-in-transfer", "passive-base-no-nickel-strike"],
       title: "Stainless or nickel: Woods strike, then copper, wet all the way",
       steps: [
         polishBack({
-          detail: "Wet, fine; it also breaks the old film. Nickel dust: keep it wet.",
+          detail:
+            "Wet, fine, all of the copper, also where it held: the same film lies under it. It breaks the old film too. Nickel dust: keep it wet.",
           cautionKeys: ["nickel"],
         }),
         clean("Electroclean", {
