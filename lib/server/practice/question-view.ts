@@ -15,9 +15,8 @@ export interface OpenQuestion {
   id: string;
   answered: false;
   photo: { view: string; thumb: string };
-  /** "Brass, bath strike". */
+  /** "Brass, bath strike", with where it was found unless at the strike itself. */
   facts: string;
-  stage: string;
   isRendered: boolean;
 }
 
@@ -71,13 +70,18 @@ export function viewQuestion(db: Handle, member: SignedIn, id: string): Question
     };
   }
   if (!photo) return { id, answered: false, gone: true };
-  const method = METHOD_TITLES[photo.method].toLowerCase();
   return {
     id,
     answered: false,
     photo: urls,
-    facts: `${BASE_METAL_TITLES[photo.baseMetal]}, ${method} strike`,
-    stage: STAGE_TITLES[photo.stageFound],
+    facts: factsOf(photo),
     isRendered: photo.isRendered,
   };
 }
+
+function factsOf({ baseMetal, method, stageFound }: NonNullable<ReturnType<typeof getAskablePhoto>>): string {
+  const facts = `${BASE_METAL_TITLES[baseMetal]}, ${METHOD_TITLES[method].toLowerCase()} strike`;
+  return stageFound === "at-strike" ? facts : `${facts}, found ${lowerFirst(STAGE_TITLES[stageFound])}`;
+}
+
+const lowerFirst = (words: string) => words.charAt(0).toLowerCase() + words.slice(1);

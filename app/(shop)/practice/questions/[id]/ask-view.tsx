@@ -19,7 +19,6 @@ export function AskView({ member, view, formId }: { member: SignedIn; view: Open
       />
       <div>
         <h1 className="practice-ask">What would you call it?</h1>
-        <p className="small mid practice-found">Found: {view.stage.toLowerCase()}.</p>
         <QuestionForm id={formId} questionId={view.id} first={first} rest={rest} onCall={callPhoto} />
       </div>
     </div>
