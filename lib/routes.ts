@@ -26,10 +26,16 @@ export const routes = {
   practiceQuestion: (id: string) => `/practice/questions/${id}`,
   /** The photo of a question, for the person asked alone: its address tells nothing of photo or case. */
   practicePhoto: (id: string, size: "view" | "thumb") => `/api/practice/questions/${id}/photo?size=${size}`,
-  libraryEdit: (entry: "class" | "cause" | "fix", slug: string) => `/library/edit/${entry}/${slug}`,
-  libraryNew: (entry: "class" | "cause" | "fix") => `/library/edit/${entry}`,
-  libraryRevisions: (entry: "class" | "cause" | "fix", slug: string) => `/library/edit/${entry}/${slug}/revisions`,
-  libraryPort: () => "/library/port",
+  libraryEdit: (entry: "class" | "cause" | "fix", slug: string, query?: Record<string, string>) =>
+    withQuery(`/library/edit/${entry}/${slug}`, query),
+  libraryNew: (entry: "class" | "cause" | "fix", query?: Record<string, string>) =>
+    withQuery(`/library/edit/${entry}`, query),
+  libraryRevisions: (entry: "class" | "cause" | "fix", slug: string, query?: Record<string, string>) =>
+    withQuery(`/library/edit/${entry}/${slug}/revisions`, query),
+  libraryPort: (query?: Record<string, string>) => withQuery("/library/port", query),
+  /** The whole library as one file of the published format. */
+  libraryExport: () => "/api/library/export",
+  librarySchema: () => "/schemas/library-1.json",
   compare: (refs: readonly string[]) => withQuery("/cases/compare", { refs: refs.join(",") }),
   ledger: (query?: Record<string, string>) => withQuery("/costs", query),
   rates: () => "/costs/rates",

@@ -1,4 +1,4 @@
-import { and, asc, count, eq, exists, isNotNull, max, min, sql } from "drizzle-orm";
+import { and, asc, count, eq, exists, isNotNull, max, min, ne, sql } from "drizzle-orm";
 import { BASE_METALS, type BaseMetal, type StationKind } from "@/lib/cases/case-words";
 import type { LibraryEntries } from "@/lib/library/search-documents";
 import type { Handle } from "../open";
@@ -13,14 +13,14 @@ import {
 } from "../schema";
 
 /**
- * A mark that changes whenever something is published in the shop's library, and never else: what was built from the
- * library is good for as long as the mark stands. A draft that is published keeps its row, hence the count.
+ * A mark that changes whenever something is published in the shop's library or removed from it, and never else: what was
+ * built from the library is good for as long as the mark stands. Drafts leave it.
  */
 export function getLibraryMark(db: Handle, shopId: number): string {
   const row = db
     .select({ newest: max(libraryRevisions.id), revisions: count() })
     .from(libraryRevisions)
-    .where(and(eq(libraryRevisions.shopId, shopId), eq(libraryRevisions.state, "published")))
+    .where(and(eq(libraryRevisions.shopId, shopId), ne(libraryRevisions.state, "draft")))
     .get();
   return `${row?.newest ?? 0}.${row?.revisions ?? 0}`;
 }

@@ -22,6 +22,9 @@ export const AUDIT_WORDS = {
   "job.closed": "closed job",
   "job.reopened": "opened again job",
   "library.published": "published in the library",
+  "library.removed": "removed from the library",
+  "library.brought-back": "brought back in the library",
+  "library.brought-in": "brought into the library",
 } as const satisfies Record<string, string>;
 export type AuditAction = keyof typeof AUDIT_WORDS;
 
