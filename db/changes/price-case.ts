@@ -6,7 +6,7 @@ import type { PriceBook } from "../queries/price-book";
 import { caseCosts, cases } from "../schema";
 
 /** Whose case it is, and when it is priced. */
-interface Pricing {
+export interface Pricing {
   shopId: number;
   now: number;
   /** Where many cases are priced in one go. */
@@ -24,7 +24,10 @@ export function priceCase(tx: Handle, pricing: Pricing, caseId: number): void {
   tx.insert(caseCosts)
     .values(figureOf(pricing, caseId, facts, cost))
     .run();
-  showFigure(tx, pricing.shopId, caseId, facts, cost);
+  tx.update(cases)
+    .set({ costCents: cost.meanCents, costBasis: basisOf(cost), atRiskCents: moneyAtRisk(facts).meanCents })
+    .where(and(eq(cases.shopId, pricing.shopId), eq(cases.id, caseId)))
+    .run();
 }
 
 export type NewFigure = typeof caseCosts.$inferInsert;
@@ -49,14 +52,7 @@ export function figureOf(pricing: Pricing, caseId: number, facts: CostFacts, cos
   };
 }
 
-/** Puts the figure on the case's own row, where the queue and the ledger read it. */
-export function showFigure(tx: Handle, shopId: number, caseId: number, facts: CostFacts, cost: CaseCost): void {
-  tx.update(cases)
-    .set({ costCents: cost.meanCents, costBasis: basisOf(cost), atRiskCents: moneyAtRisk(facts).meanCents })
-    .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
-    .run();
-}
-
-function basisOf(cost: CaseCost): "estimate" | "recorded" {
+/** What a stored figure rests on: an estimate, or what the cards or the closing recorded. */
+export function basisOf(cost: CaseCost): "estimate" | "recorded" {
   return cost.basis === "estimated" ? "estimate" : "recorded";
 }

@@ -1,11 +1,11 @@
 import { isDeepStrictEqual } from "node:util";
-import { and, asc, desc, eq, gt, ne } from "drizzle-orm";
-import { caseCost } from "@/lib/costs/case-cost";
+import { and, eq, getTableColumns, gt, lte, max, sql } from "drizzle-orm";
+import { caseCost, moneyAtRisk, type CaseCost } from "@/lib/costs/case-cost";
 import type { Db, Handle } from "../open";
-import { getCostFacts } from "../queries/case-costs";
-import { openPriceBook, type PriceBook } from "../queries/price-book";
+import { listCostFacts, type PricedCase } from "../queries/case-costs";
+import { openPriceBook } from "../queries/price-book";
 import { caseCosts, cases } from "../schema";
-import { figureOf, showFigure, type NewFigure } from "./price-case";
+import { basisOf, figureOf, type NewFigure, type Pricing } from "./price-case";
 
 /** Cases priced in one transaction: a disk flush each would take hours, and one for all would lose everything at a crash. */
 const BATCH = 500;
@@ -21,63 +21,77 @@ export function priceShopAgain(db: Db, shopId: number, now: number): number {
   for (const isClosed of [true, false]) {
     const book = openPriceBook(db, shopId);
     for (let after = 0; ;) {
-      const batch = listBatch(db, shopId, isClosed, after);
+      const batch = listCostFacts(db, shopId, { isClosed, after, limit: BATCH }, book);
       const last = batch.at(-1);
       if (last === undefined) break;
-      db.transaction(
-        (tx) => {
-          for (const caseId of batch) if (priceCaseAgain(tx, { shopId, now, book }, caseId)) repriced += 1;
-        },
-        { behavior: "immediate" },
-      );
-      after = last;
+      repriced += db.transaction((tx) => priceBatch(tx, { shopId, now }, batch, after), { behavior: "immediate" });
+      after = last.caseId;
     }
   }
   return repriced;
 }
 
-function listBatch(db: Handle, shopId: number, isClosed: boolean, after: number): number[] {
-  const state = isClosed ? eq(cases.state, "closed") : ne(cases.state, "closed");
-  return db
-    .select({ id: cases.id })
-    .from(cases)
-    .where(and(eq(cases.shopId, shopId), gt(cases.id, after), state))
-    .orderBy(asc(cases.id))
-    .limit(BATCH)
-    .all()
-    .map((row) => row.id);
+/** @returns how many of them got a new figure */
+function priceBatch(tx: Handle, pricing: Pricing, batch: readonly PricedCase[], after: number): number {
+  const before = newestFigures(tx, pricing.shopId, after, batch.at(-1)?.caseId ?? after);
+  const added = batch.map((each) => {
+    const cost = caseCost(each.facts);
+    showAgain(tx, pricing.shopId, each, cost);
+    return newFigures(pricing, each, cost, before);
+  });
+  const rows = added.flat();
+  if (rows.length > 0) tx.insert(caseCosts).values(rows).run();
+  return added.filter((figures) => figures.length > 0).length;
 }
 
-/** A closed case gets both: what this version would have estimated, and its record at what it took. */
-function priceCaseAgain(tx: Handle, pricing: { shopId: number; now: number; book: PriceBook }, caseId: number) {
-  const facts = getCostFacts(tx, pricing.shopId, caseId, pricing.book);
-  if (!facts) return false;
-  const cost = caseCost(facts);
-  const estimated = facts.recorded && facts.closing === "sound" ? caseCost({ ...facts, recorded: null }) : null;
-  let isNew = estimated !== null && addIfNew(tx, figureOf(pricing, caseId, facts, estimated));
-  // The record stands after the estimate that it is held against.
-  isNew = addIfNew(tx, figureOf(pricing, caseId, facts, cost), isNew) || isNew;
-  showFigure(tx, pricing.shopId, caseId, facts, cost);
-  return isNew;
+type Figure = typeof caseCosts.$inferSelect;
+const keyOf = ({ caseId, basis }: Pick<Figure, "caseId" | "basis">) => `${caseId} ${basis}`;
+
+/** A closed case gets both: what this version would have estimated, and after it its record at what it took. */
+function newFigures(
+  pricing: Pricing,
+  { caseId, facts }: PricedCase,
+  cost: CaseCost,
+  before: ReadonlyMap<string, Figure>,
+): NewFigure[] {
+  const isNew = (figure: NewFigure) => !isSame(before.get(keyOf(figure)), figure);
+  const figure = figureOf(pricing, caseId, facts, cost);
+  if (facts.recorded && facts.closing === "sound") {
+    const estimate = figureOf(pricing, caseId, facts, caseCost({ ...facts, recorded: null }));
+    if (isNew(estimate)) return [estimate, figure];
+  }
+  return isNew(figure) ? [figure] : [];
 }
 
-function addIfNew(tx: Handle, figure: NewFigure, always = false): boolean {
-  const last = tx
-    .select()
-    .from(caseCosts)
-    .where(
-      and(eq(caseCosts.shopId, figure.shopId), eq(caseCosts.caseId, figure.caseId), eq(caseCosts.basis, figure.basis)),
-    )
-    .orderBy(desc(caseCosts.id))
-    .limit(1)
-    .get();
-  if (!always && last && isSame(last, figure)) return false;
-  tx.insert(caseCosts).values(figure).run();
-  return true;
-}
-
-function isSame(last: typeof caseCosts.$inferSelect, figure: NewFigure): boolean {
+function isSame(last: Figure | undefined, figure: NewFigure): boolean {
+  if (!last) return false;
   const { id: _id, at: _at, ...before } = last;
   const { at: _now, ...after } = figure;
   return isDeepStrictEqual(before, after);
+}
+
+/** The newest figure of each kind, of the cases after one row number up to another. */
+function newestFigures(tx: Handle, shopId: number, after: number, last: number): Map<string, Figure> {
+  const newest = tx
+    .select({ id: max(caseCosts.id).as("newest_id") })
+    .from(caseCosts)
+    .where(and(eq(caseCosts.shopId, shopId), gt(caseCosts.caseId, after), lte(caseCosts.caseId, last)))
+    .groupBy(caseCosts.caseId, caseCosts.basis)
+    .as("newest");
+  const rows = tx
+    .select(getTableColumns(caseCosts))
+    .from(newest)
+    .innerJoin(caseCosts, sql`${caseCosts.id} = ${newest.id}`)
+    .all();
+  return new Map(rows.map((row) => [keyOf(row), row]));
+}
+
+/** The figure on the case's own row, where it has moved. */
+function showAgain(tx: Handle, shopId: number, { caseId, facts, shown }: PricedCase, cost: CaseCost): void {
+  const now = { costCents: cost.meanCents, costBasis: basisOf(cost), atRiskCents: moneyAtRisk(facts).meanCents };
+  if (isDeepStrictEqual(now, shown)) return;
+  tx.update(cases)
+    .set(now)
+    .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
+    .run();
 }

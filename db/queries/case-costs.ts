@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNotNull, sql } from "drizzle-orm";
+import { and, asc, desc, eq, gt, isNotNull, lte, ne, sql, type SQL } from "drizzle-orm";
 import type { CaseCostInput } from "@/lib/costs/case-cost";
 import { moneyAtRisk } from "@/lib/costs/case-cost";
 import { strikeThenPlate } from "@/lib/costs/case-stack";
@@ -23,8 +23,49 @@ export function getCostFacts(
   caseId: number,
   book: PriceBook = openPriceBook(db, shopId),
 ): CostFacts | null {
-  const row = db
+  const row = standingRows(db)
+    .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
+    .get();
+  if (!row) return null;
+  const spent = spentMinutes(db, and(eq(reworkCards.shopId, shopId), eq(reworkCards.caseId, caseId)));
+  return factsOf(row, spent.get(caseId) ?? null, book);
+}
+
+/** A case with what is on its own row now, for pricing it again. */
+export interface PricedCase {
+  caseId: number;
+  facts: CostFacts;
+  shown: Pick<typeof cases.$inferSelect, "costCents" | "costBasis" | "atRiskCents">;
+}
+
+/** The same for a stretch of a shop's cases, by row number, with three reads in all. */
+export function listCostFacts(
+  db: Handle,
+  shopId: number,
+  stretch: { isClosed: boolean; after: number; limit: number },
+  book: PriceBook,
+): PricedCase[] {
+  const { isClosed, after, limit } = stretch;
+  const state = isClosed ? eq(cases.state, "closed") : ne(cases.state, "closed");
+  const rows = standingRows(db)
+    .where(and(eq(cases.shopId, shopId), gt(cases.id, after), state))
+    .orderBy(asc(cases.id))
+    .limit(limit)
+    .all();
+  const last = rows.at(-1)?.id ?? after;
+  const of = and(eq(reworkCards.shopId, shopId), gt(reworkCards.caseId, after), lte(reworkCards.caseId, last));
+  const spent = spentMinutes(db, of);
+  return rows.map((row) => ({
+    caseId: row.id,
+    facts: factsOf(row, spent.get(row.id) ?? null, book),
+    shown: { costCents: row.costCents, costBasis: row.costBasis, atRiskCents: row.atRiskCents },
+  }));
+}
+
+const standingRows = (db: Handle) =>
+  db
     .select({
+      id: cases.id,
       quantity: cases.quantity,
       areaDm2: workOrders.areaDm2,
       baseMetal: cases.baseMetal,
@@ -37,43 +78,51 @@ export function getCostFacts(
       openedAt: cases.openedAt,
       stripMethod: cases.stripMethod,
       classSlug: standingClass(cases),
+      costCents: cases.costCents,
+      costBasis: cases.costBasis,
+      atRiskCents: cases.atRiskCents,
     })
     .from(cases)
-    .innerJoin(workOrders, and(eq(workOrders.shopId, cases.shopId), eq(workOrders.id, cases.workOrderId)))
-    .where(and(eq(cases.shopId, shopId), eq(cases.id, caseId)))
-    .get();
-  if (!row) return null;
-  const { finalStack, round, state, openedAt, partValueCents, stripMethod, classSlug, ...facts } = row;
-  const isClosed = state === "closed";
-  const minutes = spentMinutes(db, shopId, caseId);
-  const stack = strikeThenPlate(finalStack);
-  const table = book.stripTableAt(openedAt);
-  const part = { baseMetal: facts.baseMetal, stageFound: facts.stageFound, stack, table };
+    .innerJoin(workOrders, and(eq(workOrders.shopId, cases.shopId), eq(workOrders.id, cases.workOrderId)));
+
+type StandingRow = ReturnType<ReturnType<typeof standingRows>["all"]>[number];
+
+function factsOf(row: StandingRow, minutes: number | null, book: PriceBook): CostFacts {
+  const { quantity, areaDm2, baseMetal, stageFound, closing, stripMethod } = row;
+  const isClosed = row.state === "closed";
+  const stack = strikeThenPlate(row.finalStack);
+  const table = book.stripTableAt(row.openedAt);
+  const isAllowed = stripMethod && methodRefusal({ baseMetal, stageFound, stack, table }, stripMethod) === null;
   return {
-    ...facts,
+    quantity,
+    areaDm2,
+    baseMetal,
+    stageFound,
+    closing,
     // 0: the plater who opened the job did not know it. The estimate then says that scrap risk is left out.
-    partValueCents: partValueCents || null,
+    partValueCents: row.partValueCents || null,
     stack,
     table,
     // A choice that is no longer safe, because a fact of the part was corrected, falls back to the cheapest that is.
-    method: stripMethod && methodRefusal(part, stripMethod) === null ? stripMethod : null,
-    rounds: round,
-    rates: book.ratesAt(openedAt),
+    method: isAllowed ? stripMethod : null,
+    rounds: row.round,
+    rates: book.ratesAt(row.openedAt),
     // Once it is closed its own minutes are recorded; correcting it by a record that it is part of would be a circle.
-    minutesCorrection: isClosed ? NO_CORRECTIONS : book.correctionsOf(classSlug),
+    minutesCorrection: isClosed ? NO_CORRECTIONS : book.correctionsOf(row.classSlug),
     recorded: isClosed && minutes !== null ? { minutes } : null,
   };
 }
 
-/** Minutes ticked on the case's cards, all rounds. Null when no step was ever ticked. */
-function spentMinutes(db: Handle, shopId: number, caseId: number): number | null {
-  const row = db
-    .select({ minutes: sql<number | null>`sum(${reworkSteps.spentMinutes})` })
-    .from(reworkSteps)
-    .innerJoin(reworkCards, and(eq(reworkCards.shopId, reworkSteps.shopId), eq(reworkCards.id, reworkSteps.cardId)))
-    .where(and(eq(reworkCards.shopId, shopId), eq(reworkCards.caseId, caseId), isNotNull(reworkSteps.tickedAt)))
-    .get();
-  return row?.minutes ?? null;
+/** Minutes ticked on the cards of some cases, all rounds, by case. One whose steps were never ticked is left out. */
+function spentMinutes(db: Handle, of: SQL | undefined): Map<number, number> {
+  const rows = db
+    .select({ caseId: reworkCards.caseId, minutes: sql<number | null>`sum(${reworkSteps.spentMinutes})` })
+    .from(reworkCards)
+    .innerJoin(reworkSteps, and(eq(reworkSteps.shopId, reworkCards.shopId), eq(reworkSteps.cardId, reworkCards.id)))
+    .where(and(of, isNotNull(reworkSteps.tickedAt)))
+    .groupBy(reworkCards.caseId)
+    .all();
+  return new Map(rows.flatMap(({ caseId, minutes }) => (minutes === null ? [] : [[caseId, minutes]])));
 }
 
 export type CaseFigure = Pick<
@@ -120,20 +169,4 @@ export function getCaseMoney(db: Handle, shopId: number, caseId: number): CaseMo
     rates: { validFromAt: facts.rates.validFromAt, source: facts.rates.source },
     assumed,
   };
-}
-
-/** Minutes planned against minutes taken of every done card, for the estimate's own record. Oldest first. */
-export function listCardMinutes(db: Handle, shopId: number) {
-  return db
-    .select({
-      cardId: reworkCards.id,
-      plannedMinutes: sql<number>`sum(${reworkSteps.plannedMinutes})`,
-      spentMinutes: sql<number>`sum(${reworkSteps.spentMinutes})`,
-    })
-    .from(reworkCards)
-    .innerJoin(reworkSteps, and(eq(reworkSteps.shopId, reworkCards.shopId), eq(reworkSteps.cardId, reworkCards.id)))
-    .where(and(eq(reworkCards.shopId, shopId), isNotNull(reworkCards.doneAt)))
-    .groupBy(reworkCards.id)
-    .orderBy(asc(reworkCards.id))
-    .all();
 }

@@ -8,10 +8,10 @@ import type { Handle } from "../open";
 import { caseCosts, cases } from "../schema";
 
 /** How many closed cases the record goes back: a shop's practice changes, and no price waits for a scan of ten years. */
-export const RECORD_CASES = 1000;
+export const RECORD_CASES = 400;
 
 /**
- * Estimate against recorded, hands-on minutes, of the newest thousand cases that closed as sound; the newest first. The
+ * Estimate against recorded, hands-on minutes, of the newest 400 cases that closed as sound; the newest first. The
  * estimate is the last one before the case closed, with the correction that was in it divided out: a correction that was
  * learnt from the record must not be learnt from again.
  */
