@@ -17,8 +17,10 @@ import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
 import { EyeThisMonth } from "./today/eye-this-month";
 import { HeldByMe } from "./today/held-by-me";
+import { countPractice } from "./today/count-practice";
 import { LineChecks } from "./today/line-checks";
 import { MoneyThisMonth } from "./today/money-this-month";
+import { PracticeDue } from "./today/practice-due";
 import { CardsToDo } from "./today/cards-to-do";
 import { WaitsForSecondLook } from "./today/waits-for-second-look";
 
@@ -31,7 +33,8 @@ export default async function TodayPage() {
   const now = Date.now();
   const waiting = countWaiting(db, member.shopId);
   const isNew = !hasCases(db, member.shopId);
-  const main = mainAction(member);
+  const practice = member.roles.includes("trainee") ? countPractice(member, now) : null;
+  const main = mainAction(member, practice);
   const { actor, counts, stations } = shellFor(member);
   const works = can(member, "card.work") && !isOwnerOnly(member);
   return (
@@ -67,6 +70,7 @@ export default async function TodayPage() {
         {can(member, "case.confirm") && <WaitsForSecondLook member={member} now={now} />}
         {works && <CardsToDo member={member} />}
         {can(member, "ledger.see") && <MoneyThisMonth member={member} now={now} />}
+        {practice && <PracticeDue {...practice} />}
         {can(member, "case.snap") && !isOwnerOnly(member) && <HeldByMe member={member} now={now} />}
         <LineChecks member={member} now={now} />
         {!can(member, "case.confirm") && <EyeThisMonth member={member} now={now} />}
@@ -84,13 +88,19 @@ export default async function TodayPage() {
 
 const isOwnerOnly = (member: SignedIn) => member.roles.every((role) => role === "owner");
 
-/** One main action a role: a senior's queue comes before all else, then the snap; an owner opens the ledger. */
-function mainAction(member: SignedIn): MainAction {
+/**
+ * One main action a role: a senior's queue comes before all else, then the snap; an owner opens the ledger, and a trainee
+ * practises while something is set or due.
+ */
+function mainAction(member: SignedIn, practice: ReturnType<typeof countPractice> | null): MainAction {
   const first = member.roles.includes("senior")
     ? listQueue(getDb(), member.shopId, { stationId: null, limit: 1 })[0]
     : null;
   if (first) return { label: "Take the second look", href: routes.secondLook(first.ref), glyph: "ui-eye", keyCap: "N" };
   if (isOwnerOnly(member)) return { label: "Open the ledger", href: routes.ledger(), glyph: "ui-money", keyCap: "N" };
+  const isTraineeOnly = member.roles.every((role) => role === "trainee");
+  if (isTraineeOnly && practice && practice.due + practice.drills > 0)
+    return { label: "Practise", href: routes.practice(), glyph: "station-inspect", keyCap: "N" };
   return { label: "Snap a suspect part", href: routes.snap(), glyph: "ui-camera", keyCap: "N" };
 }
 

@@ -21,13 +21,13 @@ function mixUpsOf({ table }: ConfusionTable): MixUp[] {
     .toSorted((a, b) => b.times - a.times);
 }
 
-/** Their calls against what was confirmed: as sentences on a phone, as a table from a tablet up. */
+/** Their calls against what was confirmed: as sentences on a phone, as a table on a tablet, as both where there is room. */
 export function ConfusionMatrix(props: ConfusionMatrixProps) {
   return (
-    <>
-      <MixUps {...props} />
+    <div className="confusion">
       <Matrix {...props} />
-    </>
+      <MixUps {...props} />
+    </div>
   );
 }
 

@@ -8,6 +8,7 @@ export function listTellableClasses(db: Handle, shopId: number) {
     .select({
       slug: libraryClasses.slug,
       title: libraryClasses.title,
+      short: libraryClasses.short,
       atStrike: libraryClasses.atStrike,
       tells: libraryClasses.tells,
     })

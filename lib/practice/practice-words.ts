@@ -50,3 +50,16 @@ export function waitingWords(due: number, fresh: number): string {
 const SMALL = ["no", "one", "two", "three", "four", "five", "six", "seven", "eight", "nine", "ten"];
 const countWords = (count: number) => SMALL[count] ?? String(count);
 const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
+
+/** What practice has for a person today, in one line: a set drill first, then what is due, then what is new. Null: nothing. */
+export function practiseWords({ due, fresh, drills }: { due: number; fresh: number; drills: number }): string | null {
+  const set = drills > 0 ? `${drills === 1 ? "1 drill is" : `${drills} drills are`} set for you` : null;
+  const waits =
+    due > 0
+      ? `${due} ${due === 1 ? "photo is" : "photos are"} due`
+      : fresh > 0
+        ? `${fresh} new ${fresh === 1 ? "photo" : "photos"}`
+        : null;
+  const words = [set, waits].filter(Boolean).join(", ");
+  return words === "" ? null : `Practise: ${words}`;
+}

@@ -5,6 +5,12 @@ import { SCREENS } from "./pages";
 
 type Refs = Record<"held" | "card" | "closed", string>;
 
+/** A question put to whoever is signed in: each person has their own. */
+async function askQuestion(page: Page): Promise<string> {
+  const answer = await page.request.post("/api/practice/questions", { data: {} });
+  return ((await answer.json()) as { id: string }).id;
+}
+
 /** A reference in each state, asked of the app itself. */
 async function findRefs(browser: Browser): Promise<Refs> {
   const context = await browser.newContext();
@@ -46,7 +52,9 @@ for (const person of people) {
       watchConsole(page);
       if (person) await signIn(page, person satisfies Person);
       for (const screen of SCREENS.filter((each) => each.as === person)) {
-        const path = pathWith(screen.path, refs);
+        const path = screen.path.includes("{question}")
+          ? screen.path.replace("{question}", await askQuestion(page))
+          : pathWith(screen.path, refs);
         await page.goto(path);
         await expect(page.locator("h1").first()).toBeVisible();
         const sideways = await page.evaluate(

@@ -86,7 +86,7 @@ const request = (pathName: string, method = "GET", body?: unknown) =>
     headers: body === undefined ? undefined : { "content-type": "application/json" },
     body: body === undefined ? undefined : JSON.stringify(body),
   });
-const params = (values: Record<string, string>) => ({ params: Promise.resolve(values) });
+const params = <Values extends Record<string, string>>(values: Values) => ({ params: Promise.resolve(values) });
 
 async function ask(): Promise<{ id: string; text: string; headers: string }> {
   const response = await askRoute.POST(request("/api/practice/questions", "POST", {}), params({}));

@@ -13,6 +13,11 @@ import * as confirmationRoute from "@/app/api/cases/[ref]/confirmation/route";
 import * as outcomeRoute from "@/app/api/cases/[ref]/outcome/route";
 import * as caseRoute from "@/app/api/cases/[ref]/route";
 import * as casesRoute from "@/app/api/cases/route";
+import * as practiceActions from "@/app/(shop)/practice/actions";
+import * as practiceAnswerRoute from "@/app/api/practice/questions/[id]/answer/route";
+import * as practicePhotoRoute from "@/app/api/practice/questions/[id]/photo/route";
+import * as practiceQuestionRoute from "@/app/api/practice/questions/[id]/route";
+import * as practiceQuestionsRoute from "@/app/api/practice/questions/route";
 import * as inspectRoute from "@/app/api/estimates/inspect/route";
 import * as plateRoute from "@/app/api/estimates/plate/route";
 import * as stripRoute from "@/app/api/estimates/strip/route";
@@ -38,8 +43,10 @@ import {
   confirmedCase,
   heldCase,
   loosePhoto,
+  openQuestion,
   pendingInvite,
   readyPhoto,
+  setDrillFor,
   stepsOf,
   tickedCase,
   type Aim,
@@ -211,6 +218,81 @@ export const ENTRIES: readonly Entry[] = [
     prepare: (aim) => {
       const jobId = closedJob(aim);
       return () => ending(jobActions.reopenJob, { jobId });
+    },
+  },
+
+  {
+    name: "app/(shop)/practice/actions.ts askForPhoto",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const drillId = setDrillFor(aim);
+      return () => ending(practiceActions.askForPhoto, { drillId });
+    },
+  },
+  {
+    name: "app/(shop)/practice/actions.ts callPhoto",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const id = openQuestion(aim, UPLOADS);
+      return () => ending(practiceActions.callPhoto, { id, calledClass: "dewetting", sure: 2 });
+    },
+  },
+  {
+    name: "app/(shop)/practice/actions.ts setDrill",
+    permission: "drill.set",
+    aims: "row",
+    prepare: (aim) => {
+      readyPhoto(aim, UPLOADS);
+      const memberIds = [aim.shop.members.trainee.memberId];
+      return () => ending(practiceActions.setDrill, { title: "Peeling", photoCount: 1, memberIds });
+    },
+  },
+  {
+    name: "app/(shop)/practice/actions.ts withdrawDrill",
+    permission: "drill.set",
+    aims: "row",
+    prepare: (aim) => {
+      const drillId = setDrillFor(aim);
+      return () => ending(practiceActions.withdrawDrill, { drillId });
+    },
+  },
+  {
+    name: "app/api/practice/questions/route.ts POST",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const drillId = setDrillFor(aim);
+      return () => answered(practiceQuestionsRoute.POST, "POST", "/api/practice/questions", {}, { drillId });
+    },
+  },
+  {
+    name: "app/api/practice/questions/[id]/route.ts GET",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const id = openQuestion(aim, UPLOADS);
+      return () => answered(practiceQuestionRoute.GET, "GET", `/api/practice/questions/${id}`, { id });
+    },
+  },
+  {
+    name: "app/api/practice/questions/[id]/answer/route.ts POST",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const id = openQuestion(aim, UPLOADS);
+      const body = { calledClass: "dewetting", sure: 2 };
+      return () => answered(practiceAnswerRoute.POST, "POST", `/api/practice/questions/${id}/answer`, { id }, body);
+    },
+  },
+  {
+    name: "app/api/practice/questions/[id]/photo/route.ts GET",
+    permission: "practice.do",
+    aims: "row",
+    prepare: (aim) => {
+      const id = openQuestion(aim, UPLOADS);
+      return () => answered(practicePhotoRoute.GET, "GET", `/api/practice/questions/${id}/photo?size=thumb`, { id });
     },
   },
 

@@ -1,8 +1,10 @@
-import { randomUUID } from "node:crypto";
+import { randomBytes, randomUUID } from "node:crypto";
 import fs from "node:fs";
 import path from "node:path";
 import { and, asc, eq } from "drizzle-orm";
 import { recordOutcome, tickStep } from "@/db/changes/do-rework";
+import { putQuestion } from "@/db/changes/practice-call";
+import { setDrill } from "@/db/changes/practice-drill";
 import type { Db } from "@/db/open";
 import { requireCase } from "@/db/queries/cases";
 import type { SignedIn } from "@/db/queries/crew";
@@ -10,7 +12,11 @@ import { insertInvite } from "@/db/queries/invites";
 import { invites, photos, photoSizes, reworkCards, reworkSteps, workOrders } from "@/db/schema";
 import { photoPath } from "@/lib/photos/photo-path";
 import { TEST_NOW } from "@/tests/fixtures/crew-factory";
+import { confirmedPhoto, keepPhotoFiles } from "@/tests/fixtures/practice-photos";
 import { confirmFor, makeCase, type TestShop } from "@/tests/fixtures/shop-factory";
+
+/** One copper pixel as lossless WebP, so that a photo can really be encoded anew. */
+const TINY_WEBP = Buffer.from("UklGRh4AAABXRUJQVlA4TBEAAAAvAAAAAAfQueJ2pv+BiOh/AAA=", "base64");
 
 /** Rows for a call to aim at: in a shop, made by a member of it. */
 export interface Aim {
@@ -77,6 +83,30 @@ export function readyPhoto(aim: Aim, uploads: string) {
     })
     .run();
   return { ...confirmed, photoId };
+}
+
+/** A drill of one photo, set for the person that the call aims at. */
+export function setDrillFor(aim: Aim): number {
+  const { db, shop, by } = aim;
+  confirmedPhoto(db, shop, { by: shop.members.otherPlater });
+  return setDrill(
+    db,
+    { shopId: shop.shopId, memberId: shop.members.senior.memberId, now: TEST_NOW },
+    { title: "Underactivation", classSlugs: ["underactivation"], photoCount: 1, memberIds: [by.memberId], dueAt: null },
+  );
+}
+
+/** A practice question that was put to the person that the call aims at; its photo can be sent. */
+export function openQuestion({ db, shop, by }: Aim, uploads: string): string {
+  const { photoId, id: caseId } = confirmedPhoto(db, shop, { by: shop.members.otherPlater });
+  keepPhotoFiles(db, shop, photoId, uploads, TINY_WEBP);
+  const id = randomBytes(16).toString("base64url");
+  putQuestion(
+    db,
+    { shopId: shop.shopId, memberId: by.memberId, now: TEST_NOW },
+    { id, photoId, caseId, drillId: null },
+  );
+  return id;
 }
 
 /** A photo that no case holds yet. */

@@ -32,10 +32,12 @@ export default async function ProgressPage({ searchParams }: { searchParams: Pro
       <Lead size="page" above={isSelf ? "Your eye in practice" : `${person.name} in practice`}>
         {calls === 0 ? "Nothing was called yet" : `${right} of ${calls} photos called right`}
       </Lead>
-      <div className="today">
-        <ScoreSection progress={progress} />
+      <div className="practice-progress">
+        <div>
+          <ScoreSection progress={progress} />
+          <ComingBackSection progress={progress} />
+        </div>
         <CalibrationSection progress={progress} />
-        <ComingBackSection progress={progress} />
       </div>
       <MixUpSection progress={progress} />
       {reach(member.roles, "agreement.see") === "any" && <People shown={person.memberId} shopId={member.shopId} />}

@@ -25,11 +25,11 @@ export function ScoreSection({ progress: { score, again, kappa } }: { progress: 
   }
   const rows = [
     {
-      label: "Right at the first call",
+      label: "Right at first call",
       value: `${score.right} of ${score.calls}, ${percent(score.interval.low)} to ${percent(score.interval.high)}`,
     },
     {
-      label: "Agreement beyond chance (kappa)",
+      label: "Agreement (kappa)",
       value: kappa.defined
         ? `${kappa.kappa.toFixed(2)} ± ${kappa.standardError.toFixed(2)}, ${kappa.word}`
         : "one class only: says nothing",
@@ -40,7 +40,7 @@ export function ScoreSection({ progress: { score, again, kappa } }: { progress: 
   return (
     <Section
       title="Score"
-      rests="First call on each photo against the class confirmed then. Range: 95% by Wilson. Kappa by Cohen with its standard error; its word by Landis and Koch 1977."
+      rests="First call on each photo against the class confirmed then. Range: 95% by Wilson. Kappa: agreement beyond chance, by Cohen, with its standard error; the word for it by Landis and Koch 1977."
     >
       <Slip rows={rows} />
     </Section>

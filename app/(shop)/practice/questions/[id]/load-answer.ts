@@ -53,7 +53,8 @@ function tellsOf(shelf: readonly TellableClass[], confirmed: string, other: stri
   if (both.length > 0) return both;
   return [confirmed, other].flatMap((slug) => {
     const from = slug === null ? undefined : entry(slug);
-    return from ? [{ slug: from.slug, title: from.title, words: from.atStrike }] : [];
+    // The whole of what it looks like for the class that it is, a line for the other.
+    return from ? [{ slug: from.slug, title: from.title, words: slug === confirmed ? from.atStrike : from.short }] : [];
   });
 }
 
@@ -62,7 +63,11 @@ function pairOf(db: Db, shopId: number, view: AnsweredQuestion, other: string | 
   const exemplar = other === null ? undefined : listExemplars(db, shopId, [other])[0];
   if (!exemplar || other === null) return { pair: [], otherRef: null };
   const pair: TellPhoto[] = [
-    { src: view.photo.view, caption: `This part: ${named(view.confirmed).title.toLowerCase()}`, isRendered: false },
+    {
+      src: view.photo.view,
+      caption: `This part: ${named(view.confirmed).title.toLowerCase()}`,
+      isRendered: view.isRendered,
+    },
     {
       src: routes.photo(exemplar.photoId, "view"),
       caption: named(other).title,
@@ -97,5 +102,5 @@ function recordWords(
   const { mixed, asked } = pairRecord(listAnswers(db, member.shopId, member.memberId), view.confirmed, other);
   if (mixed === 0) return back;
   const pair = `${named(view.confirmed).title.toLowerCase()} and ${named(other).title.toLowerCase()}`;
-  return `You have mixed ${pair} ${mixed} ${mixed === 1 ? "time" : "times"} out of ${asked}. ${back}`;
+  return `You have mixed ${pair} ${mixed === 1 ? "once" : `${mixed} times`} out of ${asked}. ${back}`;
 }
