@@ -7,7 +7,7 @@ import type { StripReckoning } from "@/lib/costs/reckon-strip";
 import { sectionScale } from "@/lib/costs/section-scale";
 import type { RatesWords } from "@/lib/costs/strip-basis";
 import { STRIP_METHOD_TITLES } from "@/lib/costs/strip-methods";
-import { answerWords, figureWords, massWords, metalTitle, roundMoney } from "@/lib/costs/strip-words";
+import { answerWords, figureWords, massWords, metalTitle, roundMoney, takingOffWords } from "@/lib/costs/strip-words";
 
 export interface StripSheetProps {
   /** shop: with every figure. customer: what is on the parts, the ways, steps and cautions, and no money at all. */
@@ -41,9 +41,7 @@ export function StripSheet(props: StripSheetProps) {
           {props.printedOn}
         </p>
       </header>
-      <h2>
-        {isShop ? answerWords(reckoning, ratesWords.currency) : `${STRIP_METHOD_TITLES[chosen.method]} takes it off.`}
-      </h2>
+      <h2>{isShop ? answerWords(reckoning, ratesWords.currency) : takingOffWords(reckoning)}</h2>
       <Facts {...props} />
       <div className="strip-sheet__cols">
         <Cut reckoning={reckoning} />
@@ -128,7 +126,7 @@ function Foot({ for: reader, ratesWords, correction, reckoning }: StripSheetProp
   return (
     <footer className="strip-sheet__foot">
       <p>
-        <b>Estimate, not an offer.</b>{" "}
+        <b>{reader === "shop" ? "Estimate, not an offer." : "How the work would be done, not an offer."}</b>{" "}
         {reader === "shop" && (
           <>
             Ranges hold nine times out of ten. Rates of {ratesWords.from} ({ratesWords.source}). Minutes: {correction}.{" "}

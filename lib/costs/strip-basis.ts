@@ -2,7 +2,6 @@ import type { Correction } from "@/lib/costs/correction";
 import { HARDNESS } from "@/lib/costs/hardness";
 import type { ThreePoint } from "@/lib/costs/pert";
 import { RATE_FIELDS, rateWords, type RateField } from "@/lib/costs/rate-fields";
-import type { ShopRates } from "@/lib/costs/rates";
 import type { StripReckoning } from "@/lib/costs/reckon-strip";
 import { USUAL_REWORK_TIMES } from "@/lib/costs/rework-times";
 import { STARTING_RATES_SOURCE } from "@/lib/costs/starting-rates";
@@ -38,9 +37,9 @@ export interface RatesWords {
   currency: string;
 }
 
-/** The figures behind the way that is shown: baths and rates of each layer, polishing, times, and the shop's own rates. */
-export function basisRows({ chosen, rates }: StripReckoning, words: RatesWords): BasisRow[] {
-  const rows = [...chosen.steps.flatMap(stepRows), timesRow(), ...rateRows(chosen.steps, rates, words)];
+/** The trade's figures behind the way that is shown: baths and rates of each layer, polishing, times. */
+export function basisRows({ chosen }: StripReckoning): BasisRow[] {
+  const rows = [...chosen.steps.flatMap(stepRows), timesRow()];
   const seen = new Set<string>();
   return rows.filter((row) => !seen.has(row.figure + row.value) && seen.add(row.figure + row.value));
 }
@@ -71,8 +70,9 @@ function timesRow(): BasisRow {
   return row("Set-up, handling, line, scrap", "Minutes and shares of a small job shop", USUAL_REWORK_TIMES.source);
 }
 
-function rateRows(steps: readonly StripStep[], rates: ShopRates, words: RatesWords): BasisRow[] {
-  const metals = new Set(steps.map((step) => step.layer.metal));
+/** The shop's rates behind it: time, solution, waste, and the metals that are on the part. */
+export function rateRows({ chosen, rates }: StripReckoning, words: RatesWords): BasisRow[] {
+  const metals = new Set(chosen.steps.map((step) => step.layer.metal));
   const isMemory = words.source === STARTING_RATES_SOURCE;
   const from = isMemory
     ? `${words.source.charAt(0).toUpperCase()}${words.source.slice(1)}`

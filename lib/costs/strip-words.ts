@@ -73,6 +73,13 @@ export function answerWords({ batch, chosen, beside }: StripReckoning, currency:
   return `${first} At the strike ${it} ${isOne ? "costs" : "cost"} ${other}.`;
 }
 
+/** What the work is, without a figure: "Taking gold, nickel and copper off 12 parts." */
+export function takingOffWords({ batch, chosen }: StripReckoning): string {
+  const names = [...new Set(chosen.steps.map((step) => metalOf(step.layer.metal).name))];
+  const list = names.length > 1 ? `${names.slice(0, -1).join(", ")} and ${names.at(-1)}` : names.join("");
+  return `Taking ${list} off ${batch.quantity === 1 ? "1 part" : `${batch.quantity.toLocaleString("en-US")} parts`}.`;
+}
+
 const thousands = (digits: string) => Number(digits).toLocaleString("en-US");
 
 const FRACTIONS = [

@@ -6,7 +6,7 @@ import { reckonStrip, scaleEndCents, type StripShop } from "@/lib/costs/reckon-s
 import type { StripBatch } from "@/lib/costs/read-strip";
 import { sectionScale } from "@/lib/costs/section-scale";
 import { STARTING_RATES } from "@/lib/costs/starting-rates";
-import { basisRows, sourceKind } from "@/lib/costs/strip-basis";
+import { basisRows, rateRows, sourceKind } from "@/lib/costs/strip-basis";
 import { SHIPPED_STRIP_TABLE } from "@/lib/costs/strip-plan";
 import {
   answerWords,
@@ -15,6 +15,7 @@ import {
   minutesWords,
   priceShareWords,
   refusalWords,
+  takingOffWords,
 } from "@/lib/costs/strip-words";
 
 const shop: StripShop = { rates: STARTING_RATES, table: SHIPPED_STRIP_TABLE, corrections: NO_CORRECTIONS };
@@ -76,14 +77,15 @@ describe("the ways side by side", () => {
     expect(offered.every((way) => Number.isSafeInteger(way.estimate.meanCents))).toBe(true);
   });
 
-  it("names a figure for every step, and every figure has a source", () => {
-    const rows = basisRows(reckonStrip(shells, shop), { from: "1 Jun 2026", source: "invoices", currency: "USD" });
-    expect(rows.map((row) => row.figure)).toEqual(expect.arrayContaining(["Gold off", "Nickel off", "Labour"]));
+  it("names a figure for every step and the rates of the metals on the part, each with its source", () => {
+    const reckoning = reckonStrip(shells, shop);
+    const rows = basisRows(reckoning);
+    expect(rows.map((row) => row.figure)).toEqual(expect.arrayContaining(["Gold off", "Nickel off", "Polishing"]));
     expect(rows.every((row) => row.from.length > 3)).toBe(true);
-    expect(rows.find((row) => row.figure === "Labour")).toMatchObject({
-      value: "$52.00 / h",
-      from: "Shop's rate, 1 Jun 2026",
-    });
+    const rates = rateRows(reckoning, { from: "1 Jun 2026", source: "invoices", currency: "USD" });
+    expect(rates[0]).toEqual({ figure: "Labour", value: "$52.00 / h", from: "Shop's rate, 1 Jun 2026", kind: "shop" });
+    expect(rates.map((row) => row.figure)).toContain("Gold, price");
+    expect(rates.map((row) => row.figure)).not.toContain("Rhodium, price");
   });
 });
 
@@ -138,6 +140,10 @@ describe("words", () => {
     expect(answerWords(reckonStrip({ ...shells, quantity: 1, stageFound: "returned" }, shop), "USD")).toMatch(
       /^Sent back, this part costs about/,
     );
+  });
+
+  it("tell a customer what the work is without a figure of money", () => {
+    expect(takingOffWords(reckonStrip(shells, shop))).toBe("Taking gold, nickel and copper off 12 parts.");
   });
 
   it("say what a small price is of a great one", () => {

@@ -58,8 +58,8 @@ export default async function StripPage({ searchParams }: StripPageProps) {
       }
     >
       <StripEstimator
-        // Another batch to start from is another estimator: its fields begin anew.
-        key={JSON.stringify([origin?.key, start])}
+        // Another batch to start from is another estimator: its fields begin anew. Putting a way on the case is not.
+        key={JSON.stringify([origin?.key, { ...start, way: "" }])}
         start={start}
         origin={origin}
         originFault={fault}
