@@ -154,8 +154,8 @@ export const changeJobInput = z
   .object({ jobId, baseMetal: baseMetal.optional(), alloy, ...costFacts })
   .transform(({ jobId: id, baseMetal: metal, alloy: typedAlloy, ...typed }, context) => ({
     jobId: id,
-    /** Undefined: the form did not ask. */
-    metal: metal && { baseMetal: metal, alloy: typedAlloy || null },
+    // A form that does not ask leaves the metal as it is.
+    ...(metal ? { metal: { baseMetal: metal, alloy: typedAlloy || null } } : {}),
     ...costFactsFrom(typed, context),
   }));
 export type ChangeJob = z.output<typeof changeJobInput>;

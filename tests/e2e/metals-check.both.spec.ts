@@ -67,7 +67,7 @@ test("a plater finds at the balance that a brass job is zinc; the job and its ca
   });
 
   await test.step("the address brings the whole check back", async () => {
-    await expect(plater).toHaveURL(/air=48%2C6&water=41\.3/);
+    await expect(plater).toHaveURL(/air=48%2C6&water=41\.3.*colour=blue-grey/);
     await plater.reload();
     await expect(plater.getByRole("heading", { level: 1 })).toHaveText(
       "It weighs like zinc die cast. The job says brass.",

@@ -148,6 +148,18 @@ describe("keeping a job right", () => {
     });
   });
 
+  it("puts right what its parts are made of, says so in the trail, and leaves it where the form did not ask", () => {
+    const metal = { baseMetal: "zinc" as const, alloy: "Alloy 3" };
+    changeJob(db, shop.members.senior, { jobId: shop.jobId, ...change, metal }, TEST_NOW);
+    expect(getJob(db, shop.shopId, shop.jobId)).toMatchObject(metal);
+    const [entry] = listAudit(db, shop.shopId, { limit: 1 }).entries;
+    expect(entry?.detail).toMatchObject({
+      changed: expect.arrayContaining(["base metal from brass C360 to zinc die cast Alloy 3"]) as unknown,
+    });
+    changeJob(db, shop.members.senior, { jobId: shop.jobId, ...change, quantity: 61 }, TEST_NOW);
+    expect(getJob(db, shop.shopId, shop.jobId)).toMatchObject(metal);
+  });
+
   it("keeps the value where the form did not ask for it", () => {
     changeJob(db, shop.members.senior, { jobId: shop.jobId, ...change, partValueCents: undefined }, TEST_NOW);
     expect(getJob(db, shop.shopId, shop.jobId)?.partValueCents).toBe(4200);

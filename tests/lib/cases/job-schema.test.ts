@@ -93,7 +93,13 @@ describe("opening a job", () => {
 describe("changing a job", () => {
   it("takes no new number or customer", () => {
     const input = changeJobInput.parse(formOf({ ...TYPED, jobId: "7" }));
-    expect(Object.keys(input).toSorted()).toEqual(["areaDm2", "finalStack", "jobId", "partValueCents", "quantity"]);
+    const figures = ["areaDm2", "finalStack", "jobId", "metal", "partValueCents", "quantity"];
+    expect(Object.keys(input).toSorted()).toEqual(figures);
+  });
+
+  it("leaves the metal alone where the form does not ask for it", () => {
+    const { baseMetal: _, ...without } = TYPED;
+    expect(changeJobInput.parse(formOf({ ...without, jobId: "7" }))).not.toHaveProperty("metal");
   });
 
   it("says in words what differs, and nothing of what does not", () => {
