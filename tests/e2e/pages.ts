@@ -6,7 +6,7 @@ export interface Screen {
   as: Person | null;
 }
 
-/** `{held}`, `{card}` and `{closed}` stand for the reference of a case in that state. */
+/** `{held}`, `{card}` and `{closed}` stand for the reference of a case in that state; `{question}` for a practice question. */
 export const SCREENS: readonly Screen[] = [
   { path: "/gallery", as: null },
   { path: "/sign-in", as: null },
@@ -40,6 +40,11 @@ export const SCREENS: readonly Screen[] = [
   { path: "/library/metals", as: "trainee" },
   { path: "/library/metals/steel", as: "plater" },
   { path: "/library/metals/aluminium", as: "trainee" },
+  { path: "/practice", as: "trainee" },
+  { path: "/practice/questions/{question}", as: "trainee" },
+  { path: "/practice/progress", as: "trainee" },
+  { path: "/practice/progress", as: "senior" },
+  { path: "/practice/drills", as: "senior" },
   { path: "/costs", as: "owner" },
   { path: "/costs/rates", as: "owner" },
   { path: "/costs/strip", as: "owner" },
