@@ -1,6 +1,6 @@
 import { Range } from "@/components/ui/range";
 import { SURENESS_TITLES } from "@/lib/cases/case-words";
-import { notchWords, type NotchRecord } from "@/lib/practice/progress";
+import { LEAST_CALLS, notchWords, type NotchRecord } from "@/lib/practice/progress";
 
 const percent = (share: number) => `${Math.round(share * 100)}%`;
 
@@ -12,10 +12,10 @@ export function CalibrationLines({ notches }: { notches: readonly NotchRecord[] 
         <li key={notch.sure}>
           <p>
             <b>{SURENESS_TITLES[notch.sure]}</b>
-            <span className="small mid">{notch.calls > 0 ? `${notch.right} of ${notch.calls} right` : "no call"}</span>
+            <span className="small mid">{notch.calls > 0 && `${notch.right} of ${notch.calls} right`}</span>
             <span className="small">{notchWords(notch)}</span>
           </p>
-          {notch.calls > 0 && (
+          {notch.calls >= LEAST_CALLS && (
             <Range
               low={notch.interval.low}
               likely={notch.right / notch.calls}

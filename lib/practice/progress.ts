@@ -118,8 +118,7 @@ export function calibrationOf(
 
 /** In words, how a notch stands: does it promise more than it keeps? Says so only where the interval is clear of it. */
 export function notchWords({ stated, calls, interval }: NotchRecord): string {
-  if (calls === 0) return "Not used yet";
+  if (calls < LEAST_CALLS) return `Not enough yet: ${calls} of ${LEAST_CALLS}`;
   if (interval.high < stated) return "Surer than right";
-  if (interval.low > stated) return "Righter than sure";
-  return calls < LEAST_CALLS ? "Too few to say" : "Sure as right";
+  return interval.low > stated ? "Righter than sure" : "Sure as right";
 }

@@ -130,7 +130,7 @@ describe("how sure against how right", () => {
       [3, 10, 5],
     ]);
     expect(brier.enough && brier.score).toBeCloseTo(0.3475, 10);
-    expect(notches.map(notchWords)).toEqual(["Sure as right", "Not used yet", "Surer than right"]);
+    expect(notches.map(notchWords)).toEqual(["Sure as right", "Not enough yet: 0 of 8", "Surer than right"]);
   });
 
   it("has no score without calls", () => {
