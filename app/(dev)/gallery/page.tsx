@@ -6,11 +6,13 @@ import type { MainAction } from "@/components/shell/main-action";
 import { ShopShell } from "@/components/shell/shop-shell";
 import { Lead } from "@/components/ui/lead";
 import { Section } from "@/components/ui/section";
+import { CheckShelf } from "./check-shelf";
 import { ButtonShelf, FieldShelf } from "./control-shelf";
 import { FigureShelf, TableShelf } from "./figure-shelf";
 import { ACTOR, STATIONS } from "./fixtures";
 import { GlyphShelf } from "./glyph-shelf";
 import { NotThereShelf } from "./not-there-shelf";
+import { PracticeShelf } from "./practice-shelf";
 import { RouteShelf } from "./route-shelf";
 import { TagCards, TagForms, TagLists } from "./tag-shelf";
 import { StripShelf } from "./strip-shelf";
@@ -62,6 +64,8 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <WorthShelf />
       <TestPieceShelf />
       <RouteShelf />
+      <CheckShelf />
+      <PracticeShelf />
       <StripShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">
