@@ -62,7 +62,7 @@ function bathRows(bath: DissolvingRow, title: string): BasisRow[] {
   return [
     row(`${title} off`, bath.solution, bath.source),
     row(`${title}, rate`, bath.current ? `${rate} at ${bath.current}` : rate, bath.rateSource),
-    row(`${title}, a litre holds`, `${between(bath.holdingGPerL)} g`, "from memory"),
+    row(`${title}, a litre holds`, `${between(bath.holdingGPerL)} g`, bath.holdingSource ?? "from memory"),
   ];
 }
 
