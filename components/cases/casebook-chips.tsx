@@ -14,6 +14,8 @@ const BEFORE: Partial<Record<FilterName, string>> = {
   station: "Began at ",
   by: "Snapped by ",
   customer: "For ",
+  openedFrom: "Opened from ",
+  openedTo: "Opened by ",
   closedFrom: "Closed from ",
   closedTo: "Closed by ",
 };

@@ -18,6 +18,8 @@ const METALS = BASE_METALS.map((value) => ({ value, label: BASE_METAL_TITLES[val
 const STAGES = STAGES_FOUND.map((value) => ({ value, label: STAGE_TITLES[value] }));
 const STANDINGS = CASE_STANDINGS.map((value) => ({ value, label: capital(STANDING_WORDS[value]) }));
 
+const EXEMPLARS = [{ value: "only", label: "Exemplars only" }];
+
 /** Every filter as a field, folded away until somebody changes the sentence. */
 export function CasebookFilters({ query, choices }: CasebookFiltersProps) {
   const classes = choices.classes.map((each) => ({ value: each.slug, label: each.title }));
@@ -51,6 +53,13 @@ export function CasebookFilters({ query, choices }: CasebookFiltersProps) {
         {choose("stage", "Found", "At any stage", STAGES)}
         {choose("customer", "Customer", "Any customer", customers)}
         {choose("by", "Snapped by", "Anybody", members)}
+        {choose("exemplars", "Photos", "With or without exemplar", EXEMPLARS)}
+        <Place name="openedFrom">
+          <Field label="Opened from" name="openedFrom" type="date" defaultValue={query.openedFrom} />
+        </Place>
+        <Place name="openedTo">
+          <Field label="Opened by" name="openedTo" type="date" defaultValue={query.openedTo} />
+        </Place>
         <Place name="closedFrom">
           <Field label="Closed from" name="closedFrom" type="date" defaultValue={query.closedFrom} />
         </Place>

@@ -10,17 +10,20 @@ import { routes } from "@/lib/routes";
 interface CasebookFormProps {
   query: CasebookQuery;
   choices: CasebookChoices;
+  /** Cases that lie in the tray: a new search keeps them. */
+  beside?: readonly string[];
   /** Under the search field: how its words were read. */
   reading?: ReactNode;
 }
 
 /** Search and filters: an ordinary form that asks for a page, with script or without. */
-export function CasebookForm({ query, choices, reading }: CasebookFormProps) {
+export function CasebookForm({ query, choices, beside = [], reading }: CasebookFormProps) {
   return (
     // The key: a link that drops a filter must also empty its field.
     <Form action={routes.casebook()} prefetch={false} className="cb-form" key={JSON.stringify(query)} role="search">
       {query.view && <input type="hidden" name="view" value={query.view} />}
       {query.order && <input type="hidden" name="order" value={query.order} />}
+      {beside.length > 0 && <input type="hidden" name="beside" value={beside.join(",")} />}
       <div className="seek cb-seek">
         <Glyph name="ui-find" />
         <input

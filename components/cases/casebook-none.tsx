@@ -16,8 +16,11 @@ const FILTER_LABELS: Record<FilterName, string> = {
   customer: "customer",
   status: "state",
   by: "person who snapped it",
+  openedFrom: "first day opened",
+  openedTo: "last day opened",
   closedFrom: "first day",
   closedTo: "last day",
+  exemplars: "exemplars",
 };
 
 /** Names the filters of the address that could not be used. */

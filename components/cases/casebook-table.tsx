@@ -1,4 +1,5 @@
 import Link from "next/link";
+import { BesideBox } from "@/components/cases/beside-picks";
 import { CasebookThumbs } from "@/components/cases/casebook-photos";
 import { classGlyph } from "@/components/cases/class-glyph";
 import { Marked } from "@/components/cases/casebook-marked";
@@ -21,6 +22,7 @@ interface CasebookTableProps {
 export function CasebookTable({ items, terms, time, withMoney }: CasebookTableProps) {
   const cost: Column<CasebookItem> = { key: "cost", head: "Cost", numeric: true, cell: (item) => item.cost };
   const columns: Column<CasebookItem>[] = [
+    { key: "pick", head: "Set beside", cell: (item) => <BesideBox caseRef={item.ref} hideWords /> },
     { key: "photos", head: "Before, after", wideOnly: true, cell: (item) => <CasebookThumbs item={item} /> },
     {
       key: "ref",

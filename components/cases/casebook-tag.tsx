@@ -1,4 +1,5 @@
 import Link from "next/link";
+import { BesideBox } from "@/components/cases/beside-picks";
 import { CasebookPhotos } from "@/components/cases/casebook-photos";
 import { classGlyph } from "@/components/cases/class-glyph";
 import { Marked } from "@/components/cases/casebook-marked";
@@ -13,10 +14,12 @@ interface CasebookTagProps {
   terms: readonly SearchTerm[];
   /** Among the first: its photos are fetched at once. */
   eager?: boolean;
+  /** It lies in the tray. */
+  isBeside?: boolean;
 }
 
 /** A case on the casebook's rack. */
-export function CasebookTag({ item, terms, eager }: CasebookTagProps) {
+export function CasebookTag({ item, terms, eager, isBeside }: CasebookTagProps) {
   return (
     <TagUpright
       size="card"
@@ -25,6 +28,7 @@ export function CasebookTag({ item, terms, eager }: CasebookTagProps) {
       state={item.state}
       stateWords={item.stateWords}
       progress={item.progress}
+      current={isBeside}
     >
       <h2 className="tag__cls">
         <Glyph name={classGlyph(item.classSlug)} />
@@ -49,6 +53,7 @@ export function CasebookTag({ item, terms, eager }: CasebookTagProps) {
       )}
       <CasebookPhotos item={item} eager={eager} />
       <p className="cb-foot">
+        <BesideBox caseRef={item.ref} />
         <span>{item.closed ? `Closed ${item.closed}` : `Opened ${item.opened}`}</span>
         {item.cost !== null && <span className="fig">{item.cost}</span>}
       </p>

@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { CSSProperties } from "react";
 import { stationGlyph } from "@/components/cases/class-glyph";
 import { SourceMarks } from "@/components/library/source-marks";
@@ -18,6 +19,8 @@ export interface CauseView {
   /** The shelf's share, 0 to 1. */
   likelihood: number;
   here: ShareHere | NotEnough;
+  /** The shop's cases of the class with this cause; null while there is none. */
+  casesHref?: string | null;
   baseMetals: readonly BaseMetal[];
   sourceKeys: readonly string[];
   /** Titles of the fixes on this page, each with its anchor. */
@@ -54,7 +57,10 @@ function CauseShare({ cause }: { cause: CauseView }) {
         <>
           <ShareDrawing here={here} likelihood={likelihood} />
           <p>
-            <span className="fig cause__figure">{percent(here.share)}</span> here, {here.cases} of {here.of} cases
+            <span className="fig cause__figure">{percent(here.share)}</span> here, {here.cases} of {here.of} cases;{" "}
+            <span aria-hidden="true">
+              {percent(here.low)} to {percent(here.high)}
+            </span>
             <span className="sr-only">
               , 95% range {percent(here.low)} to {percent(here.high)}
             </span>
@@ -66,6 +72,11 @@ function CauseShare({ cause }: { cause: CauseView }) {
         </p>
       )}
       <p className="quiet">{percent(likelihood)} on the shelf</p>
+      {cause.casesHref && (
+        <Link className="solo" href={cause.casesHref} prefetch={false}>
+          Open its cases<span className="sr-only">: {cause.title}</span>
+        </Link>
+      )}
     </div>
   );
 }

@@ -3,6 +3,9 @@ import { SourceMarks } from "@/components/library/source-marks";
 import { Caution } from "@/components/ui/caution";
 import { Glyph } from "@/components/ui/glyph";
 import type { StationKind } from "@/lib/cases/case-words";
+import { FixRecordView } from "@/components/library/fix-record";
+import { workedWords } from "@/lib/library/evidence-words";
+import type { FixRecord } from "@/lib/library/fix-record";
 import { entryAnchor } from "@/lib/library/hit-href";
 import type { CautionLevel, FixStep } from "@/lib/library/library-entry";
 import type { CitedSource } from "@/lib/library/source-number";
@@ -20,6 +23,8 @@ export interface FixView {
   sourceKeys: readonly string[];
   /** Titles of the causes on this page that it puts right. */
   causes: readonly string[];
+  /** What became of it in this shop, against this class; left out where a page has no cases to speak of. */
+  record?: FixRecord;
 }
 
 /** "12 min, and 6 min a part": the working time of all steps. */
@@ -72,9 +77,11 @@ export function FixCard({ fix, sources, open }: { fix: FixView; sources: readonl
         <Glyph name="ui-next" />
         <h3>{fix.title}</h3>
         <span className="fig">{fixMinutes(fix.steps)}</span>
+        {fix.record && fix.record.tries.length > 0 && <span className="fix__worked">{workedWords(fix.record)}</span>}
       </summary>
       <div className="fix__body" id={entryAnchor("fix", fix.slug)}>
         <p className="small mid">For: {fix.causes.join(", ")}</p>
+        {fix.record && <FixRecordView record={fix.record} />}
         <ol>
           {fix.steps.map((step, index) => (
             <FixStepLine key={index} step={step} />

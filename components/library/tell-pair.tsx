@@ -16,6 +16,8 @@ export interface TellView {
   title: string;
   tell: string;
   exemplar: ExemplarView | null;
+  /** Exemplars of both classes side by side, in step; null while one of the two has none. */
+  besideHref?: string | null;
 }
 
 function Half({ title, exemplar }: { title: string; exemplar: ExemplarView | null }) {
@@ -51,6 +53,11 @@ export function TellPair({ own, tell }: TellPairProps) {
         <Link href={routes.libraryClass(tell.slug)}>{tell.title}</Link>
       </h3>
       <p>{tell.tell}</p>
+      {tell.besideHref && (
+        <Link className="solo small" href={tell.besideHref} prefetch={false}>
+          Set beside its look-alike<span className="sr-only">: {tell.title.toLowerCase()}</span>
+        </Link>
+      )}
     </article>
   );
 }

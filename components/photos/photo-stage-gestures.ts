@@ -82,8 +82,14 @@ export function useWheelZoom(frame: RefObject<HTMLElement | null>, setView: Chan
 const KEEPS_ARROWS = "input, textarea, select, [contenteditable], [role=menu], .line";
 
 /** Arrow keys move the photo wherever the focus is, except where they have work of their own. */
-export function useArrowPan(frame: RefObject<HTMLElement | null>, view: StageView, setView: ChangeView) {
+export function useArrowPan(
+  frame: RefObject<HTMLElement | null>,
+  view: StageView,
+  setView: ChangeView,
+  isListening = true,
+) {
   useEffect(() => {
+    if (!isListening) return;
     const press = (event: KeyboardEvent) => {
       if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
       if (event.target instanceof Element && event.target.closest(KEEPS_ARROWS)) return;
@@ -96,5 +102,5 @@ export function useArrowPan(frame: RefObject<HTMLElement | null>, view: StageVie
     };
     document.addEventListener("keydown", press);
     return () => document.removeEventListener("keydown", press);
-  }, [frame, view, setView]);
+  }, [frame, view, setView, isListening]);
 }

@@ -1,8 +1,9 @@
 import { and, eq, gte, inArray, lt, sql, type SQL } from "drizzle-orm";
+import { alias } from "drizzle-orm/sqlite-core";
 import { CLOSINGS } from "@/lib/cases/case-words";
 import type { CasebookFilter } from "@/lib/cases/casebook-filter";
 import type { Handle } from "../open";
-import { cases, standingClass, workOrders } from "../schema";
+import { cases, exemplars, photos, standingClass, workOrders } from "../schema";
 
 const given = (name: keyof CasebookFilter | "shopId") => sql.placeholder(name);
 
@@ -39,6 +40,8 @@ export function filterConditions(
   const is = (name: keyof CasebookFilter, column: SQL) =>
     filter[name] === undefined ? undefined : sql`${pinned === "all" ? plus(column) : column} = ${given(name)}`;
   const job = sql`${cases.workOrderId}`;
+  const opened = pinned === "all" || isByClosing(filter) ? plus(sql`${cases.openedAt}`) : sql`${cases.openedAt}`;
+  const openedAt = (end: "from" | "until") => (cursorBounds === end ? plus(sql`${cases.openedAt}`) : opened);
   const closed = sql`${cases.closedAt}`;
   return and(
     eq(cases.shopId, given("shopId")),
@@ -50,6 +53,10 @@ export function filterConditions(
     is("openedById", sql`${cases.openedById}`),
     is("status", isClosing(filter.status) ? sql`${cases.closing}` : sql`${cases.state}`),
     filter.customerId === undefined ? undefined : inArray(pinned === "nothing" ? job : plus(job), jobsOfCustomer(db)),
+    filter.openedFromAt === undefined ? undefined : gte(openedAt("from"), given("openedFromAt")),
+    filter.openedUntilAt === undefined ? undefined : lt(openedAt("until"), given("openedUntilAt")),
+    // By row number, so that the few exemplars lead and not one of the many cases is tried in vain.
+    filter.exemplars === undefined ? undefined : inArray(cases.id, casesWithExemplar(db)),
     filter.closedFromAt === undefined
       ? undefined
       : gte(cursorBounds === "from" ? plus(closed) : closed, given("closedFromAt")),
@@ -57,6 +64,24 @@ export function filterConditions(
       ? undefined
       : lt(cursorBounds === "until" ? plus(closed) : closed, given("closedUntilAt")),
   );
+}
+
+/** Cases with an exemplar of the class they are confirmed as: one of a class that a case no longer has counts for nothing. */
+function casesWithExemplar(db: Handle) {
+  const shown = alias(cases, "shown");
+  return db
+    .select({ id: shown.id })
+    .from(exemplars)
+    .innerJoin(photos, and(eq(photos.shopId, exemplars.shopId), eq(photos.id, exemplars.photoId)))
+    .innerJoin(
+      shown,
+      and(
+        eq(shown.shopId, photos.shopId),
+        eq(shown.id, photos.caseId),
+        eq(shown.confirmedClass, exemplars.classSlug),
+      ),
+    )
+    .where(and(eq(exemplars.shopId, given("shopId")), eq(photos.state, "ready")));
 }
 
 export const plus = (column: SQL) => sql`+${column}`;

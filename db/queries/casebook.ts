@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, sql } from "drizzle-orm";
+import { and, asc, count, desc, eq, inArray, sql } from "drizzle-orm";
 import type { CasebookFilter } from "@/lib/cases/casebook-filter";
 import type { CappedCount } from "@/lib/cases/casebook-words";
 import type { Handle } from "../open";
@@ -88,6 +88,8 @@ export function listCasebook(db: Handle, shopId: number, slice: CasebookSlice) {
  * test each. A closing period leads by itself.
  */
 function planOf(filter: CasebookFilter, isDense: boolean): { pinned: Pinned; isGathered: boolean } {
+  // The few cases with an exemplar are found by those, then sorted.
+  if (filter.exemplars) return { pinned: "all", isGathered: true };
   if (isByClosing(filter)) return { pinned: "all", isGathered: false };
   if (filter.customerId === undefined) return { pinned: "nothing", isGathered: false };
   return isDense ? { pinned: "customer", isGathered: false } : { pinned: "nothing", isGathered: true };
@@ -109,6 +111,17 @@ export function listCasebookById(db: Handle, shopId: number, ids: readonly numbe
   return ids.flatMap((id) => rows.get(id) ?? []);
 }
 
+/** Row numbers of the cases with these references, in their order; references that the shop does not have are left out. */
+export function listIdsByRef(db: Handle, shopId: number, refs: readonly string[]): number[] {
+  if (refs.length === 0) return [];
+  const rows = db
+    .select({ id: cases.id, ref: cases.ref })
+    .from(cases)
+    .where(and(eq(cases.shopId, shopId), inArray(cases.ref, [...refs])))
+    .all();
+  return refs.flatMap((ref) => rows.find((row) => row.ref === ref)?.id ?? []);
+}
+
 /** Beyond this many, cases are not counted: nobody reads the figure, and counting would cost more than the page. */
 export const MOST_COUNTED = 1000;
 
@@ -118,7 +131,7 @@ export function countCasebook(db: Handle, shopId: number, filter: CasebookFilter
     const some = db
       .select({ one: sql`1`.as("one") })
       .from(cases)
-      .where(filterConditions(db, filter, isByClosing(filter) ? "all" : "nothing"))
+      .where(filterConditions(db, filter, isByClosing(filter) || filter.exemplars ? "all" : "nothing"))
       .limit(MOST_COUNTED + 1)
       .as("some");
     return db.select({ cases: count() }).from(some).prepare();

@@ -116,7 +116,15 @@ export function listExemplars(db: Handle, shopId: number, classSlugs: string[]) 
     })
     .from(exemplars)
     .innerJoin(photos, and(eq(photos.shopId, exemplars.shopId), eq(photos.id, exemplars.photoId)))
-    .innerJoin(cases, and(eq(cases.shopId, photos.shopId), eq(cases.id, photos.caseId)))
+    // An exemplar of a class that its case no longer has would teach the wrong thing.
+    .innerJoin(
+      cases,
+      and(
+        eq(cases.shopId, photos.shopId),
+        eq(cases.id, photos.caseId),
+        eq(cases.confirmedClass, exemplars.classSlug),
+      ),
+    )
     .where(and(eq(exemplars.shopId, shopId), inArray(exemplars.classSlug, classSlugs), eq(photos.state, "ready")))
     .orderBy(desc(exemplars.at), asc(exemplars.photoId))
     .all();

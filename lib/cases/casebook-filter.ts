@@ -22,10 +22,16 @@ export interface CasebookFilter {
   customerId?: number;
   status?: CaseStandingFilter;
   openedById?: number;
+  /** Opened at or after this. */
+  openedFromAt?: number;
+  /** Opened before this. */
+  openedUntilAt?: number;
   /** Closed at or after this. */
   closedFromAt?: number;
   /** Closed before this. */
   closedUntilAt?: number;
+  /** Only those with an exemplar among their photos. */
+  exemplars?: "only";
 }
 
 export interface ResolvedFilter {
@@ -72,6 +78,9 @@ export function resolveFilter(query: CasebookQuery, choices: CasebookChoices, ti
       baseMetal: query.metal,
       stageFound: query.stage,
       status: query.status,
+      openedFromAt: query.openedFrom && dayStart(query.openedFrom, timeZone, "openedFrom"),
+      openedUntilAt: query.openedTo && dayStart(nextDay(query.openedTo), timeZone, "openedTo"),
+      exemplars: query.exemplars,
       closedFromAt: query.closedFrom && dayStart(query.closedFrom, timeZone, "closedFrom"),
       closedUntilAt: query.closedTo && dayStart(nextDay(query.closedTo), timeZone, "closedTo"),
     } as CasebookFilter, // an absent day stays undefined; "" cannot be, the schema refuses it
@@ -85,6 +94,9 @@ export function resolveFilter(query: CasebookQuery, choices: CasebookChoices, ti
       metal: query.metal && BASE_METAL_TITLES[query.metal],
       stage: query.stage && STAGE_TITLES[query.stage],
       status: query.status && STANDING_WORDS[query.status],
+      exemplars: query.exemplars && "Exemplars only",
+      openedFrom: query.openedFrom && calendarDay(query.openedFrom),
+      openedTo: query.openedTo && calendarDay(query.openedTo),
       closedFrom: query.closedFrom && calendarDay(query.closedFrom),
       closedTo: query.closedTo && calendarDay(query.closedTo),
     },

@@ -34,12 +34,15 @@ const ALWAYS = [
 ] as const;
 
 const WHEN_SET = [
+  { filter: "openedFrom", before: ", opened from " },
+  { filter: "openedTo", before: ", opened by " },
   { filter: "closedFrom", before: ", closed from " },
   { filter: "closedTo", before: ", closed by " },
   { filter: "cause", before: ", put down to " },
   { filter: "stage", before: ", found " },
   { filter: "customer", before: ", for " },
   { filter: "by", before: ", snapped by " },
+  { filter: "exemplars", before: ", " },
 ] as const;
 
 /** The filters as the rest of the sentence: "of underactivation on brass that began at Activate, closed". */
@@ -59,21 +62,26 @@ export function sentenceParts(names: ResolvedFilter["names"]): SentencePart[] {
 
 /** Days run on from what stands before them: "closed from 1 Jul 2026 to 14 Jul 2026". */
 function jointBefore(filter: FilterName, names: ResolvedFilter["names"]): string | null {
+  if (filter === "openedTo" && names.openedFrom) return " to ";
   if (filter === "closedTo" && names.closedFrom) return " to ";
   const isSaid = names.status?.startsWith("closed") && !names.status.includes(",");
   if (!isSaid || (filter !== "closedFrom" && filter !== "closedTo")) return null;
   return filter === "closedFrom" ? " from " : " by ";
 }
 
+const KEEP_CAPITAL: ReadonlySet<FilterName> = new Set([
+  "station",
+  "customer",
+  "by",
+  "openedFrom",
+  "openedTo",
+  "closedFrom",
+  "closedTo",
+]);
+
 /** Names of people, stations and customers keep their capital; words of the trade lose it inside a sentence. */
 function inSentence(filter: FilterName, name: string): string {
-  const keeps =
-    filter === "station" ||
-    filter === "customer" ||
-    filter === "by" ||
-    filter === "closedFrom" ||
-    filter === "closedTo";
-  return keeps ? name : `${name.charAt(0).toLowerCase()}${name.slice(1)}`;
+  return KEEP_CAPITAL.has(filter) ? name : `${name.charAt(0).toLowerCase()}${name.slice(1)}`;
 }
 
 /** What to do about an empty page: "Drop one of the three filters." */

@@ -39,8 +39,12 @@ const filterShape = {
   customer: asked(rowNumber),
   status: asked(oneOf(CASE_STANDINGS)),
   by: asked(rowNumber),
+  openedFrom: asked(day),
+  openedTo: asked(day),
   closedFrom: asked(day),
   closedTo: asked(day),
+  /** Only cases with a photo that a senior chose as an exemplar of its class. */
+  exemplars: asked(oneOf(["only"])),
 };
 
 /** What the casebook is asked, by its page and over HTTP. Days are days of the shop's calendar. */
@@ -51,6 +55,10 @@ export const casebookSchema = z
     order: asked(oneOf(["newest", "oldest"])),
     view: asked(oneOf(["grid", "table"])),
     cursor: asked(cursor),
+  })
+  .refine((query) => !query.openedFrom || !query.openedTo || query.openedFrom <= query.openedTo, {
+    path: ["openedTo"],
+    message: "The last day lies before the first one. Turn them round.",
   })
   .refine((query) => !query.closedFrom || !query.closedTo || query.closedFrom <= query.closedTo, {
     path: ["closedTo"],

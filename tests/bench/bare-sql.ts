@@ -12,6 +12,10 @@ const WHERE: Record<keyof CasebookFilter, string> = {
   customerId: "+c.work_order_id in (select id from work_orders where shop_id = @shopId and customer_id = @customerId)",
   status: "(c.state = @status or c.closing = @status)",
   openedById: "c.opened_by_id = @openedById",
+  openedFromAt: "c.opened_at >= @openedFromAt",
+  openedUntilAt: "c.opened_at < @openedUntilAt",
+  exemplars:
+    "c.id in (select p.case_id from exemplars e join photos p on p.shop_id = e.shop_id and p.id = e.photo_id where e.shop_id = @shopId and p.state = 'ready')",
   closedFromAt: "c.closed_at >= @closedFromAt",
   closedUntilAt: "c.closed_at < @closedUntilAt",
 };

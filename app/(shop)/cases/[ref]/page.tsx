@@ -24,6 +24,7 @@ import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
+import { CaseAlike } from "./case-alike";
 import { CaseDoings } from "./case-doings";
 import { CasePhotos } from "./case-photos";
 import { CaseRecords } from "./case-records";
@@ -118,6 +119,7 @@ export default async function CasePage({ params }: CasePageProps) {
         </div>
       </div>
       <CaseRecords member={member} facts={facts} loaded={loaded} />
+      <CaseAlike shopId={member.shopId} facts={facts} classes={loaded.classes} />
       <CaseDoings member={member} facts={facts} classes={loaded.classes} />
     </ShopShell>
   );

@@ -9,6 +9,7 @@ import { PhotoFrame } from "@/components/ui/photo-frame";
 import { Rests } from "@/components/ui/rests";
 import { Section } from "@/components/ui/section";
 import { BASE_METAL_TITLES } from "@/lib/cases/case-words";
+import { dayWords } from "@/lib/cases/moment-words";
 import { counted } from "@/lib/cases/part-words";
 import { BASELINE_CLASS } from "@/lib/library/shelf-words";
 import { routes } from "@/lib/routes";
@@ -22,8 +23,8 @@ interface PartProps {
 const WORDS_SAID = 6;
 
 /** Picture, name, one line, the shop's words for it, and how it stands here. */
-export function ClassHead({ loaded }: PartProps) {
-  const { entry, standing } = loaded;
+export function ClassHead({ loaded, timeZone }: PartProps & { timeZone: string }) {
+  const { entry, standing, firstAt } = loaded;
   return (
     <div className="lib-top">
       <Glyph name={classGlyph(entry.slug)} size={168} />
@@ -40,7 +41,10 @@ export function ClassHead({ loaded }: PartProps) {
             Open its cases
           </Link>
         )}
-        <Rests>Confirmed at a second look in this shop.</Rests>
+        <Rests>
+          Confirmed at a second look in this shop
+          {firstAt.ofClass !== null && `; the first was opened on ${dayWords(firstAt.ofClass, timeZone)}`}.
+        </Rests>
       </aside>
     </div>
   );
@@ -63,7 +67,11 @@ export function Exemplars({ loaded: { exemplars, entry } }: PartProps) {
     );
   }
   return (
-    <Section title="At its clearest" aside="Chosen by seniors of this shop">
+    <Section
+      title="At its clearest"
+      aside={<Link href={routes.casebook({ class: entry.slug, exemplars: "only" })}>All exemplars of it</Link>}
+      rests="Chosen by seniors of this shop among its confirmed photos."
+    >
       <ul className="lib-shots">
         {exemplars.map((each, index) => (
           <li key={each.photoId}>

@@ -5,6 +5,7 @@ import { placeholderUrl } from "@/components/photos/placeholder-url";
 import type { Db } from "@/db/open";
 import { countCasesByCause, countCasesByClass, listClassCards } from "@/db/queries/library";
 import { getLibraryClass, type ClassPage } from "@/db/queries/library-class";
+import { countClassIn, getFirstOpened, listFixTries, sumStruckIn } from "@/db/queries/library-evidence";
 import { listStations } from "@/db/queries/line";
 import { getRatesAt } from "@/db/queries/rates";
 import { listExemplars } from "@/db/queries/second-look-against";
@@ -12,7 +13,10 @@ import { getStripTableAt } from "@/db/queries/strip-table";
 import type { StationKind } from "@/lib/cases/case-words";
 import { standingOf } from "@/lib/library/shelf-words";
 import { byLikelihood, shareHere } from "@/lib/library/shop-share";
+import { fixRecord, recordsByFix, type FixTry } from "@/lib/library/fix-record";
 import { citeSources } from "@/lib/library/source-number";
+import { routes } from "@/lib/routes";
+import { classTrend, lastMonths } from "@/lib/library/class-trend";
 import { typicalBaseMetals, typicalStrip } from "@/lib/library/typical-strip";
 
 /** Exemplars shown of one class. */
@@ -22,7 +26,14 @@ const SHOWN = 4;
  * Everything that a class's page shows; null when the shop's shelf has no such class.
  * @param stationKind only the causes that arise at this kind of station, and their fixes
  */
-export function loadClass(db: Db, shopId: number, slug: string, stationKind: StationKind | null, now: number) {
+export function loadClass(
+  db: Db,
+  shopId: number,
+  slug: string,
+  stationKind: StationKind | null,
+  clock: { now: number; timeZone: string },
+) {
+  const { now } = clock;
   const page = getLibraryClass(db, shopId, slug);
   if (!page) return null;
   const counts = countCasesByCause(db, shopId, slug);
@@ -39,7 +50,8 @@ export function loadClass(db: Db, shopId: number, slug: string, stationKind: Sta
     allCauses: causes.length,
     caseCount: counts.total,
     casesSinceAt: counts.firstAt,
-    fixes: fixViews(page, shown),
+    fixes: fixViews(page, shown, listFixTries(db, shopId, slug)),
+    ...trendOf(db, shopId, slug, clock),
     sources: citeSources(usedKeys(page), page.sources),
     rates,
     strip: typicalStrip(typicalBaseMetals(page.causes), rates, getStripTableAt(db, shopId, now)),
@@ -59,13 +71,17 @@ function causeViews(
     ...cause,
     stationName: stations.find((station) => station.kind === cause.station)?.name ?? cause.station,
     here: shareHere(counts.byCause.get(cause.id) ?? 0, counts.total),
+    casesHref: counts.byCause.has(cause.id)
+      ? routes.casebook({ class: page.class.slug, cause: cause.slug })
+      : null,
     fixes: page.fixes.filter((fix) => fix.causeSlugs.includes(cause.slug)).map(({ slug, title }) => ({ slug, title })),
   }));
   return byLikelihood(views);
 }
 
 /** The fixes of these causes, those of the likeliest cause first. */
-function fixViews(page: ClassPage, causes: readonly CauseView[]): FixView[] {
+function fixViews(page: ClassPage, causes: readonly CauseView[], tries: readonly FixTry[]): FixView[] {
+  const records = recordsByFix(tries);
   const order = [...new Set(causes.flatMap((cause) => cause.fixes.map((fix) => fix.slug)))];
   return order.flatMap((slug) => {
     const fix = page.fixes.find((each) => each.slug === slug);
@@ -75,8 +91,16 @@ function fixViews(page: ClassPage, causes: readonly CauseView[]): FixView[] {
       cautions: page.cautions.filter((caution) => cautionKeys.includes(caution.key)),
     }));
     const named = causes.filter((cause) => fix.causeSlugs.includes(cause.slug)).map((cause) => cause.title);
-    return [{ ...fix, steps, causes: named }];
+    return [{ ...fix, steps, causes: named, record: records.get(slug) ?? fixRecord([]) }];
   });
+}
+
+/** How often the class came up in the last twelve months. */
+function trendOf(db: Db, shopId: number, slug: string, { now, timeZone }: { now: number; timeZone: string }) {
+  const months = lastMonths(now, timeZone);
+  const first = getFirstOpened(db, shopId, slug);
+  const counts = { cases: countClassIn(db, shopId, slug, months), partsStruck: sumStruckIn(db, shopId, months) };
+  return { trend: classTrend(months, counts, first.any), firstAt: first };
 }
 
 function usedKeys(page: ClassPage): string[] {
@@ -98,11 +122,16 @@ function lookAlikes(db: Db, shopId: number, page: ClassPage): { exemplars: Shown
   }));
   return {
     exemplars: all.filter((each) => each.classSlug === page.class.slug).slice(0, SHOWN),
-    tells: page.class.tells.map(({ versus, tell }) => ({
-      slug: versus,
-      title: titles.get(versus) ?? versus,
-      tell,
-      exemplar: all.find((each) => each.classSlug === versus) ?? null,
-    })),
+    tells: page.class.tells.map(({ versus, tell }) => {
+      const own = all.find((each) => each.classSlug === page.class.slug);
+      const other = all.find((each) => each.classSlug === versus);
+      return {
+        slug: versus,
+        title: titles.get(versus) ?? versus,
+        tell,
+        exemplar: other ?? null,
+        besideHref: own && other ? routes.compare([own.ref, other.ref]) : null,
+      };
+    }),
   };
 }

@@ -15,6 +15,7 @@ import { shellFor } from "@/lib/server/shell-data";
 import { ClassHead, Exemplars, Looks, Tells } from "./class-looks";
 import { Causes, Fixes, Prevention } from "./class-causes";
 import { Sources, TypicalCost } from "./class-cost";
+import { Trend } from "./class-trend";
 import { loadClass } from "./load-class";
 
 interface ClassPageProps {
@@ -35,7 +36,10 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
   const db = getDb();
   const { station: stationSlug } = await searchParams;
   const station = stationSlug ? getStation(db, member.shopId, stationSlug) : null;
-  const loaded = loadClass(db, member.shopId, slug, station?.kind ?? null, Date.now());
+  const loaded = loadClass(db, member.shopId, slug, station?.kind ?? null, {
+    now: Date.now(),
+    timeZone: member.shop.timeZone,
+  });
   if (!loaded) notFound();
   const { actor, counts, stations } = shellFor(member);
   const here = (to: string | null) => routes.libraryClass(slug, to ? { station: to } : undefined);
@@ -61,15 +65,17 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
       <nav className="lib-crumb no-print" aria-label="On this page">
         <Link href={routes.library()}>Library</Link>
         {loaded.tells.length > 0 && <a href="#tells">Tell it from</a>}
+        <a href="#trend">In this shop</a>
         {loaded.allCauses > 0 && <a href="#causes">Causes</a>}
         {loaded.allCauses > 0 && <a href="#fixes">Fixes</a>}
         <a href="#cost">Cost to strip</a>
         <a href="#sources">Sources</a>
       </nav>
-      <ClassHead loaded={loaded} />
+      <ClassHead loaded={loaded} timeZone={timeZone} />
       <Exemplars loaded={loaded} />
       <Looks loaded={loaded} />
       <Tells loaded={loaded} />
+      <Trend loaded={loaded} timeZone={timeZone} />
       <Causes loaded={loaded} station={station?.name ?? null} timeZone={timeZone} />
       <Fixes loaded={loaded} />
       <Prevention loaded={loaded} />
