@@ -1,4 +1,5 @@
 import Link from "next/link";
+import Link from "next/link";
 import type { CSSProperties } from "react";
 import { stationGlyph } from "@/components/cases/class-glyph";
 import { SourceMarks } from "@/components/library/source-marks";
@@ -81,8 +82,15 @@ function CauseShare({ cause }: { cause: CauseView }) {
   );
 }
 
+interface CauseRowProps {
+  cause: CauseView;
+  sources: readonly CitedSource[];
+  /** For those who may edit it. */
+  editHref?: string;
+}
+
 /** A cause: where it arises, how likely it is, why it happens, and the check that proves it. */
-export function CauseRow({ cause, sources }: { cause: CauseView; sources: readonly CitedSource[] }) {
+export function CauseRow({ cause, sources, editHref }: CauseRowProps) {
   return (
     <article className="cause" id={entryAnchor("cause", cause.slug)}>
       <Glyph name={stationGlyph(cause.station)} />
@@ -111,6 +119,11 @@ export function CauseRow({ cause, sources }: { cause: CauseView; sources: readon
           </p>
         )}
         <SourceMarks keys={cause.sourceKeys} sources={sources} />
+        {editHref && (
+          <Link className="solo no-print" href={editHref} aria-label={`Edit the cause “${cause.title}”`}>
+            Edit
+          </Link>
+        )}
       </div>
     </article>
   );

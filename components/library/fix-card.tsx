@@ -1,3 +1,4 @@
+import Link from "next/link";
 import { stationGlyph } from "@/components/cases/class-glyph";
 import { SourceMarks } from "@/components/library/source-marks";
 import { Caution } from "@/components/ui/caution";
@@ -66,11 +67,19 @@ function FixStepLine({ step }: { step: FixStepView }) {
   );
 }
 
+interface FixCardProps {
+  fix: FixView;
+  sources: readonly CitedSource[];
+  open: boolean;
+  /** For those who may edit it. */
+  editHref?: string;
+}
+
 /**
  * A fix, folded to its title and time. What it holds carries the anchor, because a browser opens a fold when a link leads
  * into it, not to it.
  */
-export function FixCard({ fix, sources, open }: { fix: FixView; sources: readonly CitedSource[]; open: boolean }) {
+export function FixCard({ fix, sources, open, editHref }: FixCardProps) {
   return (
     <details className="fix" open={open}>
       <summary>
@@ -96,6 +105,11 @@ export function FixCard({ fix, sources, open }: { fix: FixView; sources: readonl
           </p>
         )}
         <SourceMarks keys={fix.sourceKeys} sources={sources} />
+        {editHref && (
+          <Link className="solo no-print" href={editHref} aria-label={`Edit the fix “${fix.title}”`}>
+            Edit
+          </Link>
+        )}
       </div>
     </details>
   );

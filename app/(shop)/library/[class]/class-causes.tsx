@@ -8,6 +8,7 @@ import { dayWords } from "@/lib/cases/moment-words";
 import { counted } from "@/lib/cases/part-words";
 import { BASELINE_CLASS } from "@/lib/library/shelf-words";
 import { LEAST_CASES } from "@/lib/library/shop-share";
+import { routes } from "@/lib/routes";
 import type { LoadedClass } from "./load-class";
 
 interface CausesProps {
@@ -15,10 +16,12 @@ interface CausesProps {
   /** Name of the station that narrows the page. */
   station: string | null;
   timeZone: string;
+  /** Each has its way to the editor. */
+  canEdit: boolean;
 }
 
 /** The causes by likelihood: this shop's share beside the shelf's. */
-export function Causes({ loaded, station, timeZone }: CausesProps) {
+export function Causes({ loaded, station, timeZone, canEdit }: CausesProps) {
   const { causes, allCauses, caseCount, casesSinceAt, entry, sources } = loaded;
   if (allCauses === 0) return null;
   const enough = caseCount >= LEAST_CASES;
@@ -38,7 +41,12 @@ export function Causes({ loaded, station, timeZone }: CausesProps) {
         <Empty title={`No cause of it arises at ${station}.`}>Show the whole line for all {allCauses}.</Empty>
       )}
       {causes.map((cause) => (
-        <CauseRow key={cause.slug} cause={cause} sources={sources} />
+        <CauseRow
+          key={cause.slug}
+          cause={cause}
+          sources={sources}
+          editHref={canEdit ? routes.libraryEdit("cause", cause.slug) : undefined}
+        />
       ))}
     </Section>
   );
@@ -52,12 +60,24 @@ function restWords(enough: boolean, sinceAt: number | null, timeZone: string): s
 }
 
 /** The fixes, those of the likeliest cause first. */
-export function Fixes({ loaded: { fixes, allCauses, sources } }: { loaded: LoadedClass }) {
+export function Fixes({
+  loaded: { fixes, allCauses, sources },
+  canEdit,
+}: {
+  loaded: LoadedClass;
+  canEdit: boolean;
+}) {
   if (allCauses === 0) return null;
   return (
     <Section title="What puts it right" id="fixes" aside={counted(fixes.length, "fix").replace(/fixs$/, "fixes")}>
       {fixes.map((fix, index) => (
-        <FixCard key={fix.slug} fix={fix} sources={sources} open={index === 0} />
+        <FixCard
+          key={fix.slug}
+          fix={fix}
+          sources={sources}
+          open={index === 0}
+          editHref={canEdit ? routes.libraryEdit("fix", fix.slug) : undefined}
+        />
       ))}
     </Section>
   );

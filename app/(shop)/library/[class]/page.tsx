@@ -12,6 +12,7 @@ import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { currentMember, guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
+import { ClassDesk } from "../edit/edit-desk";
 import { ClassHead, Exemplars, Looks, Tells } from "./class-looks";
 import { Causes, Fixes, Prevention } from "./class-causes";
 import { Sources, TypicalCost } from "./class-cost";
@@ -76,8 +77,8 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
       <Looks loaded={loaded} />
       <Tells loaded={loaded} />
       <Trend loaded={loaded} timeZone={timeZone} />
-      <Causes loaded={loaded} station={station?.name ?? null} timeZone={timeZone} />
-      <Fixes loaded={loaded} />
+      <Causes loaded={loaded} canEdit={can(member, "library.edit")} station={station?.name ?? null} timeZone={timeZone} />
+      <Fixes loaded={loaded} canEdit={can(member, "library.edit")} />
       <Prevention loaded={loaded} />
       <TypicalCost
         loaded={loaded}
