@@ -12,7 +12,8 @@ const safetyHeaders = [
 const config = {
   poweredByHeader: false,
   devIndicators: false,
-  experimental: { authInterrupts: true },
+  // A library file of 4 MB is looked at and brought in through a server action.
+  experimental: { authInterrupts: true, serverActions: { bodySizeLimit: "5mb" } },
   reactStrictMode: true,
   // Types are checked by `npm run check` and `npm run verify`; a build need not do it a second time.
   typescript: { ignoreBuildErrors: true },

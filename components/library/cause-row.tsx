@@ -1,5 +1,4 @@
 import Link from "next/link";
-import Link from "next/link";
 import type { CSSProperties } from "react";
 import { stationGlyph } from "@/components/cases/class-glyph";
 import { SourceMarks } from "@/components/library/source-marks";

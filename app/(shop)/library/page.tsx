@@ -16,10 +16,12 @@ import { getStation } from "@/db/queries/line";
 import { listExemplars } from "@/db/queries/second-look-against";
 import { shelfWords } from "@/lib/library/shelf-words";
 import { libraryQuerySchema } from "@/lib/library/library-query.schema";
+import { can } from "@/lib/permissions";
 import { routes } from "@/lib/routes";
 import { librarySearchFor } from "@/lib/server/library/search-index";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
+import { EditDesk } from "./edit/edit-desk";
 
 export const metadata: Metadata = { title: "Library" };
 
@@ -77,6 +79,7 @@ export default async function LibraryPage({ searchParams }: LibraryPageProps) {
           How each one is cleaned, woken and struck.
         </p>
       </div>
+      {can(member, "library.edit") && <EditDesk member={member} />}
       <Section title="Classes" aside={asideWords(station?.name, all.length, exemplars)}>
         {cards.length === 0 ? (
           <Empty title="No class on the shelf arises at this station.">Show the whole line for all of them.</Empty>

@@ -98,7 +98,7 @@ export function recordEntry(
     kind,
     title,
     detail = {},
-  }: { action: LibraryAction; kind: ShelfKind; title: string; detail?: Record<string, unknown> },
+  }: { action: LibraryAction; kind: ShelfKind | "entries"; title: string; detail?: Record<string, unknown> },
   now: number,
 ): void {
   insertAudit(tx, { shopId, memberId, action, subject: `${kind} ${title}`, detail, now });

@@ -4,6 +4,7 @@ import { SourceMarks } from "@/components/library/source-marks";
 import { Empty } from "@/components/ui/empty";
 import { Section } from "@/components/ui/section";
 import { TooFew } from "@/components/ui/too-few";
+import { MOST_BY_CAUSE } from "@/db/queries/library";
 import { dayWords } from "@/lib/cases/moment-words";
 import { counted } from "@/lib/cases/part-words";
 import { BASELINE_CLASS } from "@/lib/library/shelf-words";
@@ -30,7 +31,7 @@ export function Causes({ loaded, station, timeZone, canEdit }: CausesProps) {
       title={enough ? "What causes it in this shop" : "What causes it"}
       id="causes"
       aside={`In this shop, ${counted(caseCount, "case")} with a named cause`}
-      rests={`${restWords(enough, casesSinceAt, timeZone)} The shelf's shares are from memory; ${percent(entry.otherLikelihood)} of its cases have another cause.`}
+      rests={`${restWords(enough, caseCount >= MOST_BY_CAUSE, casesSinceAt, timeZone)} The shelf's shares are from memory; ${percent(entry.otherLikelihood)} of its cases have another cause.`}
     >
       {!enough && (
         <TooFew have={caseCount} need={LEAST_CASES}>
@@ -54,19 +55,13 @@ export function Causes({ loaded, station, timeZone, canEdit }: CausesProps) {
 
 const percent = (share: number) => `${Math.round(share * 100)}%`;
 
-function restWords(enough: boolean, sinceAt: number | null, timeZone: string): string {
+function restWords(enough: boolean, isNewest: boolean, sinceAt: number | null, timeZone: string): string {
   if (!enough || sinceAt === null) return "";
-  return `Solid bar: share of this shop's cases since ${dayWords(sinceAt, timeZone)}, with its 95% range. Dashed blue: the shelf.`;
+  return `Solid bar: share of this shop's ${isNewest ? `newest ${MOST_BY_CAUSE.toLocaleString("en-US")} cases, those` : "cases"} since ${dayWords(sinceAt, timeZone)}, with its 95% range. Dashed blue: the shelf.`;
 }
 
 /** The fixes, those of the likeliest cause first. */
-export function Fixes({
-  loaded: { fixes, allCauses, sources },
-  canEdit,
-}: {
-  loaded: LoadedClass;
-  canEdit: boolean;
-}) {
+export function Fixes({ loaded: { fixes, allCauses, sources }, canEdit }: { loaded: LoadedClass; canEdit: boolean }) {
   if (allCauses === 0) return null;
   return (
     <Section title="What puts it right" id="fixes" aside={counted(fixes.length, "fix").replace(/fixs$/, "fixes")}>

@@ -71,9 +71,7 @@ function causeViews(
     ...cause,
     stationName: stations.find((station) => station.kind === cause.station)?.name ?? cause.station,
     here: shareHere(counts.byCause.get(cause.id) ?? 0, counts.total),
-    casesHref: counts.byCause.has(cause.id)
-      ? routes.casebook({ class: page.class.slug, cause: cause.slug })
-      : null,
+    casesHref: counts.byCause.has(cause.id) ? routes.casebook({ class: page.class.slug, cause: cause.slug }) : null,
     fixes: page.fixes.filter((fix) => fix.causeSlugs.includes(cause.slug)).map(({ slug, title }) => ({ slug, title })),
   }));
   return byLikelihood(views);

@@ -72,12 +72,18 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
         <a href="#cost">Cost to strip</a>
         <a href="#sources">Sources</a>
       </nav>
+      {can(member, "library.edit") && <ClassDesk member={member} slug={slug} />}
       <ClassHead loaded={loaded} timeZone={timeZone} />
       <Exemplars loaded={loaded} />
       <Looks loaded={loaded} />
       <Tells loaded={loaded} />
       <Trend loaded={loaded} timeZone={timeZone} />
-      <Causes loaded={loaded} canEdit={can(member, "library.edit")} station={station?.name ?? null} timeZone={timeZone} />
+      <Causes
+        loaded={loaded}
+        canEdit={can(member, "library.edit")}
+        station={station?.name ?? null}
+        timeZone={timeZone}
+      />
       <Fixes loaded={loaded} canEdit={can(member, "library.edit")} />
       <Prevention loaded={loaded} />
       <TypicalCost
