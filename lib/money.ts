@@ -10,13 +10,14 @@ import { InputError } from "@/lib/input-error";
 export function splitCents(exactCents: readonly number[]): number[] {
   let exactTotal = 0;
   let floorTotal = 0;
-  const cents: number[] = [];
-  for (const exact of exactCents) {
+  const cents = exactCents.slice();
+  for (let index = 0; index < cents.length; index += 1) {
+    const exact = exactCents[index] ?? 0;
     if (!(exact >= 0)) throw new InputError("cents", "An amount of money is 0 or more.");
-    exactTotal += exact;
     const floor = Math.floor(exact);
+    exactTotal += exact;
     floorTotal += floor;
-    cents.push(floor);
+    cents[index] = floor;
   }
   if (!(exactTotal < Number.MAX_SAFE_INTEGER))
     throw new InputError("cents", "This comes to more money than can be counted.");

@@ -42,8 +42,9 @@ export const NO_PART_VALUE = "No part value given: scrap risk is left out.";
 /** The figures of one way, without the words: what is compared, summed and stored. */
 export type ReworkFigures = Omit<ReworkEstimate, "widest" | "spread" | "steps" | "cautions" | "sources" | "assumed">;
 
-/** Filled anew for each batch; what is worked out is copied out of it before anything else can run. */
+/** Filled anew for each batch; what is worked out is copied out of them before anything else can run. */
 const SUMS = emptyFigures();
+const EXACT: number[] = COST_LINE_KEYS.map(() => Number.NaN);
 
 /**
  * Multiplies a price list out for a batch: means add by line, variances add over all. Money is rounded to cents once,
@@ -51,33 +52,36 @@ const SUMS = emptyFigures();
  */
 export function figuresByList(facts: CheckedRework, list: PriceList): ReworkFigures {
   const sums = multiplyOut(list, facts.sizes, SUMS);
-  const exact = COST_LINE_KEYS.map((_, line) => sums[line] ?? 0);
   let exactCents = 0;
-  for (const cents of exact) exactCents += cents;
+  for (let line = 0; line < EXACT.length; line += 1) exactCents += EXACT[line] = sums[line] ?? 0;
   if (!(exactCents < Number.MAX_SAFE_INTEGER)) {
     throw new InputError("quantity", "This comes to more money than can be counted. Give fewer parts.");
   }
   const { low90Cents, high90Cents } = rangeByList(facts, list, exactCents, sums);
-  const lineCents = splitCents(exact);
   return {
     method: list.way.method,
     meanCents: Math.round(exactCents),
     low90Cents,
     high90Cents,
-    lines: COST_LINE_KEYS.map((key, line) => ({ key, name: COST_LINES[key], meanCents: lineCents[line] ?? 0 })),
+    lines: namedLines(splitCents(EXACT)),
     minutes: minutesAt(sums, FIGURE_AT.handsOnLow),
     tankMinutes: minutesAt(sums, FIGURE_AT.tankLow),
     metalWrittenOffG: sums[FIGURE_AT.metalLostG] ?? 0,
   };
 }
 
+const NAMED_LINES = COST_LINE_KEYS.map((key) => ({ key, name: COST_LINES[key] }));
+
+function namedLines(lineCents: readonly number[]): ReworkFigures["lines"] {
+  return NAMED_LINES.map(({ key, name }, line) => ({ key, name, meanCents: lineCents[line] ?? 0 }));
+}
+
 /** The 90 % range around the mean, whole cents: the variances of what is independent add, and so do the ends. */
 function rangeByList(facts: CheckedRework, list: PriceList, exactCents: number, sums: Float64Array) {
-  const spread = thicknessRanges(facts, list);
   let variance = varianceByList(list, facts.sizes);
   let least = sums[FIGURE_AT.leastCents] ?? 0;
   let most = sums[FIGURE_AT.mostCents] ?? 0;
-  for (const { low, high } of spread) {
+  for (const { low, high } of thicknessRanges(facts, list)) {
     variance += ((high - low) / 6) ** 2;
     least += low;
     most += high;
@@ -87,12 +91,14 @@ function rangeByList(facts: CheckedRework, list: PriceList, exactCents: number, 
   return { low90Cents: Math.min(meanCents, Math.round(low90)), high90Cents: Math.max(meanCents, Math.round(high90)) };
 }
 
-function varianceByList({ spreads }: PriceList, sizes: readonly number[]): number {
+function varianceByList({ spreads, widths }: PriceList, sizes: readonly number[]): number {
   let variance = 0;
   let width = 0;
-  for (const { size, withNext, lowCents, highCents } of spreads) {
-    width += (highCents - lowCents) * (sizes[size] ?? 0);
-    if (withNext) continue;
+  for (let term = 0; term < spreads.length; term += 1) {
+    const spread = spreads[term];
+    if (!spread) continue;
+    width += (widths[term] ?? 0) * (sizes[spread.size] ?? 0);
+    if (spread.withNext) continue;
     variance += (width / 6) ** 2;
     width = 0;
   }

@@ -2,28 +2,33 @@ import type { StageFound } from "@/lib/cases/case-words";
 import type { AllowedWay } from "@/lib/costs/allowed-ways";
 import type { MinutesCorrections } from "@/lib/costs/estimate-record";
 import { addTogether, pertMean, timesFactor, type ThreePoint } from "@/lib/costs/pert";
-import type { ShopRates } from "@/lib/costs/rates";
-import { COST_LINE_KEYS, reworkTerms, type CostLine, type GrowsWith, type ReworkTerm } from "@/lib/costs/rework-terms";
+import { HIGHEST_RATE_CENTS, metalPrice, PLAIN_RATES, type ShopRates } from "@/lib/costs/rates";
+import { reworkTerms, type CostLine, type GrowsWith, type ReworkTerm } from "@/lib/costs/rework-terms";
 import type { ReworkTimes } from "@/lib/costs/rework-times";
+import { requireBetween } from "@/lib/input-error";
 
-/** What is worked out for each size of a batch: mean cents of each line, then these. */
-const OTHER_FIGURES = [
-  "meanCents",
-  "leastCents",
-  "mostCents",
-  "handsOnLow",
-  "handsOnLikely",
-  "handsOnHigh",
-  "tankLow",
-  "tankLikely",
-  "tankHigh",
-  "metalLostG",
-] as const;
-type Figure = CostLine | (typeof OTHER_FIGURES)[number];
-const FIGURES: readonly Figure[] = [...COST_LINE_KEYS, ...OTHER_FIGURES];
-/** Place of each figure within those of one size; the lines come first, in their order. */
-export const FIGURE_AT = Object.fromEntries(FIGURES.map((figure, place) => [figure, place])) as Record<Figure, number>; // fromEntries forgets the keys
-const WIDTH = FIGURES.length;
+/** What is worked out for each size of a batch, and its place there: mean cents of each line, in their order, then the rest. */
+export const FIGURE_AT = {
+  labour: 0,
+  line: 1,
+  metalWrittenOff: 2,
+  metalAgain: 3,
+  chemistry: 4,
+  waste: 5,
+  scrapRisk: 6,
+  meanCents: 7,
+  leastCents: 8,
+  mostCents: 9,
+  handsOnLow: 10,
+  handsOnLikely: 11,
+  handsOnHigh: 12,
+  tankLow: 13,
+  tankLikely: 14,
+  tankHigh: 15,
+  metalLostG: 16,
+} as const satisfies Record<CostLine, number> & Record<string, number>;
+type Figure = keyof typeof FIGURE_AT;
+const WIDTH = 17;
 
 /** How far one term may go, for one unit of its size. */
 export interface UnitSpread {
@@ -44,6 +49,8 @@ export interface PriceList {
   /** For each size in turn (`sizesOf`) its figures, each at its `FIGURE_AT`. */
   perSize: Float64Array;
   spreads: readonly UnitSpread[];
+  /** Of each spread, most less least cents. */
+  widths: Float64Array;
 }
 
 /** A fresh row for the figures of a batch. */
@@ -52,12 +59,12 @@ export const emptyFigures = (): Float64Array => new Float64Array(WIDTH);
 /** All figures of a batch: each size times its row of the list. Written into `figures`, which is handed back. */
 export function multiplyOut(list: PriceList, sizes: readonly number[], figures: Float64Array): Float64Array {
   const { perSize } = list;
-  figures.fill(0);
-  let at = 0;
-  for (const times of sizes) {
-    for (let place = 0; place < WIDTH; place += 1, at += 1) {
-      figures[place] = (figures[place] ?? 0) + (perSize[at] ?? 0) * times;
+  for (let place = 0; place < WIDTH; place += 1) {
+    let sum = 0;
+    for (let size = 0, at = place; size < sizes.length; size += 1, at += WIDTH) {
+      sum += (perSize[at] ?? 0) * (sizes[size] ?? 0);
     }
+    figures[place] = sum;
   }
   return figures;
 }
@@ -124,9 +131,19 @@ export function priceLists(ways: readonly AllowedWay[], facts: ListFacts): reado
     if (each.stageFound === stageFound && each.minutesCorrection === minutesCorrection && each.times === times)
       return each.lists;
   }
+  checkListRates(rates, ways);
   const lists = ways.map((way) => makeList(way, facts));
   known.push({ times, stageFound, minutesCorrection, lists });
   return lists;
+}
+
+/** Rates are checked when a list is made of them, not for each batch. Throws `InputError` naming the rate. */
+function checkListRates(rates: ShopRates, ways: readonly AllowedWay[]): void {
+  for (const field of PLAIN_RATES) requireBetween(field, rates[field], 0, HIGHEST_RATE_CENTS);
+  for (const metal of ways[0]?.metals ?? []) {
+    requireBetween(`metalCentsPerG.${metal}`, metalPrice(rates, metal), 0, HIGHEST_RATE_CENTS);
+    requireBetween(`recoveryShare.${metal}`, rates.recoveryShare[metal] ?? 0, 0, 1);
+  }
 }
 
 function makeList(way: AllowedWay, facts: ListFacts): PriceList {
@@ -143,7 +160,8 @@ function makeList(way: AllowedWay, facts: ListFacts): PriceList {
     const { name, withNext = false } = term;
     return { name, size, withNext, lowCents: ends.low, highCents: ends.high };
   });
-  return { way, perSize, spreads };
+  const widths = Float64Array.from(spreads, ({ lowCents, highCents }) => highCents - lowCents);
+  return { way, perSize, spreads, widths };
 }
 
 const NOTHING: ThreePoint = { low: 0, likely: 0, high: 0 };

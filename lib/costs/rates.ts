@@ -24,17 +24,18 @@ export interface ShopRates {
 /** No rate is above this: ten million in whole money. Beyond it is a slip of the keyboard. */
 export const HIGHEST_RATE_CENTS = 1e9;
 
+/** The rates that are one number each. */
+export const PLAIN_RATES = [
+  "labourCentsPerHour",
+  "lineCentsPerHour",
+  "solutionCentsPerL",
+  "wasteCentsPerL",
+  "abrasiveCentsPerMinute",
+] as const;
+
 /** Throws `InputError` naming the first rate that is missing, negative or absurd. */
 export function checkRates(rates: ShopRates): void {
-  for (const field of [
-    "labourCentsPerHour",
-    "lineCentsPerHour",
-    "solutionCentsPerL",
-    "wasteCentsPerL",
-    "abrasiveCentsPerMinute",
-  ] as const) {
-    requireBetween(field, rates[field], 0, HIGHEST_RATE_CENTS);
-  }
+  for (const field of PLAIN_RATES) requireBetween(field, rates[field], 0, HIGHEST_RATE_CENTS);
   if (!Number.isFinite(rates.validFromAt))
     throw new InputError("validFromAt", "Give the day from which the rates hold.");
   for (const symbol of Object.keys(METALS) as DepositMetal[]) {

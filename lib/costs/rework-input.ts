@@ -1,6 +1,6 @@
 import { BASE_METALS, LIMITS, STAGES_FOUND, type BaseMetal, type StageFound } from "@/lib/cases/case-words";
 import { sizesOf } from "@/lib/costs/price-list";
-import { metalPrice, HIGHEST_RATE_CENTS, type ShopRates } from "@/lib/costs/rates";
+import type { ShopRates } from "@/lib/costs/rates";
 import type { MinutesCorrections } from "@/lib/costs/estimate-record";
 import { MOST_CORRECTION } from "@/lib/costs/correction";
 import { USUAL_REWORK_TIMES, type ReworkTimes } from "@/lib/costs/rework-times";
@@ -8,7 +8,6 @@ import { STRIP_METHODS, type StripMethod } from "@/lib/costs/strip-methods";
 import { SHIPPED_STRIP_TABLE, type StripTable } from "@/lib/costs/strip-plan";
 import { requireBetween, requireOneOf, requirePositive, requireWhole } from "@/lib/input-error";
 import { checkStack, strikeOf, type Layer } from "@/lib/plating/deposit-stack";
-import type { DepositMetal } from "@/lib/plating/metals";
 import { usualPlateMinutes } from "@/lib/plating/plate-practice";
 
 /** What a rework estimate needs to know about a batch of like parts. */
@@ -55,7 +54,8 @@ export function checkReworkInput(input: ReworkInput): CheckedRework {
   if (input.method !== undefined) requireOneOf("method", input.method, STRIP_METHODS);
   checkStack(input.stack);
   checkMoney(input);
-  const onPart = (input.stageFound === "at-strike" ? strikeOf(input.stack) : input.stack).map(meanLayer);
+  const there = input.stageFound === "at-strike" ? strikeOf(input.stack) : input.stack;
+  const onPart = there.some((layer) => layer.thicknessLowUm !== undefined) ? there.map(meanLayer) : there;
   const times = input.times ?? USUAL_REWORK_TIMES;
   const partValueCents = input.partValueCents ?? 0;
   const { quantity, areaDm2 } = input;
@@ -88,26 +88,11 @@ export function batchSizes(
   return sizesOf({ quantity, batchAreaDm2, platingMinutes, valueCents: quantity * batch.partValueCents, layers });
 }
 
-function checkMoney({ partValueCents, minutesCorrection, rates, stack }: ReworkInput): void {
+function checkMoney({ partValueCents, minutesCorrection }: ReworkInput): void {
   if (partValueCents !== undefined) requireBetween("partValueCents", partValueCents, 0, REWORK_LIMITS.partValueCents);
   if (typeof minutesCorrection === "object") {
     for (const method of STRIP_METHODS) checkCorrection(minutesCorrection[method]);
   } else if (minutesCorrection !== undefined) checkCorrection(minutesCorrection);
-  requireBetween("labourCentsPerHour", rates.labourCentsPerHour, 0, HIGHEST_RATE_CENTS);
-  requireBetween("lineCentsPerHour", rates.lineCentsPerHour, 0, HIGHEST_RATE_CENTS);
-  requireBetween("solutionCentsPerL", rates.solutionCentsPerL, 0, HIGHEST_RATE_CENTS);
-  requireBetween("wasteCentsPerL", rates.wasteCentsPerL, 0, HIGHEST_RATE_CENTS);
-  requireBetween("abrasiveCentsPerMinute", rates.abrasiveCentsPerMinute, 0, HIGHEST_RATE_CENTS);
-  for (const { metal } of stack) checkMetalMoney(rates, metal);
-}
-
-/** The field's name is put together only for a refusal: this runs for every case that is priced. */
-function checkMetalMoney(rates: ShopRates, metal: DepositMetal): void {
-  const price = metalPrice(rates, metal);
-  if (!(price >= 0 && price <= HIGHEST_RATE_CENTS))
-    requireBetween(`metalCentsPerG.${metal}`, price, 0, HIGHEST_RATE_CENTS);
-  const share = rates.recoveryShare[metal] ?? 0;
-  if (!(share >= 0 && share <= 1)) requireBetween(`recoveryShare.${metal}`, share, 0, 1);
 }
 
 function checkCorrection(ratio: number): void {

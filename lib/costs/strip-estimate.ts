@@ -60,7 +60,10 @@ export function compareAtStrike(input: ReworkInput): StrikeComparison {
 function chosenList(facts: CheckedRework): PriceList {
   let best: PriceList | undefined;
   let bestCents = Infinity;
-  for (const list of listsOf(facts)) {
+  const lists = listsOf(facts);
+  const [only] = lists;
+  if (only && lists.length === 1 && facts.method === undefined) return only;
+  for (const list of lists) {
     if (facts.method !== undefined && facts.method !== list.way.method) continue;
     const cents = Math.round(meanByList(list, facts.sizes));
     if (best !== undefined && cents >= bestCents) continue;

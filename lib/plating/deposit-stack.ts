@@ -19,10 +19,15 @@ export const THICKEST_STRIKE_UM = 5;
 /** A strike that nobody listed: a thin flash. Plain strike or flash is 0.2 to 2.5 µm (common practice, from memory). */
 export const USUAL_STRIKE_UM = 0.5;
 
-/** Finishes on which no shop lays copper, nickel or another undercoat: seen there, the list is upside down. */
-const FINISHES: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Au", "Ag", "Rh", "Pt", "Pd", "Cr"]);
-const KNOWN: ReadonlySet<string> = new Set(DEPOSIT_METALS);
-const UNDERCOATS: ReadonlySet<DepositMetal> = new Set<DepositMetal>(["Cu", "Ni", "Zn", "Fe", "Co"]);
+/** Finishes on which no shop lays an undercoat: seen there, the list is upside down. */
+const FINISHES: readonly DepositMetal[] = ["Au", "Ag", "Rh", "Pt", "Pd", "Cr"];
+const UNDERCOATS: readonly DepositMetal[] = ["Cu", "Ni", "Zn", "Fe", "Co"];
+const PLACE_OF: ReadonlyMap<string, "finish" | "undercoat" | "either"> = new Map(
+  DEPOSIT_METALS.map((metal) => [
+    metal,
+    FINISHES.includes(metal) ? "finish" : UNDERCOATS.includes(metal) ? "undercoat" : "either",
+  ]),
+);
 
 /** Throws `InputError("stack…")` when the stack is empty, has an impossible layer or lists its layers upside down. */
 export function checkStack(stack: readonly Layer[]): void {
@@ -34,29 +39,32 @@ export function checkStack(stack: readonly Layer[]): void {
   let index = -1;
   for (const layer of stack) {
     index += 1;
-    checkLayer(layer, index);
-    if (finish && UNDERCOATS.has(layer.metal)) {
+    const place = checkLayer(layer, index);
+    if (finish && place === "undercoat") {
       throw new InputError(
         "stack",
         `Layer ${index + 1}, ${metalOf(layer.metal).name}, lies above ${metalOf(finish.metal).name}. List the layers from the base metal out.`,
       );
     }
-    if (FINISHES.has(layer.metal)) finish = layer;
+    if (place === "finish") finish = layer;
   }
 }
 
-function checkLayer(layer: Layer, index: number): void {
+/** @returns where a layer of this metal belongs */
+function checkLayer(layer: Layer, index: number): "finish" | "undercoat" | "either" {
   const { thicknessUm, thicknessLowUm: low, thicknessHighUm: high } = layer;
-  if (!KNOWN.has(layer.metal)) throw new InputError(`stack.${index}.metal`, "This metal is not in the table.");
+  const place = PLACE_OF.get(layer.metal);
+  if (place === undefined) throw new InputError(`stack.${index}.metal`, "This metal is not in the table.");
   // The field's name is put together only for a refusal: this runs for every case that is priced.
   if (!(thicknessUm > 0 && thicknessUm <= STACK_LIMITS.thicknessUm))
     requirePositive(`stack.${index}.thicknessUm`, thicknessUm, STACK_LIMITS.thicknessUm);
   if (layer.valence !== undefined) requireValence(layer.metal, layer.valence, `stack.${index}.valence`);
-  if (low === undefined && high === undefined) return;
+  if (low === undefined && high === undefined) return place;
   if (low === undefined || high === undefined || !(low > 0 && low <= layer.thicknessUm && layer.thicknessUm <= high)) {
     throw new InputError(`stack.${index}.thicknessUm`, "A range runs from low over likely to high, all above 0.");
   }
   requirePositive(`stack.${index}.thicknessHighUm`, high, STACK_LIMITS.thicknessUm);
+  return place;
 }
 
 /** A layer weighed, for all parts together. */
