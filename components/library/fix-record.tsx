@@ -1,14 +1,14 @@
 import Link from "next/link";
 import { OUTCOME_TITLES } from "@/lib/cases/case-words";
 import { counted } from "@/lib/cases/part-words";
-import { minutesWords, workedWords } from "@/lib/library/evidence-words";
+import { minutesWords } from "@/lib/library/evidence-words";
 import type { FixRecord } from "@/lib/library/fix-record";
 import { routes } from "@/lib/routes";
 
 /** Tries drawn and listed, the newest first. */
 const SHOWN = 16;
 
-/** What became of a fix in this shop: tries, the range of its share, minutes, and the cases behind them. */
+/** Behind a fix's "worked 7 of 9": each try, the minutes, and the cases. */
 export function FixRecordView({ record }: { record: FixRecord }) {
   const { tries, range } = record;
   if (tries.length === 0) return <p className="small mid">Not tried here against this class yet.</p>;
@@ -16,7 +16,6 @@ export function FixRecordView({ record }: { record: FixRecord }) {
   const minutes = minutesWords(record);
   return (
     <div className="fix-record">
-      <p className="fix-record__figure">{workedWords(record)}</p>
       <p className="coupons" aria-hidden="true">
         {shown.map(({ ref, round, outcome }) => (
           <i key={`${ref} ${round}`} className={outcome === "sound" ? "is-sound" : "is-not"} />
@@ -30,7 +29,9 @@ export function FixRecordView({ record }: { record: FixRecord }) {
       {minutes && <p className="small">{minutes}</p>}
       <details className="fold">
         <summary>
-          {tries.length > SHOWN ? `Open the last ${SHOWN} of ${tries.length} tries` : `Open ${counted(tries.length, "try").replace(/trys$/, "tries")}`}
+          {tries.length > SHOWN
+            ? `Open the last ${SHOWN} of ${tries.length} tries`
+            : `Open ${counted(tries.length, "try").replace(/trys$/, "tries")}`}
         </summary>
         <ul className="fix-tries">
           {shown.map(({ ref, round, outcome }) => (

@@ -1,4 +1,4 @@
-import { and, asc, count, eq, exists, isNotNull, max, min, ne, sql } from "drizzle-orm";
+import { and, asc, count, desc, eq, exists, isNotNull, max, min, ne, sql } from "drizzle-orm";
 import { BASE_METALS, type BaseMetal, type StationKind } from "@/lib/cases/case-words";
 import type { LibraryEntries } from "@/lib/library/search-documents";
 import type { Handle } from "../open";
@@ -147,13 +147,25 @@ export function countCasesByClass(db: Handle, shopId: number): Map<string, numbe
   return new Map(rows.flatMap((row) => (row.slug === null ? [] : [[row.slug, row.cases]])));
 }
 
-/** The shop's cases of a class by the cause that was named, and when the first of them was opened. */
+/**
+ * Cases of a class whose causes are counted, the newest first: a share does not get truer beyond this many, and reading
+ * all cases of a common class would hold the page up.
+ */
+export const MOST_BY_CAUSE = 1000;
+
+/** The shop's newest cases of a class by the cause that was named, and when the first of them was opened. */
 export function countCasesByCause(db: Handle, shopId: number, classSlug: string) {
-  const rows = db
-    .select({ causeId: cases.confirmedCauseId, cases: count(), firstAt: min(cases.openedAt) })
+  const newest = db
+    .select({ causeId: cases.confirmedCauseId, openedAt: cases.openedAt })
     .from(cases)
     .where(and(eq(cases.shopId, shopId), eq(cases.confirmedClass, classSlug), isNotNull(cases.confirmedCauseId)))
-    .groupBy(cases.confirmedCauseId)
+    .orderBy(desc(cases.openedAt), desc(cases.id))
+    .limit(MOST_BY_CAUSE)
+    .as("newest");
+  const rows = db
+    .select({ causeId: newest.causeId, cases: count(), firstAt: min(newest.openedAt) })
+    .from(newest)
+    .groupBy(newest.causeId)
     .all();
   const firsts = rows.flatMap((row) => row.firstAt ?? []);
   return {

@@ -44,5 +44,5 @@ export function rateWords({ perThousand, cases }: ClassTrend): string | null {
 /** What a trend rests on. */
 export function trendRests(shopFirstAt: number | null, timeZone: string): string {
   const since = shopFirstAt === null ? "" : ` The shop has kept cases since ${dayWords(shopFirstAt, timeZone)}.`;
-  return `Confirmed cases by the month in which they were opened; the last month still runs.${since}`;
+  return `Confirmed cases by the month in which they were opened; the last month still runs. The lists behind the figures also hold parts that were called so and wait for a second look.${since}`;
 }

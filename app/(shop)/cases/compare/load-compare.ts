@@ -74,7 +74,7 @@ function factCells(facts: CaseFacts, classWords: string, minutes: string): FactC
     { label: "Cause", value: facts.causeTitle ?? "" },
     { label: "Symptoms", value: facts.symptoms.map((each) => SYMPTOMS[each].words).join("; ") },
     { label: "Base metal", value: metalWords(facts.baseMetal, facts.alloy) },
-    { label: "Began at", value: facts.traced?.name ?? "" },
+    { label: "Origin", value: facts.traced?.name ?? "" },
     { label: "Method", value: METHOD_TITLES[facts.method] },
     { label: "Found", value: STAGE_TITLES[facts.stageFound] },
     { label: "Parts", value: `${partsOf(facts.quantity, facts.run?.partsStruck ?? null)} ${facts.job.partName}` },

@@ -2,7 +2,7 @@ import type { Metadata } from "next";
 import Link from "next/link";
 import { redirect } from "next/navigation";
 import { CompareBoard } from "@/components/cases/compare-board";
-import { TellsBetweenPair } from "@/components/library/tells-between";
+import { TellsBetweenList } from "@/components/library/tells-between";
 import { ShopShell } from "@/components/shell/shop-shell";
 import { LinkButton } from "@/components/ui/button";
 import { Empty } from "@/components/ui/empty";
@@ -78,11 +78,7 @@ function Compared({ loaded, changeHref }: { loaded: LoadedCompare; changeHref: s
       <CompareBoard columns={columns} rows={rows} changeHref={changeHref} key={columns.map((each) => each.ref).join()} />
       {tells.length > 0 && (
         <Section title="What tells them apart" id="tells" rests="From the library's pages, where the sources stand.">
-          <div className="betweens">
-            {tells.map((pair) => (
-              <TellsBetweenPair key={`${pair.one.slug} ${pair.other.slug}`} pair={pair} />
-            ))}
-          </div>
+          <TellsBetweenList pairs={tells} />
         </Section>
       )}
     </>
