@@ -55,12 +55,12 @@ export function SnapFacts(props: SnapFactsProps) {
         </Button>
       }
     >
-      {open ? <SnapFactFields {...props} /> : <Slip rows={slipRows(choices, facts, now)} />}
       {misfit && (
         <Note tone="rust" title="The metal does not fit the job" className="snap-misfit">
           {misfit} Hold the part; set its base metal if you know it.
         </Note>
       )}
+      {open ? <SnapFactFields {...props} /> : <Slip rows={slipRows(choices, facts, now)} />}
     </Section>
   );
 }

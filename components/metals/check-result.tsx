@@ -3,6 +3,7 @@ import { Note } from "@/components/ui/note";
 import { Rests } from "@/components/ui/rests";
 import { errorWords, openWords, rangeWords, restsWords, shortName } from "@/lib/metals/check-words";
 import type { DeclaredFit } from "@/lib/metals/declared";
+import { declaredSource } from "@/lib/metals/declared-source";
 import type { Material } from "@/lib/metals/material";
 import type { PartReading } from "@/lib/metals/part-reading";
 
@@ -25,6 +26,8 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
   const fitting = candidates.slice(0, MOST_FITTING);
   const against = ruledOut.filter((each) => !isDeclared(each, declared)).slice(0, MOST_RULED_OUT);
   const more = candidates.length - fitting.length;
+  const ofDeclared = declared && declaredSource(declared);
+  const sourced = [...fitting, ...against, ...(declared && ofDeclared ? [{ ...declared, ...ofDeclared }] : [])];
   const rows: FitRow[] = [
     ...fitting.map((each) => ({ ...each, name: shortName(each), fits: true, why: "fits" })),
     ...against.map((each) => ({ ...each, name: shortName(each), fits: false, why: each.reason })),
@@ -42,8 +45,8 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
           {more} more fit as well: {candidates.slice(MOST_FITTING).map(shortName).join(", ")}.
         </p>
       )}
-      <Rests>{restsWords(measured, [...fitting, ...against], { tempTyped, balanceErrorG })}</Rests>
-      <RangeSources metals={[...fitting, ...against]} />
+      <Rests>{restsWords(measured, sourced, { tempTyped, balanceErrorG })}</Rests>
+      <RangeSources metals={sourced} />
       <Note tone="amber" title={candidates.length === 0 ? "What may have misled" : "Before you call it"}>
         <ul className="check-warnings">
           {warnings.map((words) => (
@@ -55,8 +58,10 @@ export function CheckResult({ reading, declared, tempTyped, balanceErrorG }: Che
   );
 }
 
+type SourcedRange = Pick<Material, "name" | "source" | "lowGPerCm3" | "highGPerCm3">;
+
 /** Where each range comes from, for whoever doubts one. */
-function RangeSources({ metals }: { metals: readonly Material[] }) {
+function RangeSources({ metals }: { metals: readonly SourcedRange[] }) {
   if (metals.length === 0) return null;
   return (
     <details className="check-sources no-print">

@@ -3,6 +3,7 @@ import { candidatesFor } from "@/lib/metals/candidates";
 import { caseWarning, checkWarning } from "@/lib/metals/check-warning";
 import { openWords, restsWords, verdictWords, type Declared } from "@/lib/metals/check-words";
 import { declaredFit } from "@/lib/metals/declared";
+import { declaredSource } from "@/lib/metals/declared-source";
 
 /** Readings chosen within published ranges: zinc Alloy 3 6.5 to 6.7 (ASTM B86), brass C360 8.45 to 8.53 (CDA), 304 7.9 to 8.03. */
 const measured = (densityGPerCm3: number, uncertaintyGPerCm3: number) => ({
@@ -100,5 +101,16 @@ describe("the warning that a kept check leaves", () => {
     expect(caseWarning(kept, zinc, BRASS_C360)).toContain("Declared brass C360.");
     expect(caseWarning(kept, zinc, zinc)).toBeNull();
     expect(caseWarning(kept, BRASS_C360, { baseMetal: "steel", alloy: null })).toContain("which does not fit either");
+  });
+});
+
+describe("where a declared range comes from", () => {
+  it("is said of an alloy that is known, and of no other", () => {
+    expect(declaredSource(declaredFit(ZINC, "brass", "C360"))).toEqual({
+      name: "Brass C360",
+      // densities.csv, row C36000: the CDA figure was not seen in print.
+      source: expect.stringContaining("from memory") as unknown,
+    });
+    expect(declaredSource(declaredFit(ZINC, "brass", null))).toBeUndefined();
   });
 });
