@@ -28,7 +28,7 @@ function picked(state: ActState, name: string): string[] {
 export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
   const { state, isBusy, form } = useSend(onSet);
   return (
-    <form {...form} key={state?.ok ? state.value.id : "new"} noValidate className="form">
+    <form key={state?.ok ? state.value.id : "new"} {...form} noValidate className="form">
       <FaultNote state={state} title="The drill was not set" />
       {state?.ok && (
         <Note tone="green" title="The drill is set" role="status">

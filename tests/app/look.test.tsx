@@ -106,6 +106,7 @@ describe("places", () => {
       "Rework",
       "Casebook",
       "Library",
+      "Practice",
       "Part check",
     ]);
   });
@@ -118,6 +119,7 @@ describe("places", () => {
       "Rework",
       "Casebook",
       "Library",
+      "Practice",
       "Part check",
       "Strip",
       "Ledger",

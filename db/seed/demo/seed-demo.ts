@@ -16,6 +16,7 @@ import { DEMO_JOBS } from "./demo-jobs";
 import { seedLine } from "./demo-line";
 import { shotsOf, storeShots, type Shot } from "./demo-photos";
 import { planCases } from "./demo-plan";
+import { playPractice } from "./demo-practice";
 import { playCase, type DemoStage } from "./demo-play";
 
 const DAY_MS = 86_400_000;
@@ -64,6 +65,12 @@ export async function seedDemo(db: Db, options: DemoOptions): Promise<void> {
     if (done % 50 === 0) options.say(`${done} of ${shots.length} photos`);
   });
   db.transaction((tx) => chooseExemplars(tx));
+  const shop = db
+    .select({ id: shops.id })
+    .from(shops)
+    .where(eq(shops.slug, DEMO_SHOPS[0]?.slug ?? ""))
+    .get();
+  if (shop) db.transaction((tx) => playPractice(tx, shop.id, options.now));
   bringCostsUpToDate(db, options.now);
 }
 
