@@ -2,8 +2,11 @@ import { randomUUID } from "node:crypto";
 import { NextRequest } from "next/server";
 import * as account from "@/app/(shop)/account/actions";
 import * as caseActions from "@/app/(shop)/cases/actions";
+import * as savedActions from "@/app/(shop)/cases/saved-actions";
 import * as jobActions from "@/app/(shop)/cases/jobs/actions";
 import * as tagCode from "@/app/(shop)/cases/[ref]/tag/code.svg/route";
+import * as editActions from "@/app/(shop)/library/edit/actions";
+import * as portActions from "@/app/(shop)/library/port/actions";
 import * as metalActions from "@/app/(shop)/metals/actions";
 import * as costActions from "@/app/(shop)/costs/actions";
 import * as wayActions from "@/app/(shop)/costs/strip/ways/actions";
@@ -25,6 +28,7 @@ import * as testPiecesRoute from "@/app/api/estimates/test-pieces/route";
 import * as ledgerRoute from "@/app/api/ledger/route";
 import * as libraryClassRoute from "@/app/api/library/[class]/route";
 import * as libraryEntriesRoute from "@/app/api/library/entries/route";
+import * as libraryExportRoute from "@/app/api/library/export/route";
 import * as libraryRoute from "@/app/api/library/route";
 import * as partCheckRoute from "@/app/api/part-check/route";
 import * as photoSizeRoute from "@/app/api/photos/[id]/[size]/route";
@@ -42,6 +46,7 @@ import {
   closedJob,
   confirmedCase,
   heldCase,
+  keptSearch,
   loosePhoto,
   openQuestion,
   pendingInvite,
@@ -51,6 +56,7 @@ import {
   tickedCase,
   type Aim,
 } from "./targets";
+import { EDIT, entryForm, libraryFileText, overtakenDraft } from "./library-targets";
 
 export const UPLOADS = process.env.UPLOADS_DIR ?? "uploads";
 
@@ -221,6 +227,30 @@ export const ENTRIES: readonly Entry[] = [
     },
   },
 
+  {
+    name: "app/(shop)/cases/saved-actions.ts keepSearch",
+    permission: "search.keep",
+    aims: "self",
+    prepare: () => () => ending(savedActions.keepSearch, { name: "Brass haze", query: "metal=brass" }),
+  },
+  {
+    name: "app/(shop)/cases/saved-actions.ts renameSearch",
+    permission: "search.keep",
+    aims: "row",
+    prepare: (aim) => {
+      const id = keptSearch(aim);
+      return () => ending(savedActions.renameSearch, { id, name: "Brass, all of it" });
+    },
+  },
+  {
+    name: "app/(shop)/cases/saved-actions.ts removeSearch",
+    permission: "search.keep",
+    aims: "row",
+    prepare: (aim) => {
+      const id = keptSearch(aim);
+      return () => ending(savedActions.removeSearch, { id });
+    },
+  },
   {
     name: "app/(shop)/practice/actions.ts askForPhoto",
     permission: "practice.do",
@@ -508,6 +538,76 @@ export const ENTRIES: readonly Entry[] = [
     permission: "library.see",
     aims: "shop",
     prepare: () => () => answered(libraryEntriesRoute.GET, "GET", "/api/library/entries", {}),
+  },
+  {
+    name: "app/api/library/export/route.ts GET",
+    permission: "library.edit",
+    aims: "shop",
+    prepare: () => () => answered(libraryExportRoute.GET, "GET", "/api/library/export", {}),
+  },
+  {
+    name: `${EDIT} saveEntry`,
+    permission: "library.edit",
+    aims: "shop",
+    prepare: (aim) => () => endingOf(editActions.saveEntry, entryForm(aim, "water-spots", { baseRevision: "1" })),
+  },
+  {
+    name: `${EDIT} settleEntry`,
+    permission: "library.edit",
+    aims: "row",
+    prepare: (aim) => {
+      const { slug, draftId, standing } = overtakenDraft(aim);
+      return () => ending(editActions.settleEntry, { entry: "class", slug, draftId, theirRevision: standing });
+    },
+  },
+  {
+    name: `${EDIT} dropDraft`,
+    permission: "library.edit",
+    aims: "row",
+    prepare: (aim) => {
+      const { slug } = overtakenDraft(aim);
+      return () => ending(editActions.dropDraft, { entry: "class", slug });
+    },
+  },
+  {
+    name: `${EDIT} bringBack`,
+    permission: "library.edit",
+    aims: "row",
+    prepare: (aim) => {
+      const { slug, firstId, standing } = overtakenDraft(aim);
+      return () => ending(editActions.bringBack, { entry: "class", slug, baseRevision: standing, revisionId: firstId });
+    },
+  },
+  {
+    name: `${EDIT} removeEntry`,
+    permission: "library.edit",
+    aims: "row",
+    prepare: (aim) => {
+      const { slug, standing } = overtakenDraft(aim);
+      return () => ending(editActions.removeEntry, { entry: "class", slug, baseRevision: standing });
+    },
+  },
+  {
+    name: "app/(shop)/library/port/actions.ts lookAtFile",
+    permission: "library.edit",
+    aims: "shop",
+    prepare: () => () => {
+      const data = new FormData();
+      data.set("file", new Blob([libraryFileText()], { type: "application/json" }));
+      return endingOf(portActions.lookAtFile, data);
+    },
+  },
+  {
+    name: "app/(shop)/library/port/actions.ts bringIn",
+    permission: "library.edit",
+    aims: "shop",
+    prepare: () => () =>
+      ending(portActions.bringIn, {
+        from: "file",
+        text: libraryFileText(),
+        as: "publish",
+        pick: ["source/works-manual@0"],
+      }),
   },
   {
     name: "app/api/library/[class]/route.ts GET",

@@ -91,7 +91,7 @@ export const fixesOfTools: LibraryFix[] = [
         detail:
           "Until no base metal shows (about a micrometre, from memory). Both hold copper back from trading places; an acid copper never goes on bare.",
         minutes: 6,
-        cautionKeys: ["nickel", "brush-power", "waste"],
+        cautionKeys: ["nickel", "waste"],
       }),
       brushStep("strike", "Build copper over it, wet on wet", {
         detail: "Rinse, copper solution on with current from the first touch. Thumb test at the edge after a minute.",
