@@ -1,7 +1,7 @@
 import { StripMetals, type StripMetalView } from "@/components/costs/strip-metals";
 import { ThreeFields, type ThreeFieldsView } from "@/components/costs/three-fields";
 import { CheckField } from "@/components/ui/check-field";
-import { Field } from "@/components/ui/field";
+import { Field, TextAreaField } from "@/components/ui/field";
 import { Glyph } from "@/components/ui/glyph";
 import { fieldFault, typed, type ActState } from "@/lib/act-state";
 import { STRIP_LIMITS } from "@/lib/costs/strip-row.schema";
@@ -19,6 +19,8 @@ export interface StripBathView {
   rate: ThreeFieldsView;
   holding: ThreeFieldsView;
   price: string;
+  /** "$6.10 / L": what holds now. Absent for a way that is new. */
+  priceNow?: string;
   /** Beside the price: "$ / L". */
   priceUnit: string;
   metals: readonly StripMetalView[];
@@ -33,9 +35,10 @@ export function StripBathFields({ view, state }: { view: StripBathView; state: A
     <>
       <ThreeFields view={view.rate} state={state} />
       <ThreeFields view={view.holding} state={state} />
-      <Field
+      <TextAreaField
         label="Where the figures come from"
         name="rateSource"
+        rows={2}
         required
         maxLength={STRIP_LIMITS.sourceChars}
         hint="“Measured here, 12 panels, 3 Aug 2026.” It stands beside every estimate that rests on them."
@@ -47,14 +50,15 @@ export function StripBathFields({ view, state }: { view: StripBathView; state: A
         name="price"
         inputMode="decimal"
         unit={view.priceUnit}
-        hint="Empty: the shop’s one price for strip solution."
+        hint={`${view.priceNow ? `Now ${view.priceNow}. ` : ""}Empty: the shop’s one price for strip solution.`}
         defaultValue={typed(state, "price", view.price)}
         error={fieldFault(state, "price")}
       />
       <StripMetals metals={view.metals} state={state} />
-      <Field
+      <TextAreaField
         label="Where solution and base metals come from"
         name="source"
+        rows={2}
         required
         maxLength={STRIP_LIMITS.sourceChars}
         defaultValue={typed(state, "source", view.source)}

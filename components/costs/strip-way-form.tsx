@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useActionState, useEffect } from "react";
+import { useActionState, useEffect, useState } from "react";
 import { useAnswerFocus } from "@/components/cases/use-answer-focus";
 import { StripBathFields, type StripBathView } from "@/components/costs/strip-bath-fields";
 import { ThreeFields, type ThreeFieldsView } from "@/components/costs/three-fields";
@@ -14,6 +14,7 @@ import { STRIP_LIMITS } from "@/lib/costs/strip-row.schema";
 /** What the action answers. */
 export interface SavedWayAnswer {
   slug: string;
+  rowId: number;
   changed: number;
 }
 export type WayAction = (previous: ActState<SavedWayAnswer>, form: FormData) => Promise<ActState<SavedWayAnswer>>;
@@ -36,6 +37,7 @@ export function StripWayForm({ id, slug, startedFrom, bath, polishing, action }:
   const form = useAnswerFocus(state);
   const router = useRouter();
   const isOvertaken = state !== null && !state.ok && state.fault.code === "conflict";
+  const begun = useBegun(state, isOvertaken, startedFrom);
   useEffect(() => {
     // The row that somebody else saved: the next save begins from it.
     if (isOvertaken) router.refresh();
@@ -44,7 +46,7 @@ export function StripWayForm({ id, slug, startedFrom, bath, polishing, action }:
     <form className="strip-way-form" id={id} action={send} ref={form}>
       <FormAnswer state={state} done={{ title: "The way is saved", words: doneWords(state) }} />
       <input type="hidden" name="slug" value={slug} />
-      <input type="hidden" name="startedFrom" value={startedFrom} />
+      <input type="hidden" name="startedFrom" value={begun} />
       {bath && <StripBathFields view={bath} state={state} />}
       {polishing && (
         <>
@@ -64,6 +66,22 @@ export function StripWayForm({ id, slug, startedFrom, bath, polishing, action }:
       </SubmitButton>
     </form>
   );
+}
+
+/**
+ * The row that what stands in the fields began from. It stays the same when the page behind the form is read again, or
+ * somebody else's row would pass for the one that was seen; it moves with one's own save, and once a conflict is said.
+ */
+function useBegun(state: ActState<SavedWayAnswer>, isOvertaken: boolean, startedFrom: number): number {
+  const [begun, setBegun] = useState(startedFrom);
+  const [answered, setAnswered] = useState(state);
+  if (state !== answered) {
+    setAnswered(state);
+    if (state?.ok) setBegun(state.value.rowId);
+  } else if (isOvertaken && begun !== startedFrom) {
+    setBegun(startedFrom);
+  }
+  return begun;
 }
 
 function doneWords(state: ActState<SavedWayAnswer>): string | undefined {

@@ -135,8 +135,8 @@ function bathFrom(typed: Typed, context: z.RefinementCtx): BathFigures {
 
 /** Low ≤ likely ≤ high, or an issue beside the first figure that is below the one before. */
 function rising(low: number, likely: number, high: number, name: string, context: z.RefinementCtx): ThreePoint {
-  if (likely < low) issueAt(context, `${name}Likely`, "The likely figure is not below the low one.");
-  else if (high < likely) issueAt(context, `${name}High`, "The high figure is not below the likely one.");
+  if (likely < low) issueAt(context, `${name}Likely`, "Write at least the low figure.");
+  else if (high < likely) issueAt(context, `${name}High`, "Write at least the likely figure.");
   return { low, likely, high };
 }
 
@@ -180,7 +180,7 @@ export const addBathInput = z
     ...bathFields,
   })
   .transform(({ method, takesOff, solution, tempLow, tempHigh, current, ...typed }, context) => {
-    if (tempHigh < tempLow) issueAt(context, "tempHigh", "The upper temperature is not below the lower one.");
+    if (tempHigh < tempLow) issueAt(context, "tempHigh", "Write at least the lower temperature.");
     const figures = bathFrom(typed, context);
     const bathTempC: [number, number] = [tempLow, tempHigh];
     return { method, takesOff, solution, bathTempC, current: current || undefined, figures };

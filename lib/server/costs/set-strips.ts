@@ -9,9 +9,10 @@ import type { AddBath, ChangeBath, ChangePolishing, TurnWay } from "@/lib/costs/
 import type { StripRow } from "@/lib/costs/strip-methods";
 import { fault } from "@/lib/fault";
 
-/** The way that was saved, and how many of its facts differ from before. */
+/** The way that was saved, the row that now holds, and how many of its facts differ from before. */
 export interface SavedWay {
   slug: string;
+  rowId: number;
   changed: number;
 }
 
@@ -48,9 +49,9 @@ export function turnWay(db: Db, owner: SignedIn, input: TurnWay, now: number): S
         throw fault("conflict", "Polishing cannot be retired: it is what is left where no bath is safe.");
       if (standing.retired === input.retired)
         throw fault("conflict", `It is ${input.retired ? "retired" : "offered"} already.`);
-      addRow(tx, owner, { ...standing, retired: input.retired }, now);
+      const rowId = addRow(tx, owner, { ...standing, retired: input.retired }, now);
       record(tx, owner, input.retired ? "strip.retired" : "strip.brought-back", standing.row, now);
-      return { slug: input.slug, changed: 1 };
+      return { slug: input.slug, rowId, changed: 1 };
     },
     { behavior: "immediate" },
   );
@@ -65,9 +66,9 @@ export function addBath(db: Db, owner: SignedIn, input: AddBath, now: number): S
       const row = addedBath(slug, input);
       demandSaid(unsaid(null, row));
       const position = Math.max(0, ...rows.map((each) => each.position)) + 1;
-      addRow(tx, owner, { slug, row, position, retired: false }, now);
+      const rowId = addRow(tx, owner, { slug, row, position, retired: false }, now);
       record(tx, owner, "strip.added", row, now, { source: row.source });
-      return { slug, changed: 1 };
+      return { slug, rowId, changed: 1 };
     },
     { behavior: "immediate" },
   );
@@ -88,9 +89,9 @@ function change(db: Db, owner: SignedIn, aim: Aim, now: number, edit: (before: S
       const row = edit(standing.row);
       const changes = stripRowChanges(standing.row, row, owner.shop.currency);
       if (changes.length === 0) throw fault("conflict", NOTHING_DIFFERS);
-      addRow(tx, owner, { ...standing, row }, now);
+      const rowId = addRow(tx, owner, { ...standing, row }, now);
       record(tx, owner, "strip.set", row, now, { changed: changes.map(changeWords) });
-      return { slug: aim.slug, changed: changes.length };
+      return { slug: aim.slug, rowId, changed: changes.length };
     },
     { behavior: "immediate" },
   );
@@ -121,8 +122,16 @@ function demandSaid(fields: Record<string, string>): void {
 
 type Added = Pick<StripHistoryRow, "slug" | "row" | "position" | "retired">;
 
-function addRow(tx: Handle, owner: SignedIn, { slug, row, position, retired }: Added, now: number): void {
-  insertStripRow(tx, { shopId: owner.shopId, slug, row, position, retired, setById: owner.memberId, setAt: now });
+function addRow(tx: Handle, owner: SignedIn, { slug, row, position, retired }: Added, now: number): number {
+  return insertStripRow(tx, {
+    shopId: owner.shopId,
+    slug,
+    row,
+    position,
+    retired,
+    setById: owner.memberId,
+    setAt: now,
+  });
 }
 
 function record(

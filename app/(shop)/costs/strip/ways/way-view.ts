@@ -101,6 +101,7 @@ export function bathFields(row: DissolvingRow | null, currency: string): StripBa
     rate: { name: "rate", label: "Rate", unit: "µm/min", ...figuresOf(row?.rateUmPerMin, "µm/min") },
     holding: { name: "holding", label: "Metal that a litre holds", unit: "g", ...figuresOf(row?.holdingGPerL, "g") },
     price: price === undefined ? "" : decimalText(price / 100),
+    priceNow: price === undefined ? undefined : solutionPriceWords(price, currency),
     priceUnit: `${currencySign(currency)} / L`,
     metals: NAMED_BASE_METALS.map((metal): StripMetalView => {
       const stands = row ? standingOn(row, metal) : ({ standing: "unknown", reason: "" } as const);
