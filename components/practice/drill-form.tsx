@@ -1,6 +1,7 @@
 "use client";
 
 import { classGlyph } from "@/components/cases/class-glyph";
+import { classWords } from "@/components/cases/class-words";
 import { FaultNote } from "@/components/cases/fault-note";
 import { useSend, type FormAct } from "@/components/cases/use-send";
 import { Field } from "@/components/ui/field";
@@ -11,6 +12,8 @@ import { fieldFault, typed, type ActState } from "@/lib/act-state";
 import { DRILL_LIMITS } from "@/lib/practice/drill";
 
 export interface DrillFormProps {
+  /** Id of the form, for the main action in the thumb bar. */
+  id: string;
   classes: readonly { slug: string; title: string; photos: number }[];
   people: readonly { memberId: number; name: string; roleWords: string }[];
   /** Today, as in 2026-12-01: no earlier day can be chosen. */
@@ -25,10 +28,10 @@ function picked(state: ActState, name: string): string[] {
 }
 
 /** A senior sets a drill: what for, which classes, how many photos, for whom, by when. */
-export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
+export function DrillForm({ id, classes, people, today, onSet }: DrillFormProps) {
   const { state, isBusy, form } = useSend(onSet);
   return (
-    <form key={state?.ok ? state.value.id : "new"} {...form} noValidate className="form">
+    <form id={id} key={state?.ok ? state.value.id : "new"} {...form} noValidate className="form">
       <FaultNote state={state} title="The drill was not set" />
       {state?.ok && (
         <Note tone="green" title="The drill is set" role="status">
@@ -53,7 +56,7 @@ export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
         error={fieldFault(state, "classSlugs")}
         options={classes.map((each) => ({
           value: each.slug,
-          label: each.title,
+          label: classWords(each.title),
           glyph: classGlyph(each.slug),
           hint: each.photos === 1 ? "1 photo" : `${each.photos} photos`,
           disabled: each.photos === 0,
@@ -64,6 +67,7 @@ export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
           label="Photos"
           name="photoCount"
           inputMode="numeric"
+          hint={`1 to ${DRILL_LIMITS.photos}.`}
           defaultValue={typed(state, "photoCount", "10")}
           error={fieldFault(state, "photoCount")}
         />
@@ -72,7 +76,7 @@ export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
           name="dueDay"
           type="date"
           min={today}
-          optional
+          hint="Empty: no day is set."
           defaultValue={typed(state, "dueDay")}
           error={fieldFault(state, "dueDay")}
         />
@@ -86,7 +90,7 @@ export function DrillForm({ classes, people, today, onSet }: DrillFormProps) {
         error={fieldFault(state, "memberIds")}
         options={people.map((each) => ({ value: String(each.memberId), label: each.name, hint: each.roleWords }))}
       />
-      <SubmitButton variant="main" busy={isBusy}>
+      <SubmitButton className="desk-only" variant="main" busy={isBusy}>
         Set the drill
       </SubmitButton>
     </form>

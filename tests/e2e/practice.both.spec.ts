@@ -175,7 +175,7 @@ test("a senior sets a drill, the trainee does it, the senior sees how it went an
   await senior.getByRole("checkbox", { name: /^Underactivation/ }).check();
   await senior.getByRole("textbox", { name: /^Photos/ }).fill("2");
   await senior.getByRole("checkbox", { name: /^Dara/ }).check();
-  await senior.getByRole("button", { name: "Set the drill" }).click();
+  await press(senior, /^Set the drill$/);
   await expect(senior.getByText("The drill is set")).toBeVisible();
 
   const trainee = await pageFor(browser, "trainee");

@@ -16,6 +16,8 @@ import { loadDrills } from "./load-drills";
 
 export const metadata: Metadata = { title: "Practice · Drills" };
 
+const FORM = "set-drill";
+
 /** Where seniors set drills and see what came of them. */
 export default async function DrillsPage() {
   const member = await guardPage("drill.set", routes.practiceDrills());
@@ -24,7 +26,14 @@ export default async function DrillsPage() {
   const { actor, counts } = shellFor(member);
   const running = drills.filter((drill) => !drill.isWithdrawn).length;
   return (
-    <ShopShell actor={actor} counts={counts} here="practice" back={routes.practice()} className="practice">
+    <ShopShell
+      actor={actor}
+      counts={counts}
+      here="practice"
+      back={routes.practice()}
+      main={{ label: "Set the drill", form: FORM }}
+      className="practice"
+    >
       <Lead size="page" below="Confirmed photos of the classes you choose, one a case, none twice.">
         {running === 0 ? "No drill is set" : `${counted(running, "drill")} set`}
       </Lead>
@@ -36,9 +45,17 @@ export default async function DrillsPage() {
             drills.map((drill) => <SetDrill key={drill.id} {...drill} onWithdraw={withdrawDrill} />)
           )}
         </Section>
-        <Section title="Set a drill" id="set">
-          <DrillForm classes={classes} people={people} today={dayOf(now, member.shop.timeZone)} onSet={setDrill} />
-        </Section>
+        <div>
+          <Section title="Set a drill" id="set">
+            <DrillForm
+              id={FORM}
+              classes={classes}
+              people={people}
+              today={dayOf(now, member.shop.timeZone)}
+              onSet={setDrill}
+            />
+          </Section>
+        </div>
       </div>
     </ShopShell>
   );

@@ -67,7 +67,12 @@ function People({ shown, shopId }: { shown: number; shopId: number }) {
               </Link>
             ),
           },
-          { key: "right", head: "Right", numeric: true, cell: (row) => `${row.score.right} of ${row.score.calls}` },
+          {
+            key: "right",
+            head: "Right",
+            numeric: true,
+            cell: ({ score }) => (score.calls > 0 ? `${score.right} of ${score.calls}` : "nothing yet"),
+          },
           {
             key: "kappa",
             head: "Kappa",
