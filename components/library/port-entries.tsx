@@ -1,9 +1,10 @@
 "use client";
 
-import { useActionState } from "react";
+import { useActionState, type MouseEvent } from "react";
 import { useAnswerFocus } from "@/components/cases/use-answer-focus";
 import { FormAnswer } from "@/components/crew/form-answer";
 import { FieldChanges } from "@/components/library/word-diff-view";
+import { Button } from "@/components/ui/button";
 import { CheckField } from "@/components/ui/check-field";
 import { Glyph } from "@/components/ui/glyph";
 import { PickGroup } from "@/components/ui/pick";
@@ -67,37 +68,31 @@ export function PortEntries({ from, text = "", view, action }: PortEntriesProps)
       {fresh.length > 0 && (
         <fieldset className="port-list" key={`fresh-${String(sent !== null)}`}>
           <legend>New: {fresh.length}</legend>
-          {fresh.map((entry) => (
-            <CheckField
-              key={entry.pick}
-              name="pick[]"
-              value={entry.pick}
-              label={entry.title}
-              hint={entry.kind}
-              defaultChecked={ticked(entry, true)}
-            />
-          ))}
+          <TickAll />
+          <div className="port-list__rows">
+            {fresh.map((entry) => (
+              <CheckField
+                key={entry.pick}
+                name="pick[]"
+                value={entry.pick}
+                label={entry.title}
+                hint={entry.kind}
+                defaultChecked={ticked(entry, true)}
+              />
+            ))}
+          </div>
         </fieldset>
       )}
       {changed.length > 0 && (
         <fieldset className="port-list" key={`changed-${String(sent !== null)}`}>
-          <legend>Changed: {changed.length}</legend>
+          <legend>Worded otherwise here: {changed.length}</legend>
           <p className="field__hint">Struck through is what this shop says now, underlined what comes in.</p>
-          {changed.map((entry) => (
-            <div key={entry.pick} className="port-list__changed">
-              <CheckField
-                name="pick[]"
-                value={entry.pick}
-                label={entry.title}
-                hint={`${entry.kind}: ${entry.changes.map((change) => change.label.toLowerCase()).join(", ")}`}
-                defaultChecked={ticked(entry, false)}
-              />
-              <details>
-                <summary>What differs in “{entry.title}”</summary>
-                <FieldChanges changes={entry.changes} none="" />
-              </details>
-            </div>
-          ))}
+          <TickAll />
+          <div className="port-list__rows">
+            {changed.map((entry) => (
+              <ChangedEntry key={entry.pick} entry={entry} ticked={ticked(entry, false)} />
+            ))}
+          </div>
         </fieldset>
       )}
       <PickGroup
@@ -121,5 +116,42 @@ export function PortEntries({ from, text = "", view, action }: PortEntriesProps)
         <SubmitButton variant={from === "file" ? "main" : "plain"}>Bring in what is ticked</SubmitButton>
       </div>
     </form>
+  );
+}
+
+/** One that the shop words otherwise: ticked to take it, opened to read what differs. */
+function ChangedEntry({ entry, ticked }: { entry: PortEntry; ticked: boolean }) {
+  return (
+    <div className="port-list__changed">
+      <CheckField
+        name="pick[]"
+        value={entry.pick}
+        label={entry.title}
+        hint={`${entry.kind}: ${entry.changes.map((change) => change.label.toLowerCase()).join(", ")}`}
+        defaultChecked={ticked}
+      />
+      <details>
+        <summary aria-label={`What differs in “${entry.title}”`}>What differs</summary>
+        <FieldChanges changes={entry.changes} none="" />
+      </details>
+    </div>
+  );
+}
+
+/** Ticks every row of its list, or none. The rows themselves are the browser's to keep. */
+function TickAll() {
+  const tick = (checked: boolean) => (event: MouseEvent<HTMLButtonElement>) => {
+    const boxes = event.currentTarget.closest("fieldset")?.querySelectorAll<HTMLInputElement>("input[type=checkbox]");
+    for (const box of boxes ?? []) box.checked = checked;
+  };
+  return (
+    <div className="btns">
+      <Button variant="quiet" onClick={tick(true)}>
+        Tick all
+      </Button>
+      <Button variant="quiet" onClick={tick(false)}>
+        Tick none
+      </Button>
+    </div>
   );
 }

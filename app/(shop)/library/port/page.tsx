@@ -41,7 +41,7 @@ export default async function PortPage({ searchParams }: PortPageProps) {
         The library is the shop’s own
       </Lead>
       {published !== undefined && drafts !== undefined && (
-        <Note tone="green" title="Brought in" role="status">
+        <Note tone="green" title="Brought in" role="status" className="entry-note">
           {published} published, {drafts} as your drafts.{" "}
           {overtaken && `Published by somebody meanwhile, so kept as drafts beside theirs: ${overtaken}. `}
           <Link href={routes.library()}>To the library</Link>

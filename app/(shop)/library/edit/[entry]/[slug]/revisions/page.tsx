@@ -51,16 +51,18 @@ export default async function RevisionsPage({ params, searchParams }: RevisionsP
       <Lead size="page" below={`${counted(rows.length, "row")} in its history; none is ever lost.`}>
         {entryTitle(newest.body)}: revisions
       </Lead>
-      {query.published && (
-        <Note tone="green" title={`Revision ${query.published} is published`} role="status">
-          The page and the search show it now.
-        </Note>
-      )}
-      {standing === 0 && (
-        <Note tone="grey" title="It is not in the library now">
-          Bring a revision back to publish it again.
-        </Note>
-      )}
+      <div className="entry-notes">
+        {query.published && (
+          <Note tone="green" title={`Revision ${query.published} is published`} role="status">
+            The page and the search show it now.
+          </Note>
+        )}
+        {standing === 0 && (
+          <Note tone="grey" title="It is not in the library now">
+            Bring a revision back to publish it again.
+          </Note>
+        )}
+      </div>
       <div className="cols revisions">
         <Section title="What differs" aside={before === after ? undefined : "Word by word"}>
           <Comparison {...view} />

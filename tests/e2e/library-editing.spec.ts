@@ -1,0 +1,154 @@
+import fs from "node:fs";
+import { expect, test, type Page } from "@playwright/test";
+import { pageFor } from "./people";
+import { stored } from "./stored";
+
+const CAUSE = "dried-between-tanks";
+const EDIT = `/library/edit/cause/${CAUSE}`;
+/** The publishing button that is on this screen: under the thumb on a phone, last in the form on a desk. */
+const publish = (page: Page) =>
+  page
+    .getByRole("button", { name: /^Publish/ })
+    .filter({ visible: true })
+    .first()
+    .click();
+
+interface StoredRow {
+  state: string;
+  revision: number;
+  body: string;
+}
+const rowsOf = (shop: string, slug: string) =>
+  stored<StoredRow>(
+    `select r.state, r.revision, r.body from library_revisions r join shops s on s.id = r.shop_id
+     where s.slug = ? and r.slug = ? order by r.id`,
+    shop,
+    slug,
+  );
+const wordsOf = (row: StoredRow | undefined) => JSON.parse(row?.body ?? "{}") as { why: string; proof: string };
+
+test("two seniors edit one entry in two browsers: neither loses a word", async ({ browser }) => {
+  const ines = await pageFor(browser, "senior");
+  const ruth = await pageFor(browser, "owner");
+  await ines.goto(EDIT);
+  await ruth.goto(EDIT);
+  const why = await ines.getByLabel("Why it happens").inputValue();
+  await ruth.getByLabel("Why it happens").fill(`${why} Ruth timed the gap at the hoist.`);
+  await ruth.getByLabel("Proof").fill("Ruth’s proof: a stop watch at the hoist.");
+  await publish(ruth);
+  await expect(ruth.getByText("Revision 2 is published")).toBeVisible();
+
+  await ines.getByLabel("Why it happens").fill(`${why} Ines saw it in the summer.`);
+  await ines.getByLabel("What people also say").fill("hoist gap");
+  await publish(ines);
+  await expect(ines.getByText("published this since you began").first()).toBeVisible();
+  await expect(ines.getByText("Only you changed what people also say: yours stand.")).toBeVisible();
+  await expect(ines.getByText(/Only .* changed proof: theirs stand/)).toBeVisible();
+  await expect(ines.getByText("Ines saw it in the summer.").first()).toBeVisible();
+  const kept = rowsOf("fernhollow", CAUSE);
+  expect(kept.map((row) => row.state)).toEqual(["published", "published", "draft"]);
+  expect(wordsOf(kept[2]).why).toContain("Ines saw it in the summer.");
+
+  await ines.getByRole("radio", { name: "Both, one after the other" }).check();
+  await publish(ines);
+  await expect(ines.getByText("Revision 3 is published")).toBeVisible();
+  const last = wordsOf(rowsOf("fernhollow", CAUSE).at(-1));
+  expect(last.why).toContain("Ruth timed the gap at the hoist.");
+  expect(last.why).toContain("Ines saw it in the summer.");
+  expect(last.proof).toBe("Ruth’s proof: a stop watch at the hoist.");
+
+  // What was published is found at once, and the first revision comes back as a fourth.
+  await ines.goto("/library?q=hoist+gap");
+  await expect(ines.getByRole("link", { name: /dr(ied|y)/i }).first()).toBeVisible();
+  await ines.goto(`${EDIT}/revisions`);
+  await ines.getByRole("button", { name: /^Bring this one back: Revision 1/ }).click();
+  await expect(ines.getByText("Revision 4 is published")).toBeVisible();
+  expect(wordsOf(rowsOf("fernhollow", CAUSE).at(-1)).why).toBe(why);
+  await ines.context().close();
+  await ruth.context().close();
+});
+
+test("typing that was never saved is offered again in the same tab", async ({ browser }) => {
+  const page = await pageFor(browser, "senior");
+  await page.goto("/library/edit/cause/rinse-water-hard");
+  const proof = page.getByLabel("Proof");
+  const before = await proof.inputValue();
+  await proof.fill("A drop on a hot slide.");
+  await page.goto("/library");
+  await page.goto("/library/edit/cause/rinse-water-hard");
+  await expect(proof).toHaveValue(before);
+  await page.getByRole("button", { name: "Put it back" }).click();
+  await expect(proof).toHaveValue("A drop on a hot slide.");
+  await page.context().close();
+});
+
+test("a class of the shop’s own: made, called at the snap, taken to the other shop as a file", async ({ browser }) => {
+  const page = await pageFor(browser, "senior");
+  await page.goto("/library/edit/class");
+  await page.getByLabel("Name", { exact: true }).fill("Smoky edges");
+  await page.getByLabel("In one line").fill("A grey veil along the edges.");
+  await publish(page);
+  await expect(page.getByText("Not saved")).toBeVisible();
+  await expect(page.getByLabel("In one line")).toHaveValue("A grey veil along the edges.");
+  await page.getByLabel("At the strike").fill("A grey veil that wipes to a stain.");
+  await page.getByLabel("Later, in the final plate").fill("Dull nickel at the edges.");
+  await page.getByLabel("What taking it off means").fill("Polish it back and strike again.");
+  await page.getByText("A source that is not listed").click();
+  await page.getByLabel("Kind of source").selectOption("from-memory");
+  await page.getByLabel("Citation").fill("From memory: Ines, 2026");
+  await page.getByRole("button", { name: "Keep as my draft" }).click();
+  await expect(page.getByText("Your draft is kept")).toBeVisible();
+  await publish(page);
+  await expect(page.getByText("Revision 1 is published")).toBeVisible();
+  await page.goto("/library/smoky-edges");
+  await expect(page.getByRole("heading", { level: 1, name: "Smoky edges" })).toBeVisible();
+
+  const waiting = page.waitForEvent("download");
+  await page.goto("/library/port");
+  await page.getByRole("link", { name: "Take the library out" }).click();
+  const file = await (await waiting).path();
+  expect(JSON.parse(fs.readFileSync(file, "utf8"))).toMatchObject({ format: "coppertell-library", version: 1 });
+
+  const other = await pageFor(browser, "otherShopOwner");
+  await other.goto("/library/port");
+  await other.getByLabel("Library file").setInputFiles({
+    name: "hostile.json",
+    mimeType: "application/json",
+    buffer: Buffer.from("[".repeat(5_000)),
+  });
+  await other.getByRole("button", { name: "Look at it first" }).click();
+  await expect(other.getByText("nests deeper than")).toBeVisible();
+  await other.getByLabel("Library file").setInputFiles({
+    name: "library.json",
+    mimeType: "application/json",
+    buffer: fs.readFileSync(file),
+  });
+  await other.getByRole("button", { name: "Look at it first" }).click();
+  await expect(other.getByRole("checkbox", { name: /Smoky edges/ })).toBeChecked();
+  expect(rowsOf("quarry-lane", "smoky-edges")).toEqual([]);
+  await other.getByRole("radio", { name: "Publish at once" }).first().check();
+  await other.getByRole("button", { name: "Bring in what is ticked" }).first().click();
+  await expect(other.getByText("Brought in").first()).toBeVisible();
+  expect(rowsOf("quarry-lane", "smoky-edges").map((row) => row.state)).toEqual(["published"]);
+  await other.context().close();
+
+  const plater = await pageFor(browser, "plater");
+  await plater.goto("/cases/snap");
+  await plater.getByRole("button", { name: "Another" }).last().click();
+  await plater.getByRole("radio", { name: /smoky edges/i }).check();
+  await expect(plater.getByRole("radio", { name: /smoky edges/i }).first()).toBeChecked();
+  await plater.context().close();
+  await page.context().close();
+});
+
+test("an entry that cases point at says so instead of being removed", async ({ browser }) => {
+  const page = await pageFor(browser, "senior");
+  await page.goto("/library/edit/class/underactivation");
+  await expect(page.getByText("It cannot be removed while these point at it.")).toBeVisible();
+  await expect(page.getByRole("link", { name: /cases? stands? under it/ })).toHaveAttribute(
+    "href",
+    "/cases?class=underactivation",
+  );
+  await expect(page.getByRole("button", { name: "Remove from the library" })).toHaveCount(0);
+  await page.context().close();
+});
