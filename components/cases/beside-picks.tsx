@@ -73,8 +73,9 @@ export function BesideBox({ caseRef, hideWords }: { caseRef: string; hideWords?:
       <span className="check__box check__box--checkbox" aria-hidden="true">
         <Glyph name="ui-tick" />
       </span>
-      <span className={hideWords ? "sr-only" : undefined}>Set beside</span>
-      <span className="sr-only">, {caseRef}</span>
+      <span className={hideWords ? "sr-only" : undefined}>
+        Set beside <span className="sr-only">{caseRef}</span>
+      </span>
     </label>
   );
 }

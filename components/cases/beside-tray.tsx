@@ -47,14 +47,24 @@ export function BesideTray({ known, onPage }: BesideTrayProps) {
         {refs.length > 0 && (
           <ul>
             {refs.map((ref) => (
-              <Picked key={ref} picked={known.find((each) => each.ref === ref) ?? { ref, classWords: "", photoId: null }} />
+              <Picked
+                key={ref}
+                picked={known.find((each) => each.ref === ref) ?? { ref, classWords: "", photoId: null }}
+              />
             ))}
           </ul>
         )}
-        {refs.filter((ref) => !onPage.includes(ref)).map((ref) => (
-          <input key={ref} type="hidden" name="refs" value={ref} />
-        ))}
-        <Button type="submit" variant={refs.length >= LEAST_BESIDE ? "main" : "plain"} glyph="ui-step" className="tray__go">
+        {refs
+          .filter((ref) => !onPage.includes(ref))
+          .map((ref) => (
+            <input key={ref} type="hidden" name="refs" value={ref} />
+          ))}
+        <Button
+          type="submit"
+          variant={refs.length >= LEAST_BESIDE ? "main" : "plain"}
+          glyph="ui-step"
+          className="tray__go"
+        >
           {refs.length >= LEAST_BESIDE ? `Compare ${refs.length} in step` : "Compare in step"}
         </Button>
       </Form>
@@ -67,7 +77,9 @@ function Picked({ picked }: { picked: TrayCase }) {
   const { ref, classWords, photoId } = picked;
   return (
     <li>
-      <span className="shot">{photoId && <img src={routes.photo(photoId, "thumb")} alt="" width={56} height={56} />}</span>
+      <span className="shot">
+        {photoId && <img src={routes.photo(photoId, "thumb")} alt="" width={56} height={56} />}
+      </span>
       <span className="tray__words">
         <span className="ref">{ref}</span>
         <span>{classWords}</span>

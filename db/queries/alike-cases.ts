@@ -32,7 +32,9 @@ export function listAlikeCandidates(db: Handle, shopId: number, of: Omit<Compare
         .where(
           and(
             eq(cases.shopId, sql.placeholder("shopId")),
-            by === "class" ? eq(cases.confirmedClass, sql.placeholder("key")) : eq(cases.baseMetal, sql.placeholder("key")),
+            by === "class"
+              ? eq(cases.confirmedClass, sql.placeholder("key"))
+              : eq(cases.baseMetal, sql.placeholder("key")),
             // The plus keeps the metal's own index: with the class's SQLite would sort all cases of the shop.
             by === "metal" ? isNotNull(sql`+${cases.confirmedClass}`) : undefined,
           ),

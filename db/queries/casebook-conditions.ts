@@ -75,11 +75,7 @@ function casesWithExemplar(db: Handle) {
     .innerJoin(photos, and(eq(photos.shopId, exemplars.shopId), eq(photos.id, exemplars.photoId)))
     .innerJoin(
       shown,
-      and(
-        eq(shown.shopId, photos.shopId),
-        eq(shown.id, photos.caseId),
-        eq(shown.confirmedClass, exemplars.classSlug),
-      ),
+      and(eq(shown.shopId, photos.shopId), eq(shown.id, photos.caseId), eq(shown.confirmedClass, exemplars.classSlug)),
     )
     .where(and(eq(exemplars.shopId, given("shopId")), eq(photos.state, "ready")));
 }

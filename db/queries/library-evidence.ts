@@ -34,7 +34,11 @@ export function sumStruckIn(db: Handle, shopId: number, stretches: readonly Stre
 }
 
 /** When the first case of the class, and the shop's first of any, was opened; null where there is none. */
-export function getFirstOpened(db: Handle, shopId: number, classSlug: string): { ofClass: number | null; any: number | null } {
+export function getFirstOpened(
+  db: Handle,
+  shopId: number,
+  classSlug: string,
+): { ofClass: number | null; any: number | null } {
   const ofClass = db.get<{ at: number | null }>(sql`
     select min(opened_at) as at from cases where shop_id = ${shopId} and confirmed_class = ${classSlug}`).at;
   const any = db.get<{ at: number | null }>(sql`select min(opened_at) as at from cases where shop_id = ${shopId}`).at;

@@ -24,12 +24,12 @@ export type SavedSearch = ReturnType<typeof listSavedSearches>[number];
 
 export function insertSavedSearch(
   db: Handle,
-  keeper: Keeper,
+  { shopId, memberId }: Keeper,
   search: { name: string; query: string; at: number },
 ): { id: number } {
   return db
     .insert(savedSearches)
-    .values({ ...keeper, ...search })
+    .values({ shopId, memberId, ...search })
     .returning({ id: savedSearches.id })
     .get();
 }

@@ -119,11 +119,7 @@ export function listExemplars(db: Handle, shopId: number, classSlugs: string[]) 
     // An exemplar of a class that its case no longer has would teach the wrong thing.
     .innerJoin(
       cases,
-      and(
-        eq(cases.shopId, photos.shopId),
-        eq(cases.id, photos.caseId),
-        eq(cases.confirmedClass, exemplars.classSlug),
-      ),
+      and(eq(cases.shopId, photos.shopId), eq(cases.id, photos.caseId), eq(cases.confirmedClass, exemplars.classSlug)),
     )
     .where(and(eq(exemplars.shopId, shopId), inArray(exemplars.classSlug, classSlugs), eq(photos.state, "ready")))
     .orderBy(desc(exemplars.at), asc(exemplars.photoId))

@@ -30,7 +30,7 @@ async function findRefs(browser: Browser): Promise<Refs> {
 }
 
 const pathWith = (path: string, refs: Refs) =>
-  path.replace(/\{(held|card|closed)\}/, (_, state: keyof Refs) => refs[state]);
+  path.replace(/\{(held|card|closed)\}/g, (_, state: keyof Refs) => refs[state]);
 
 async function expectClean(page: Page, where: string): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).analyze();

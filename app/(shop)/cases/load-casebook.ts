@@ -71,7 +71,12 @@ export function loadCasebook(member: SignedIn, asked: CasebookQuery, refs: reado
 }
 
 /** The picked cases, in the order of picking; references that the shop does not have are left out. */
-function listTray(db: Db, shopId: number, refs: readonly string[], view: Parameters<typeof casebookItem>[2]): TrayCase[] {
+function listTray(
+  db: Db,
+  shopId: number,
+  refs: readonly string[],
+  view: Parameters<typeof casebookItem>[2],
+): TrayCase[] {
   const rows = listCasebookById(db, shopId, listIdsByRef(db, shopId, refs));
   const photos = listCasebookPhotos(
     db,

@@ -28,7 +28,7 @@ export function keepSearch({ db, member, now }: Doing, input: KeepSearch): { id:
       demandFree(kept, input.name);
       if (kept.length >= MOST_SAVED)
         throw fault("conflict", `You keep ${MOST_SAVED} searches, which is as many as go in. Remove one first.`);
-      return { ...insertSavedSearch(tx, keeperOf(member), { ...input, at: now }), name: input.name };
+      return { ...insertSavedSearch(tx, member, { ...input, at: now }), name: input.name };
     },
     { behavior: "immediate" },
   );
@@ -42,7 +42,7 @@ export function renameSearch({ db, member }: Doing, input: { id: number; name: s
         listSavedSearches(tx, member).filter((each) => each.id !== input.id),
         input.name,
       );
-      if (!renameSavedSearch(tx, keeperOf(member), input.id, input.name)) throw gone();
+      if (!renameSavedSearch(tx, member, input.id, input.name)) throw gone();
       return input;
     },
     { behavior: "immediate" },
@@ -51,11 +51,10 @@ export function renameSearch({ db, member }: Doing, input: { id: number; name: s
 
 /** @throws FaultError "not-found" for one that this person does not keep */
 export function removeSearch({ db, member }: Doing, input: { id: number }): { id: number } {
-  if (!deleteSavedSearch(db, keeperOf(member), input.id)) throw gone();
+  if (!deleteSavedSearch(db, member, input.id)) throw gone();
   return input;
 }
 
-const keeperOf = ({ shopId, memberId }: SignedIn) => ({ shopId, memberId });
 const gone = () => fault("not-found", "You keep no such search. It may be removed already; reload to see.");
 
 function demandFree(kept: readonly SavedSearch[], name: string): void {

@@ -9,6 +9,7 @@ import type { Db } from "@/db/open";
 import { requireCase } from "@/db/queries/cases";
 import type { SignedIn } from "@/db/queries/crew";
 import { insertInvite } from "@/db/queries/invites";
+import { insertSavedSearch } from "@/db/queries/saved-searches";
 import { invites, photos, photoSizes, reworkCards, reworkSteps, workOrders } from "@/db/schema";
 import { photoPath } from "@/lib/photos/photo-path";
 import { TEST_NOW } from "@/tests/fixtures/crew-factory";
@@ -27,6 +28,11 @@ export interface Aim {
 
 export const heldCase = ({ db, shop, by }: Aim) => makeCase(db, shop, { by });
 export const confirmedCase = (aim: Aim) => confirmFor(aim.db, aim.shop, heldCase(aim));
+
+/** A casebook search that somebody keeps. */
+export function keptSearch({ db, by }: Aim): number {
+  return insertSavedSearch(db, by, { name: "Kept", query: "metal=steel", at: TEST_NOW }).id;
+}
 
 /** Row numbers of the steps of a case's newest card, in order. */
 export function stepsOf({ db }: Aim, caseId: number): number[] {

@@ -35,7 +35,9 @@ function withPhoto(of: TestShop, classSlug: string, now: number) {
   return { ...row, photoId };
 }
 const listed = (filter: CasebookFilter) =>
-  listCasebook(db, shop.shopId, { filter, order: "newest", from: null, limit: 50, isDense: false }).map((row) => row.id);
+  listCasebook(db, shop.shopId, { filter, order: "newest", from: null, limit: 50, isDense: false }).map(
+    (row) => row.id,
+  );
 const doing = (member = shop.members.senior) => ({ db, member, now: TEST_NOW });
 const code = (run: () => unknown): string => {
   try {
@@ -54,7 +56,10 @@ describe("exemplars in the casebook", () => {
     const foreign = withPhoto(other, "peeling", TEST_NOW);
     withPhoto(shop, "peeling", TEST_NOW + 2 * DAY);
     for (const { ref, photoId } of [first, second]) chooseExemplar(doing(), { ref, photoId, chosen: true });
-    chooseExemplar({ db, member: other.members.senior, now: TEST_NOW }, { ref: foreign.ref, photoId: foreign.photoId, chosen: true });
+    chooseExemplar(
+      { db, member: other.members.senior, now: TEST_NOW },
+      { ref: foreign.ref, photoId: foreign.photoId, chosen: true },
+    );
     expect(listed({ exemplars: "only" })).toEqual([second.id, first.id]);
     expect(listed({ exemplars: "only", classSlug: "dewetting" })).toEqual([]);
     expect(countCasebook(db, shop.shopId, { exemplars: "only" }).count).toBe(2);
@@ -107,7 +112,14 @@ describe("candidates that may be alike", () => {
     expect(requireCase(db, shop.shopId, held.ref).state).toBe("held");
   });
   it("are read without walking or sorting the book", () => {
-    const of = { id: 1, baseMetal: "brass", method: "bath", stageFound: "at-strike", symptoms: [], calledClass: null } as const;
+    const of = {
+      id: 1,
+      baseMetal: "brass",
+      method: "bath",
+      stageFound: "at-strike",
+      symptoms: [],
+      calledClass: null,
+    } as const;
     const fresh = emptyDatabase();
     expect(longScans(fresh, () => listAlikeCandidates(fresh, 1, { ...of, confirmedClass: "peeling" }))).toEqual([]);
   });
@@ -148,6 +160,8 @@ describe("searches that somebody keeps", () => {
     const { otherPlater } = shop.members;
     for (let number = 1; number <= 40; number += 1) keepSearch(doing(otherPlater), { ...search, name: `No ${number}` });
     expect(code(() => keepSearch(doing(otherPlater), { ...search, name: "No 41" }))).toBe("conflict");
-    expect(db.select().from(savedSearches).where(eq(savedSearches.memberId, otherPlater.memberId)).all()).toHaveLength(40);
+    expect(db.select().from(savedSearches).where(eq(savedSearches.memberId, otherPlater.memberId)).all()).toHaveLength(
+      40,
+    );
   });
 });

@@ -22,7 +22,15 @@ let polish: { id: number; slug: string };
 let strip: { id: number; slug: string };
 
 /** One round: confirmed as this class, done with this fix in so many minutes, and what the re-strike showed. */
-function round(ref: string, classSlug: string, fixId: number, minutesEach: number, outcome: Outcome, at: number, in_ = shop) {
+function round(
+  ref: string,
+  classSlug: string,
+  fixId: number,
+  minutesEach: number,
+  outcome: Outcome,
+  at: number,
+  in_ = shop,
+) {
   confirmFor(db, in_, requireCase(db, in_.shopId, ref), { classSlug, fixId }, at);
   tickCard(db, in_, ref, minutesEach, at + 60_000);
   const hands = { shopId: in_.shopId, memberId: in_.members.plater.memberId, now: at + 120_000 };
@@ -94,8 +102,7 @@ describe("fixes tried against a class", () => {
     expect([only?.fixSlug, only?.round, only?.outcome]).toEqual([strip.slug, 2, "sound"]);
     expect(more).toEqual([]);
   });
-  it("are none of a class that nobody confirmed", () =>
-    expect(listFixTries(db, shop.shopId, "burning")).toEqual([]));
+  it("are none of a class that nobody confirmed", () => expect(listFixTries(db, shop.shopId, "burning")).toEqual([]));
 });
 
 describe("how often a class came up", () => {
@@ -132,7 +139,9 @@ describe("how often a class came up", () => {
     run(shop, "R-3", 25, TEST_NOW + 2 * DAY);
     run(other, "R-1", 999, TEST_NOW);
     expect(sumStruckIn(db, shop.shopId, weeks)).toEqual([100, 25, 0]);
-    db.delete(runs).where(and(eq(runs.shopId, shop.shopId))).run();
+    db.delete(runs)
+      .where(and(eq(runs.shopId, shop.shopId)))
+      .run();
   });
 });
 

@@ -66,7 +66,8 @@ describe("the cases most alike", () => {
     calledClass: "peeling",
   };
   const like = (id: number, change: Partial<ComparedCase> = {}): ComparedCase => ({ ...own, id, ...change });
-  const idsOf = (candidates: ComparedCase[], limit = 5) => rankAlike(own, candidates, limit).map(({ found }) => found.id);
+  const idsOf = (candidates: ComparedCase[], limit = 5) =>
+    rankAlike(own, candidates, limit).map(({ found }) => found.id);
 
   it("stand by class, then symptoms, then metal", () => {
     const other = like(2, { confirmedClass: "dewetting" });
@@ -94,7 +95,13 @@ describe("the cases most alike", () => {
     const stranger = like(2, { confirmedClass: "burning", symptoms: [], baseMetal: "steel" });
     expect(idsOf([own, stranger])).toEqual([]);
   });
-  it("are at most as many as asked", () => expect(idsOf([2, 3, 4].map((id) => like(id)), 2)).toHaveLength(2));
+  it("are at most as many as asked", () =>
+    expect(
+      idsOf(
+        [2, 3, 4].map((id) => like(id)),
+        2,
+      ),
+    ).toHaveLength(2));
   it("count a photo's reading only where both have one", () => {
     const ranked = rankAlike(own, [like(2), like(3, { openedAt: 1 })], 5, (each) => (each.id === 3 ? 0.9 : null));
     expect(ranked.map(({ found }) => found.id)).toEqual([3, 2]);

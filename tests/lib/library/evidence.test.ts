@@ -15,7 +15,8 @@ const tries = (sound: number, failed: number, minutes: number | null = 20): FixT
 
 describe("the record of a fix", () => {
   // Wilson's score interval for 7 of 9 at 95 %, worked by hand with z = 1.96: (0.7778 + 0.2134 ± 0.3454) / 1.4268.
-  it("says what worked with its range", () => expect(workedWords(fixRecord(tries(7, 2)))).toBe("Worked 7 of 9; 45 to 94 %"));
+  it("says what worked with its range", () =>
+    expect(workedWords(fixRecord(tries(7, 2)))).toBe("Worked 7 of 9; 45 to 94 %"));
   it("says no share below eight tries", () => {
     const record = fixRecord(tries(2, 1));
     expect(workedWords(record)).toBe("Worked 2 of 3");
@@ -76,7 +77,9 @@ describe("the trend of a class", () => {
     expect(rateWords(classTrend(months, { cases: [1, 1], partsStruck: [400, 400] }, null))).toBeNull();
   });
   it("says so when there was none", () =>
-    expect(trendWords(classTrend(months, { cases: [], partsStruck: [] }, null))).toBe("No case in the last 12 months."));
+    expect(trendWords(classTrend(months, { cases: [], partsStruck: [] }, null))).toBe(
+      "No case in the last 12 months.",
+    ));
 });
 
 describe("what tells classes apart", () => {

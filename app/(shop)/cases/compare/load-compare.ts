@@ -32,7 +32,12 @@ export function loadCompare(db: Db, shopId: number, refs: readonly string[], now
 
 export type LoadedCompare = ReturnType<typeof loadCompare>;
 
-function compareOne(db: Db, shopId: number, facts: CaseFacts, now: number): { column: ComparedColumn; cells: FactCell[] } {
+function compareOne(
+  db: Db,
+  shopId: number,
+  facts: CaseFacts,
+  now: number,
+): { column: ComparedColumn; cells: FactCell[] } {
   const shots = listCaseShots(db, shopId, facts.id);
   const cards = listCaseCards(db, shopId, facts.id);
   const card = cards.find((each) => each.round === facts.round);
@@ -60,7 +65,10 @@ function compareOne(db: Db, shopId: number, facts: CaseFacts, now: number): { co
 function clearest(shots: readonly CaseShot[]): number {
   const exemplar = shots.findIndex((shot) => shot.exemplarOf !== null && shot.state === "ready");
   if (exemplar >= 0) return exemplar;
-  return Math.max(0, shots.findIndex((shot) => shot.state === "ready"));
+  return Math.max(
+    0,
+    shots.findIndex((shot) => shot.state === "ready"),
+  );
 }
 
 function minutesOf(cards: ReturnType<typeof listCaseCards>): string {

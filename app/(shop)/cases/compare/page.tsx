@@ -75,7 +75,12 @@ function Compared({ loaded, changeHref }: { loaded: LoadedCompare; changeHref: s
       <Lead size="page" below={differWords(rows)}>
         {leadWords(loaded)}
       </Lead>
-      <CompareBoard columns={columns} rows={rows} changeHref={changeHref} key={columns.map((each) => each.ref).join()} />
+      <CompareBoard
+        columns={columns}
+        rows={rows}
+        changeHref={changeHref}
+        key={columns.map((each) => each.ref).join()}
+      />
       {tells.length > 0 && (
         <Section title="What tells them apart" id="tells" rests="From the library's pages, where the sources stand.">
           <TellsBetweenList pairs={tells} />
@@ -89,7 +94,8 @@ function Compared({ loaded, changeHref }: { loaded: LoadedCompare; changeHref: s
 function leadWords({ columns, titles }: LoadedCompare): string {
   const [first = "", second] = titles;
   const number = countWords(columns.length);
-  if (second === undefined) return `${number.charAt(0).toUpperCase()}${number.slice(1)} cases of ${first.toLowerCase()}`;
+  if (second === undefined)
+    return `${number.charAt(0).toUpperCase()}${number.slice(1)} cases of ${first.toLowerCase()}`;
   if (titles.length === 2) return `${first} beside ${second.toLowerCase()}`;
   return `${number.charAt(0).toUpperCase()}${number.slice(1)} cases, ${countWords(titles.length)} classes`;
 }
