@@ -79,7 +79,7 @@ describe("opening a job", () => {
   it("refuses layers listed upside down: no shop lays nickel on gold", () => {
     const faults = faultsOf({ layer2Metal: "Au", layer2Um: "0.8", layer3Metal: "Ni", layer3Um: "5" });
     // The strike is layer 1, so the form's second row is layer 3.
-    expect(faults).toEqual({ layers: "Layer 3, nickel, lies on gold. List the layers from the base metal out." });
+    expect(faults).toEqual({ layers: "Layer 3, nickel, lies above gold. List the layers from the base metal out." });
   });
 
   it("says which half of a layer is missing, and points at a gap", () => {
