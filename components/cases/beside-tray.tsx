@@ -1,7 +1,8 @@
 "use client";
 
-import Form from "next/form";
 import Link from "next/link";
+import { useRouter } from "next/navigation";
+import type { FormEvent } from "react";
 import { BESIDE_FORM, useBeside } from "@/components/cases/beside-picks";
 import { Button } from "@/components/ui/button";
 import { Glyph } from "@/components/ui/glyph";
@@ -34,9 +35,14 @@ export function trayWords(count: number): string {
 /** The picked cases and the way to compare them. Without script it lies at the foot of the list as a plain form. */
 export function BesideTray({ known, onPage }: BesideTrayProps) {
   const { refs } = useBeside();
+  const router = useRouter();
+  const goThere = (event: FormEvent) => {
+    event.preventDefault();
+    router.push(routes.compare(refs));
+  };
   return (
     <section className={refs.length > 0 ? "tray is-filled" : "tray"} aria-label="Side by side">
-      <Form id={BESIDE_FORM} action={routes.compare([]).split("?")[0] ?? ""} prefetch={false} className="tray__in">
+      <form id={BESIDE_FORM} action={routes.compare([]).split("?")[0]} className="tray__in" onSubmit={goThere}>
         <div className="tray__say">
           <h2>Side by side</h2>
           <p aria-live="polite">
@@ -67,7 +73,7 @@ export function BesideTray({ known, onPage }: BesideTrayProps) {
         >
           {refs.length >= LEAST_BESIDE ? `Compare ${refs.length} in step` : "Compare in step"}
         </Button>
-      </Form>
+      </form>
     </section>
   );
 }
