@@ -14,7 +14,7 @@ export interface AlikeView {
 /** The cases most like this one, each with why, and a way to set it beside this one. */
 export function AlikeCases({ caseRef, alike }: { caseRef: string; alike: readonly AlikeView[] }) {
   return (
-    <ul className="alike">
+    <ul className="alike-cases">
       {alike.map(({ ref, classWords, photo, why }) => (
         <li key={ref}>
           <PhotoFrame
@@ -28,7 +28,7 @@ export function AlikeCases({ caseRef, alike }: { caseRef: string; alike: readonl
               {ref}
             </Link>
             <p>{classWords}</p>
-            <p className="alike__why">{why}</p>
+            <p className="alike-cases__why">{why}</p>
             <Link className="solo small" href={routes.compare([caseRef, ref])} prefetch={false}>
               Set beside<span className="sr-only">: {ref}</span>
             </Link>
