@@ -11,6 +11,8 @@ import { ButtonShelf, FieldShelf } from "./control-shelf";
 import { FigureShelf, TableShelf } from "./figure-shelf";
 import { ACTOR, STATIONS } from "./fixtures";
 import { GlyphShelf } from "./glyph-shelf";
+import { LearningShelf } from "./learning-shelf";
+import { LibraryEditShelf } from "./library-edit-shelf";
 import { NotThereShelf } from "./not-there-shelf";
 import { PracticeShelf } from "./practice-shelf";
 import { RouteShelf } from "./route-shelf";
@@ -67,12 +69,14 @@ export default async function GalleryPage({ searchParams }: { searchParams: Prom
       <CheckShelf />
       <PracticeShelf />
       <StripShelf />
+      <LearningShelf />
       <Section title="Thin strip">
         <div className="bg-band text-on-band band">
           <LineStrip mode="thin" stations={STATIONS} pressed="activate" hrefFor={hrefFor} label="Thin line" />
         </div>
       </Section>
       <GlyphShelf />
+      <LibraryEditShelf />
     </ShopShell>
   );
 }
