@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useActionState, useDeferredValue, useEffect, useState } from "react";
+import { useActionState, useDeferredValue, useEffect, useState, useSyncExternalStore } from "react";
 import { useAnswerFocus } from "@/components/cases/use-answer-focus";
 import { FormAnswer } from "@/components/crew/form-answer";
 import { EntryCauseFields } from "@/components/library/entry-cause-fields";
@@ -50,8 +50,10 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
   const router = useRouter();
   const kept = useKeptTyping(`${entry}/${slug ?? "new"}`, values);
   // What the fields begin with: the entry's words, or those that came back refused. A new version draws the fields afresh.
-  const [start, setStart] = useState({ version: 0, state, values: typedOr(state, values) });
-  if (state !== start.state) setStart({ version: start.version + 1, state, values: typedOr(state, values) });
+  // The revision that they began from stays with them, also when the page is refreshed under the form.
+  const [start, setStart] = useState({ version: 0, state, values: typedOr(state, values), baseRevision });
+  if (state !== start.state) setStart({ ...start, version: start.version + 1, state, values: typedOr(state, values) });
+  const isLive = useSyncExternalStore(neverChanges, yes, no);
   const [shown, setShown] = useState(start.values);
   const preview = useDeferredValue(shown);
   const isOvertaken = state !== null && !state.ok && state.fault.code === "conflict";
@@ -59,11 +61,19 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
     // The page now has a draft and a newer revision: it sets the two side by side.
     if (isOvertaken) router.refresh();
   }, [isOvertaken, router]);
+  const keep = (values: FormValues, sent: boolean) => kept.keep({ values, baseRevision: start.baseRevision, sent });
   const read = () => {
     if (!form.current) return;
     const now = formValues(new FormData(form.current));
     setShown(now);
-    kept.keep(now);
+    keep(now, false);
+  };
+  const putBack = () => {
+    if (!kept.offer) return;
+    const { values, baseRevision } = kept.offer;
+    setStart({ version: start.version + 1, state, values, baseRevision });
+    setShown(values);
+    kept.taken();
   };
   const Fields = FIELDS[entry];
   const errors = (state && !state.ok && state.fault.fields) || {};
@@ -75,22 +85,14 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
         ref={form}
         action={send}
         onInput={read}
-        onSubmit={(event) => kept.keep(formValues(new FormData(event.currentTarget)), true)}
+        onSubmit={(event) => keep(formValues(new FormData(event.currentTarget)), true)}
+        data-live={isLive || undefined}
       >
         <FormAnswer state={state} />
         {kept.offer && (
           <Note tone="blue" title="You typed here before and did not keep it">
             <div className="btns">
-              <Button
-                onClick={() => {
-                  const values = kept.offer ?? {};
-                  setStart({ version: start.version + 1, state, values });
-                  setShown(values);
-                  kept.taken();
-                }}
-              >
-                Put it back
-              </Button>
+              <Button onClick={putBack}>Put it back</Button>
               <Button variant="quiet" onClick={kept.drop}>
                 Let it go
               </Button>
@@ -99,7 +101,7 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
         )}
         <input type="hidden" name="entry" value={entry} />
         <input type="hidden" name="slug" value={slug ?? ""} />
-        <input type="hidden" name="baseRevision" value={baseRevision} />
+        <input type="hidden" name="baseRevision" value={start.baseRevision} />
         <div className="form" key={start.version}>
           <Fields values={start.values} errors={errors} choices={choices} slug={slug} onRows={() => setTimeout(read)} />
           <EntrySourceFields values={start.values} errors={errors} sources={choices.sources} />
@@ -127,6 +129,11 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
     </div>
   );
 }
+
+/** Whether the page's scripts run: typing before that is the browser's alone. */
+const neverChanges = () => () => undefined;
+const yes = () => true;
+const no = () => false;
 
 const typedOr = (state: ActState<KeptAnswer>, values: FormValues): FormValues =>
   state && !state.ok ? state.values : values;

@@ -42,7 +42,7 @@ export function NameChecks({ legend, hint, name, options, chosen, error, folded,
       )}
       <div className="entry-names__list">{ticked.map((option) => check(option, true))}</div>
       {folded && rest.length > 0 ? (
-        <details className="entry-names__rest" open={ticked.length === 0 || undefined}>
+        <details className="entry-names__rest" open={error !== undefined || undefined}>
           <summary>
             {ticked.length === 0 ? "Choose" : "Others"} ({rest.length})
           </summary>

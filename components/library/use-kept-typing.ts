@@ -2,8 +2,10 @@ import { useEffect, useState } from "react";
 import type { FormValues } from "@/lib/library/entry-form";
 import { sameValue } from "@/lib/library/same-value";
 
-interface KeptTyping {
+export interface KeptTyping {
   values: FormValues;
+  /** The published revision that the words began from: putting them back must not hide what was published since. */
+  baseRevision: number;
   /** It was sent: only a fault makes it worth offering again. */
   sent: boolean;
 }
@@ -15,18 +17,18 @@ interface KeptTyping {
  */
 export function useKeptTyping(place: string, begun: FormValues) {
   const key = `library-typing/${place}`;
-  const [offer, setOffer] = useState<FormValues | null>(null);
+  const [offer, setOffer] = useState<KeptTyping | null>(null);
   useEffect(() => {
     const kept = read(key);
     if (!kept) return;
     if (kept.sent || sameValue(kept.values, begun)) forget(key);
     // The tab's own store cannot be read while the page is drawn on the server.
-    else setOffer(kept.values); // eslint-disable-line react-hooks/set-state-in-effect
+    else setOffer(kept);
   }, [key, begun]);
   return {
     /** What was typed here before and never saved; null for nothing. */
     offer,
-    keep: (values: FormValues, sent = false) => write(key, { values, sent }),
+    keep: (kept: KeptTyping) => write(key, kept),
     drop: () => {
       forget(key);
       setOffer(null);

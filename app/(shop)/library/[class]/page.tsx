@@ -72,7 +72,14 @@ export default async function LibraryClassPage({ params, searchParams }: ClassPa
         <a href="#cost">Cost to strip</a>
         <a href="#sources">Sources</a>
       </nav>
-      {can(member, "library.edit") && <ClassDesk member={member} slug={slug} />}
+      {can(member, "library.edit") && (
+        <ClassDesk
+          member={member}
+          slug={slug}
+          otherLikelihood={loaded.entry.otherLikelihood}
+          likelihoods={station ? null : loaded.causes.map((cause) => cause.likelihood)}
+        />
+      )}
       <ClassHead loaded={loaded} timeZone={timeZone} />
       <Exemplars loaded={loaded} />
       <Looks loaded={loaded} />

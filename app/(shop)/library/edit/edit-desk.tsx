@@ -7,6 +7,7 @@ import { getDb } from "@/db/client";
 import type { SignedIn } from "@/db/queries/crew";
 import { listDrafts } from "@/db/queries/library-revisions";
 import { momentWords } from "@/lib/cases/moment-words";
+import { shareSumOff } from "@/lib/library/entry-links";
 import { ENTRY_KINDS, entryTitle } from "@/lib/library/entry-kinds";
 import { routes } from "@/lib/routes";
 
@@ -62,8 +63,17 @@ export function EditDesk({ member }: { member: SignedIn }) {
   );
 }
 
-/** On a class's page: the ways to its editor, and the drafts of it that wait. */
-export function ClassDesk({ member, slug }: { member: SignedIn; slug: string }) {
+interface ClassDeskProps {
+  member: SignedIn;
+  slug: string;
+  otherLikelihood: number;
+  /** The shelf's shares of all its causes; null while the page shows only some of them. */
+  likelihoods: readonly number[] | null;
+}
+
+/** On a class's page: the ways to its editor, the drafts of it that wait, and shares that do not add up. */
+export function ClassDesk({ member, slug, otherLikelihood, likelihoods }: ClassDeskProps) {
+  const sum = likelihoods && shareSumOff(otherLikelihood, likelihoods);
   const drafts = listDrafts(getDb(), member.shopId, { entry: "class", slug });
   const names = drafts.map((draft) => (draft.memberId === member.memberId ? "you" : (draft.memberName ?? "somebody")));
   return (
@@ -78,6 +88,11 @@ export function ClassDesk({ member, slug }: { member: SignedIn; slug: string }) 
       {names.length > 0 && (
         <Note tone="blue" title={`A draft of this page waits: ${names.join(", ")}`}>
           What you read here is what was published last.
+        </Note>
+      )}
+      {sum !== null && (
+        <Note tone="amber" title={`The shelf’s shares of its causes come to ${Math.round(sum * 100)}%`}>
+          With the share of another cause they should come to 100%. Edit the causes that are off.
         </Note>
       )}
     </div>

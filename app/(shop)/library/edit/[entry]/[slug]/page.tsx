@@ -70,9 +70,9 @@ export default async function EditPage({ params, searchParams }: EditPageProps) 
           action={settleEntry}
         />
       ) : (
-        // Keyed: a kept draft is a new beginning.
+        // Keyed: a kept draft is a new beginning. What others publish is none: the form keeps the revision it began from.
         <EntryForm
-          key={`${own?.id ?? 0}-${standing}`}
+          key={own?.id ?? 0}
           id={FORM_ID}
           entry={entry}
           slug={slug}
