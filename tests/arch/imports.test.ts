@@ -7,11 +7,13 @@ import { projectImports, sourceFiles } from "./source-files";
  * here until somebody decides where it belongs.
  */
 const LAYERS: Record<string, readonly string[]> = {
-  "lib/server": ["lib", "lib/server", "db"],
+  // The shelf that ships is part of the product, not demo data: a shop may bring its newer entries in.
+  "lib/server": ["lib", "lib/server", "db", "db/seed/library"],
   lib: ["lib"],
-  "db/seed/demo": ["lib", "lib/server", "db", "db/seed", "db/seed/demo"],
-  "db/scripts": ["lib", "lib/server", "db", "db/seed", "db/seed/demo", "db/scripts"],
-  "db/seed": ["lib", "db", "db/seed"],
+  "db/seed/library": ["lib", "db/seed/library"],
+  "db/seed/demo": ["lib", "lib/server", "db", "db/seed", "db/seed/demo", "db/seed/library"],
+  "db/scripts": ["lib", "lib/server", "db", "db/seed", "db/seed/demo", "db/seed/library", "db/scripts"],
+  "db/seed": ["lib", "db", "db/seed", "db/seed/library"],
   db: ["lib", "db"],
   components: ["lib", "components"],
   app: ["lib", "lib/server", "db", "components", "app", "db/seed"],

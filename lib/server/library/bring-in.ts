@@ -3,7 +3,7 @@ import type { Db, Handle } from "@/db/open";
 import type { SignedIn } from "@/db/queries/crew";
 import { listKnownNames, listShelf } from "@/db/queries/library-entries";
 import { lastRevision } from "@/db/queries/library-revisions";
-import { shelf as shippedShelf } from "@/db/seed/library/shelf";
+
 import { fault } from "@/lib/fault";
 import { compareLibrary, type FileEntry } from "@/lib/library/compare-library";
 import { brokenLinks, type KnownNames } from "@/lib/library/entry-links";
@@ -13,6 +13,7 @@ import type { Shelf } from "@/lib/library/library-entry";
 import type { BringIn } from "@/lib/library/port.schema";
 import { readLibraryFile } from "@/lib/library/read-library-file";
 import { publish, recordEntry } from "./publish-entry";
+import { shippedShelf } from "./shipped-shelf";
 
 /** What came of bringing a file in. */
 export interface BroughtIn {

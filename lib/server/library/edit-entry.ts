@@ -1,5 +1,5 @@
 import { insertRevision } from "@/db/changes/library-entry";
-import { shelf } from "@/db/seed/library/shelf";
+
 import type { Db, Handle } from "@/db/open";
 import type { SignedIn } from "@/db/queries/crew";
 import { getEntry, listKnownNames } from "@/db/queries/library-entries";
@@ -20,6 +20,7 @@ import { entrySlug } from "@/lib/library/entry-slug";
 import type { LibrarySource } from "@/lib/library/library-entry";
 import { mergeEntry, settleMerge } from "@/lib/library/merge-entry";
 import { publish, recordEntry, wholeEntry } from "./publish-entry";
+import { shippedShelf } from "./shipped-shelf";
 
 /** Where an entry stands after it was kept. */
 export interface KeptEntry {
@@ -85,7 +86,7 @@ function demandKnown(tx: Handle, { shopId }: SignedIn, entry: EntryKind, slug: s
 
 /** Not those of the shelf that ships either: this shop may bring its entries in later. */
 function takenSlugs(tx: Handle, shopId: number, entry: EntryKind): Set<string> {
-  const shipped = { class: shelf.classes, cause: shelf.causes, fix: shelf.fixes }[entry];
+  const shipped = { class: shippedShelf.classes, cause: shippedShelf.causes, fix: shippedShelf.fixes }[entry];
   return new Set([...listUsedSlugs(tx, shopId, entry), ...shipped.map((each) => each.slug)]);
 }
 
@@ -117,7 +118,7 @@ function withNewSource(tx: Handle, member: SignedIn, input: SaveEntry, now: numb
   const taken = new Set([
     ...known,
     ...listUsedSlugs(tx, member.shopId, "source"),
-    ...shelf.sources.map((each) => each.key),
+    ...shippedShelf.sources.map((each) => each.key),
   ]);
   const source: LibrarySource = { key: entrySlug(citation, taken), kind, citation };
   publish(tx, member, { kind: "source", body: source, baseRevision: null, note: "" }, now);

@@ -8,7 +8,7 @@ import { Note } from "@/components/ui/note";
 import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
 import { listShelf } from "@/db/queries/library-entries";
-import { shelf } from "@/db/seed/library/shelf";
+import { shippedShelf } from "@/lib/server/library/shipped-shelf";
 import { routes } from "@/lib/routes";
 import { guardPage } from "@/lib/server/session";
 import { shellFor } from "@/lib/server/shell-data";
@@ -27,7 +27,7 @@ export default async function PortPage({ searchParams }: PortPageProps) {
   const db = getDb();
   const { published, drafts, overtaken } = await searchParams;
   const { classes, causes, fixes } = listShelf(db, member.shopId);
-  const shipped = portView(db, member.shopId, shelf);
+  const shipped = portView(db, member.shopId, shippedShelf);
   const { actor, counts } = shellFor(member);
   return (
     <ShopShell actor={actor} counts={counts} here="library" back={routes.library()}>

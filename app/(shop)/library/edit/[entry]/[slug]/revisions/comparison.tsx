@@ -3,7 +3,7 @@ import { Button } from "@/components/ui/button";
 import { SelectField } from "@/components/ui/field";
 import { getDb } from "@/db/client";
 import { listShelf } from "@/db/queries/library-entries";
-import { shelf } from "@/db/seed/library/shelf";
+import { shippedShelf } from "@/lib/server/library/shipped-shelf";
 import { compareEntry } from "@/lib/library/compare-entry";
 import { routes } from "@/lib/routes";
 import { nameWords } from "../../../entry-choices";
@@ -12,7 +12,7 @@ import { rowWords, type RevisionsView } from "./revision-rows";
 /** Two revisions to choose, and what differs between them. */
 export function Comparison({ entry, slug, rows, before, after, member }: RevisionsView) {
   const options = rows.map((row) => ({ value: String(row.id), label: rowWords(row, member) }));
-  const words = nameWords(shelf, listShelf(getDb(), member.shopId));
+  const words = nameWords(shippedShelf, listShelf(getDb(), member.shopId));
   return (
     <>
       <form className="form revisions__choice" action={routes.libraryRevisions(entry, slug)}>
