@@ -58,16 +58,24 @@ export interface CaseCost {
 
 /** The estimate once per round: means add, and so do variances, so the range widens with the root of the rounds. */
 export function estimatedCost(estimate: ReworkFigures, assumed: string[], rounds: number): CaseCost {
-  const exact = estimate.lines.map(({ key, meanCents }): [CaseLine, number] => [key, meanCents * rounds]);
   const root = Math.sqrt(rounds);
-  return caseCostOf("estimated", exact, {
-    below: (estimate.meanCents - estimate.low90Cents) * root,
-    above: (estimate.high90Cents - estimate.meanCents) * root,
+  const lines: CaseCost["lines"] = [];
+  // Whole cents once are whole cents each time: nothing is left to round.
+  for (const { key, name, meanCents } of estimate.lines) {
+    if (meanCents > 0) lines.push({ key, name, meanCents: meanCents * rounds });
+  }
+  const meanCents = estimate.meanCents * rounds;
+  return {
+    basis: "estimated",
+    meanCents,
+    low90Cents: Math.max(0, Math.round(meanCents - (estimate.meanCents - estimate.low90Cents) * root)),
+    high90Cents: Math.round(meanCents + (estimate.high90Cents - estimate.meanCents) * root),
+    lines,
     minutes: estimate.minutes.mean * rounds,
     metalWrittenOffG: estimate.metalWrittenOffG * rounds,
     method: estimate.method,
     assumed,
-  });
+  };
 }
 
 const ESTIMATED_MATERIALS: readonly CaseLine[] = ["metalWrittenOff", "metalAgain", "chemistry", "waste"];

@@ -1,12 +1,18 @@
 import { intervalOf, type ThreePoint } from "@/lib/costs/pert";
-import { emptyFigures, FIGURE_AT, meanByList, multiplyOut, type PriceList } from "@/lib/costs/price-list";
+import {
+  emptyFigures,
+  FIGURE_AT,
+  meanByList,
+  multiplyOut,
+  varianceByList,
+  type PriceList,
+} from "@/lib/costs/price-list";
 import { batchSizes, type CheckedRework } from "@/lib/costs/rework-input";
 import { COST_LINE_KEYS, COST_LINES, type CostLine } from "@/lib/costs/rework-terms";
 import type { StripMethod } from "@/lib/costs/strip-methods";
 import { cautionsFor, sourcesFor, type StripStep } from "@/lib/costs/strip-plan";
 import { InputError } from "@/lib/input-error";
 import { splitCents } from "@/lib/money";
-import type { Layer } from "@/lib/plating/deposit-stack";
 import { metalOf } from "@/lib/plating/metals";
 
 /** A three-point figure with its PERT mean. */
@@ -57,12 +63,17 @@ export function figuresByList(facts: CheckedRework, list: PriceList): ReworkFigu
   if (!(exactCents < Number.MAX_SAFE_INTEGER)) {
     throw new InputError("quantity", "This comes to more money than can be counted. Give fewer parts.");
   }
-  const { low90Cents, high90Cents } = rangeByList(facts, list, exactCents, sums);
+  const spread = thicknessRanges(facts, list);
+  const least = sumOfRanges(spread, "low", sums[FIGURE_AT.leastCents] ?? 0);
+  const most = sumOfRanges(spread, "high", sums[FIGURE_AT.mostCents] ?? 0);
+  const variance = varianceByList(list, facts.sizes) + varianceOf(spread);
+  const { low90, high90 } = intervalOf(exactCents, variance, Math.max(0, least), most);
+  const meanCents = Math.round(exactCents);
   return {
     method: list.way.method,
-    meanCents: Math.round(exactCents),
-    low90Cents,
-    high90Cents,
+    meanCents,
+    low90Cents: Math.min(meanCents, Math.round(low90)),
+    high90Cents: Math.max(meanCents, Math.round(high90)),
     lines: namedLines(splitCents(EXACT)),
     minutes: minutesAt(sums, FIGURE_AT.handsOnLow),
     tankMinutes: minutesAt(sums, FIGURE_AT.tankLow),
@@ -74,35 +85,6 @@ const NAMED_LINES = COST_LINE_KEYS.map((key) => ({ key, name: COST_LINES[key] })
 
 function namedLines(lineCents: readonly number[]): ReworkFigures["lines"] {
   return NAMED_LINES.map(({ key, name }, line) => ({ key, name, meanCents: lineCents[line] ?? 0 }));
-}
-
-/** The 90 % range around the mean, whole cents: the variances of what is independent add, and so do the ends. */
-function rangeByList(facts: CheckedRework, list: PriceList, exactCents: number, sums: Float64Array) {
-  let variance = varianceByList(list, facts.sizes);
-  let least = sums[FIGURE_AT.leastCents] ?? 0;
-  let most = sums[FIGURE_AT.mostCents] ?? 0;
-  for (const { low, high } of thicknessRanges(facts, list)) {
-    variance += ((high - low) / 6) ** 2;
-    least += low;
-    most += high;
-  }
-  const { low90, high90 } = intervalOf(exactCents, variance, Math.max(0, least), most);
-  const meanCents = Math.round(exactCents);
-  return { low90Cents: Math.min(meanCents, Math.round(low90)), high90Cents: Math.max(meanCents, Math.round(high90)) };
-}
-
-function varianceByList({ spreads, widths }: PriceList, sizes: readonly number[]): number {
-  let variance = 0;
-  let width = 0;
-  for (let term = 0; term < spreads.length; term += 1) {
-    const spread = spreads[term];
-    if (!spread) continue;
-    width += (widths[term] ?? 0) * (sizes[spread.size] ?? 0);
-    if (spread.withNext) continue;
-    variance += (width / 6) ** 2;
-    width = 0;
-  }
-  return variance;
 }
 
 /** Figures and words of a way: what widens the range, cautions, sources, what was assumed. */
@@ -149,9 +131,9 @@ const SURE: readonly NamedRange[] = [];
  * so the two ends say it all. The range is around 0: the mean is already counted.
  */
 function thicknessRanges(facts: CheckedRework, list: PriceList): readonly NamedRange[] {
-  if (facts.onPart.every(isSure)) return SURE;
+  if (facts.thicknessKnown) return SURE;
   return facts.onPart.flatMap((layer, index): NamedRange[] => {
-    if (layer.thicknessLowUm === undefined || layer.thicknessHighUm === undefined || isSure(layer)) return [];
+    if (layer.thicknessLowUm === undefined || layer.thicknessHighUm === undefined) return [];
     const costAt = (thicknessUm: number) => {
       const onPart = facts.onPart.with(index, { ...layer, thicknessUm });
       return meanByList(list, batchSizes({ ...facts, onPart }));
@@ -162,15 +144,23 @@ function thicknessRanges(facts: CheckedRework, list: PriceList): readonly NamedR
   });
 }
 
-function isSure({ thicknessLowUm, thicknessHighUm }: Layer): boolean {
-  return thicknessLowUm === thicknessHighUm;
+function sumOfRanges(ranges: readonly NamedRange[], end: "low" | "high", start: number): number {
+  let sum = start;
+  for (const range of ranges) sum += range[end];
+  return sum;
+}
+
+function varianceOf(ranges: readonly NamedRange[]): number {
+  let variance = 0;
+  for (const { low, high } of ranges) variance += ((high - low) / 6) ** 2;
+  return variance;
 }
 
 /** Below a twentieth of the spread a contributor is not worth a name. */
 const LEAST_NAMED_SHARE = 0.05;
 
 function sharesOf(ranges: readonly NamedRange[]): { name: string; share: number }[] {
-  const variance = ranges.reduce((sum, { low, high }) => sum + ((high - low) / 6) ** 2, 0);
+  const variance = varianceOf(ranges);
   if (!(variance > 0)) return [];
   return ranges
     .map(({ name, low, high }) => ({ name, share: ((high - low) / 6) ** 2 / variance }))

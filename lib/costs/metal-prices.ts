@@ -10,13 +10,18 @@ export function withStartingPrices<Rates extends ShopRates>(
   rates: Rates,
   metals: readonly { metal: DepositMetal }[],
 ): { rates: Rates; assumed: string[] } {
-  const missing = new Set<DepositMetal>();
-  for (const { metal } of metals) if (rates.metalCentsPerG[metal] === undefined) missing.add(metal);
-  if (missing.size === 0) return { rates, assumed: [] };
+  const missing = unpriced(rates, metals);
+  if (missing.length === 0) return { rates, assumed: [] };
   const metalCentsPerG = { ...rates.metalCentsPerG };
   for (const metal of missing) metalCentsPerG[metal] = STARTING_RATES.metalCentsPerG[metal];
-  const assumed = [...missing].map(
-    (metal) => `No price set for ${metalOf(metal).name}: the starting price is assumed.`,
-  );
+  const assumed = missing.map((metal) => `No price set for ${metalOf(metal).name}: the starting price is assumed.`);
   return { rates: { ...rates, metalCentsPerG }, assumed };
+}
+
+function unpriced(rates: ShopRates, metals: readonly { metal: DepositMetal }[]): DepositMetal[] {
+  const missing: DepositMetal[] = [];
+  for (const { metal } of metals) {
+    if (rates.metalCentsPerG[metal] === undefined && !missing.includes(metal)) missing.push(metal);
+  }
+  return missing;
 }

@@ -40,6 +40,8 @@ export const REWORK_LIMITS = {
 export interface CheckedRework extends Required<Omit<ReworkInput, "method" | "stack">> {
   method: StripMethod | undefined;
   onPart: readonly Layer[];
+  /** No layer's thickness is a range. */
+  thicknessKnown: boolean;
   /** What a price list is multiplied with. */
   sizes: readonly number[];
   partValueStated: boolean;
@@ -55,7 +57,8 @@ export function checkReworkInput(input: ReworkInput): CheckedRework {
   checkStack(input.stack);
   checkMoney(input);
   const there = input.stageFound === "at-strike" ? strikeOf(input.stack) : input.stack;
-  const onPart = there.some((layer) => layer.thicknessLowUm !== undefined) ? there.map(meanLayer) : there;
+  const thicknessKnown = there.every((layer) => layer.thicknessLowUm === layer.thicknessHighUm);
+  const onPart = thicknessKnown ? there : there.map(meanLayer);
   const times = input.times ?? USUAL_REWORK_TIMES;
   const partValueCents = input.partValueCents ?? 0;
   const { quantity, areaDm2 } = input;
@@ -66,6 +69,7 @@ export function checkReworkInput(input: ReworkInput): CheckedRework {
     stageFound: input.stageFound,
     method: input.method,
     onPart,
+    thicknessKnown,
     sizes: batchSizes({ quantity, areaDm2, onPart, times, partValueCents }),
     partValueCents,
     partValueStated: input.partValueCents !== undefined,

@@ -61,8 +61,8 @@ function chosenList(facts: CheckedRework): PriceList {
   let best: PriceList | undefined;
   let bestCents = Infinity;
   const lists = listsOf(facts);
-  const [only] = lists;
-  if (only && lists.length === 1 && facts.method === undefined) return only;
+  const first = lists[0];
+  if (first && lists.length === 1 && facts.method === undefined) return first;
   for (const list of lists) {
     if (facts.method !== undefined && facts.method !== list.way.method) continue;
     const cents = Math.round(meanByList(list, facts.sizes));

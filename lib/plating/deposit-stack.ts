@@ -124,6 +124,7 @@ export function strikeOf(stack: readonly Layer[]): Layer[] {
 
 function thinTo(layer: Layer, mostUm: number): Layer {
   const { thicknessLowUm: low, thicknessHighUm: high } = layer;
+  if (layer.thicknessUm <= mostUm && low === undefined && high === undefined) return layer;
   const thin: Layer = { ...layer, thicknessUm: Math.min(layer.thicknessUm, mostUm) };
   if (low !== undefined) thin.thicknessLowUm = Math.min(low, mostUm);
   if (high !== undefined) thin.thicknessHighUm = Math.min(high, mostUm);

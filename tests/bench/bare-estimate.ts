@@ -46,17 +46,18 @@ export interface BareFigures {
 
 /** The estimate written flat: the terms of `rework-terms.ts`, nothing checked, nothing named, nothing remembered. */
 export function bareEstimate({ input, plans }: BareCase): BareFigures | undefined {
-  const { rates, stageFound, partValueCents = 0 } = input;
+  const { rates, stageFound, partValueCents = 0, minutesCorrection: correction = 1 } = input;
   const atStrike = stageFound === "at-strike";
   const wasteEach = rates.wasteCentsPerL;
   const abrasive = rates.abrasiveCentsPerMinute;
   let best: BareFigures | undefined;
   for (const plan of plans) {
     const { method } = plan;
+    const corrected = typeof correction === "number" ? correction : correction[method];
     const n = input.quantity;
     const dm2 = n * input.areaDm2;
     const loads = dm2 / T.loadDm2;
-    const labour = rates.labourCentsPerHour / 60;
+    const labour = (rates.labourCentsPerHour / 60) * corrected;
     const line = rates.lineCentsPerHour / 60;
     let mean = 0;
     let lineMean = 0;
@@ -78,9 +79,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
     let plateMinutes = 0;
 
     const setUp = atStrike ? T.setUpAtStrikeMinutes[method] : T.setUpMinutes[method];
-    minutesLow += setUp.low;
-    minutesLikely += setUp.likely;
-    minutesHigh += setUp.high;
+    minutesLow += setUp.low * corrected;
+    minutesLikely += setUp.likely * corrected;
+    minutesHigh += setUp.high * corrected;
     mean += ((setUp.low + 4 * setUp.likely + setUp.high) / 6) * labour;
     let low = setUp.low * labour;
     let high = setUp.high * labour;
@@ -89,9 +90,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
     most += high;
 
     const each = atStrike ? T.handlingAtStrikeMinutesPerPart : T.handlingMinutesPerPart;
-    minutesLow += each.low * n;
-    minutesLikely += each.likely * n;
-    minutesHigh += each.high * n;
+    minutesLow += each.low * n * corrected;
+    minutesLikely += each.likely * n * corrected;
+    minutesHigh += each.high * n * corrected;
     mean += ((each.low + 4 * each.likely + each.high) / 6) * n * labour;
     low = each.low * n * labour;
     high = each.high * n * labour;
@@ -115,9 +116,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
         const a = rate.low * hv.low * per;
         const m = rate.likely * hv.likely * per;
         const b = rate.high * hv.high * per;
-        minutesLow += a;
-        minutesLikely += m;
-        minutesHigh += b;
+        minutesLow += a * corrected;
+        minutesLikely += m * corrected;
+        minutesHigh += b * corrected;
         mean += ((a + 4 * m + b) / 6) * labour;
         chemistry += ((a + 4 * m + b) / 6) * abrasive;
         low = a * (labour + abrasive);
@@ -133,9 +134,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
         tankLow += a;
         tankLikely += m;
         tankHigh += b;
-        minutesLow += a * T.attendedShare;
-        minutesLikely += m * T.attendedShare;
-        minutesHigh += b * T.attendedShare;
+        minutesLow += a * T.attendedShare * corrected;
+        minutesLikely += m * T.attendedShare * corrected;
+        minutesHigh += b * T.attendedShare * corrected;
         mean += ((a + 4 * m + b) / 6) * T.attendedShare * labour;
         lineMean += ((a + 4 * m + b) / 6) * line;
         const litreLow = g / holds.high;
@@ -152,9 +153,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
     }
     if (dissolves) {
       const polish = T.afterStripPolishMinutesPerDm2;
-      minutesLow += polish.low * dm2;
-      minutesLikely += polish.likely * dm2;
-      minutesHigh += polish.high * dm2;
+      minutesLow += polish.low * dm2 * corrected;
+      minutesLikely += polish.likely * dm2 * corrected;
+      minutesHigh += polish.high * dm2 * corrected;
       mean += ((polish.low + 4 * polish.likely + polish.high) / 6) * dm2 * labour;
       chemistry += ((polish.low + 4 * polish.likely + polish.high) / 6) * dm2 * abrasive;
       low = polish.low * dm2 * (labour + abrasive);
@@ -178,9 +179,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
       lineTankLikely += T.lineBeyondStrikeTankMinutes.likely;
       lineTankHigh += T.lineBeyondStrikeTankMinutes.high;
     }
-    minutesLow += lineLow * n;
-    minutesLikely += lineLikely * n;
-    minutesHigh += lineHigh * n;
+    minutesLow += lineLow * n * corrected;
+    minutesLikely += lineLikely * n * corrected;
+    minutesHigh += lineHigh * n * corrected;
     tankLow += lineTankLow * loads;
     tankLikely += lineTankLikely * loads;
     tankHigh += lineTankHigh * loads;
@@ -194,9 +195,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
 
     const factor = T.platingTimeFactor;
     const plate = plateMinutes * loads;
-    minutesLow += factor.low * plate * T.attendedShare;
-    minutesLikely += factor.likely * plate * T.attendedShare;
-    minutesHigh += factor.high * plate * T.attendedShare;
+    minutesLow += factor.low * plate * T.attendedShare * corrected;
+    minutesLikely += factor.likely * plate * T.attendedShare * corrected;
+    minutesHigh += factor.high * plate * T.attendedShare * corrected;
     tankLow += factor.low * plate;
     tankLikely += factor.likely * plate;
     tankHigh += factor.high * plate;
@@ -218,9 +219,9 @@ export function bareEstimate({ input, plans }: BareCase): BareFigures | undefine
 
     if (stageFound === "returned") {
       const back = T.returnMinutes;
-      minutesLow += back.low;
-      minutesLikely += back.likely;
-      minutesHigh += back.high;
+      minutesLow += back.low * corrected;
+      minutesLikely += back.likely * corrected;
+      minutesHigh += back.high * corrected;
       mean += ((back.low + 4 * back.likely + back.high) / 6) * labour;
       low = back.low * labour;
       high = back.high * labour;
