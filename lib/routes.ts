@@ -20,6 +20,8 @@ export const routes = {
   libraryClass: (slug: string, query?: Record<string, string>) => withQuery(`/library/${slug}`, query),
   /** What the library's search is built from, in the browser. */
   libraryEntries: () => "/api/library/entries",
+  /** What of the library answers these words, from the server. */
+  libraryHits: (words: string) => withQuery("/api/library", { q: words }),
   practice: (query?: Record<string, string>) => withQuery("/practice", query),
   practiceProgress: (query?: Record<string, string>) => withQuery("/practice/progress", query),
   practiceDrills: () => "/practice/drills",

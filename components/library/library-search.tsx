@@ -1,6 +1,6 @@
 "use client";
 
-import { useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
+import { useDeferredValue, useEffect, useRef, useState } from "react";
 import type { KeyboardEvent, SubmitEvent } from "react";
 import { SearchHits, type ClassTitles } from "@/components/library/search-hits";
 import { useLibrarySearch } from "@/components/library/use-library-search";
@@ -10,27 +10,33 @@ import { Glyph } from "@/components/ui/glyph";
 import { KeyCap } from "@/components/ui/key-cap";
 import { counted } from "@/lib/cases/part-words";
 import { LIMITS } from "@/lib/cases/case-words";
-import type { LibraryHit } from "@/lib/library/library-search";
+import type { LibraryHit } from "@/lib/library/library-hit";
 import { routes } from "@/lib/routes";
 
 export interface LibrarySearchFieldProps {
   /** What the address asks for, and what the server answered to it: the same without script. */
   query: string;
   hits: readonly LibraryHit[];
+  /** Too large for the browser to search by itself. */
+  isLarge: boolean;
   /** Kept in the address when the form is sent. */
   station: string | null;
   classTitles: ClassTitles;
 }
 
 /**
- * The library's search. It answers at each key once the entries are in the browser; until then, and without script, the
- * form asks the server. Arrows move through the hits, Enter opens one, Escape clears, "/" comes back to the field.
+ * The library's search. It answers at each key once the entries are in the browser, a large library from the server; until
+ * then, and without script, the form is sent. Arrows move through the hits, Enter opens one, a letter goes on in the field,
+ * Escape clears, "/" comes back to the field.
  */
-export function LibrarySearchField({ query, hits, station, classTitles }: LibrarySearchFieldProps) {
+export function LibrarySearchField({ query, hits, isLarge, station, classTitles }: LibrarySearchFieldProps) {
   const field = useRef<HTMLInputElement>(null);
   const box = useRef<HTMLDivElement>(null);
   const [typed, setTyped] = useState(query);
-  const { search, load } = useLibrarySearch();
+  // The field shows each letter first; the hits follow, and on a slow phone may skip one.
+  const asked = useDeferredValue(typed).trim();
+  const found = useLibrarySearch({ asked, given: { query, hits }, isLarge });
+  const { load } = found;
   useSlashFocuses(field);
   useEffect(() => {
     // Coming back to the page, the address holds what was typed last; the page may be an older one.
@@ -40,9 +46,6 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
     load();
   }, [query, load]);
 
-  // The field shows each letter first; the hits follow, and on a slow phone may skip one.
-  const asked = useDeferredValue(typed).trim();
-  const found = useMemo(() => (search ? search(asked) : asked === query ? hits : null), [search, asked, query, hits]);
   const keepInAddress = (words: string) => {
     const next = { ...(words ? { q: words } : {}), ...(station ? { station } : {}) };
     window.history.replaceState(null, "", routes.library(next));
@@ -53,21 +56,18 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
     field.current?.focus();
   };
   const onKeyDown = (event: KeyboardEvent) => {
-    const links = [...(box.current?.querySelectorAll<HTMLAnchorElement>(".hits a") ?? [])];
-    const at = links.findIndex((link) => link === document.activeElement);
     if (event.key === "Escape") clear();
-    if (event.key !== "ArrowDown" && event.key !== "ArrowUp") return;
-    event.preventDefault();
-    const next = at + (event.key === "ArrowDown" ? 1 : -1);
-    if (next < 0) field.current?.focus();
-    else links[Math.min(next, links.length - 1)]?.focus();
+    else if (event.key === "ArrowDown" || event.key === "ArrowUp") {
+      event.preventDefault();
+      moveFocus(box.current, field.current, event.key === "ArrowDown" ? 1 : -1);
+    } else if (isLetter(event) && event.target instanceof HTMLAnchorElement) field.current?.focus();
   };
   const onSubmit = (event: SubmitEvent<HTMLFormElement>) => {
-    // Without the entries here, the form goes to the server as it would without script.
-    if (!search) return;
+    // Until the answers come at each key, the form goes to the server as it would without script.
+    if (!found.isReady) return;
     event.preventDefault();
     keepInAddress(asked);
-    box.current?.querySelector<HTMLAnchorElement>(".hits a")?.focus();
+    linksIn(box.current)[0]?.focus();
   };
 
   return (
@@ -79,6 +79,9 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
         <label className="field__label" htmlFor="library-q">
           Say it as you see it
         </label>
+        <p className="field__hint" id="library-q-hint">
+          What the copper looks like, the alloy or the tank. Spelling does not matter.
+        </p>
         <span className="seek">
           <Glyph name="ui-find" />
           <input
@@ -93,6 +96,7 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
             autoCapitalize="none"
             spellCheck={false}
             enterKeyHint="search"
+            aria-describedby="library-q-hint"
             aria-keyshortcuts="/"
             onFocus={load}
             onChange={(event) => setTyped(event.target.value)}
@@ -101,12 +105,34 @@ export function LibrarySearchField({ query, hits, station, classTitles }: Librar
         </span>
       </form>
       <p className="sr-only" role="status">
-        {asked && found ? counted(found.length, "hit") : ""}
+        {asked && found.hits ? announcement(found.hits) : ""}
       </p>
-      {asked && found && <SearchHits query={asked} hits={found} classTitles={classTitles} />}
-      {asked && !found && <p className="rests">Enter asks the library.</p>}
+      {asked && found.hits && <SearchHits query={found.answered} hits={found.hits} classTitles={classTitles} />}
+      {asked && !found.hits && <p className="rests">{found.isReady ? "Looking." : "Enter asks the library."}</p>}
     </div>
   );
+}
+
+/** How many hits there are and the first of them, for who does not see the list change. */
+function announcement(hits: readonly LibraryHit[]): string {
+  const [first] = hits;
+  return first ? `${counted(hits.length, "hit")}, first ${first.title}` : "Nothing found";
+}
+
+function linksIn(box: HTMLElement | null): HTMLAnchorElement[] {
+  return [...(box?.querySelectorAll<HTMLAnchorElement>(".hits a") ?? [])];
+}
+
+/** To the next hit or the one before; before the first stands the field. */
+function moveFocus(box: HTMLElement | null, field: HTMLElement | null, by: 1 | -1): void {
+  const links = linksIn(box);
+  const next = links.findIndex((link) => link === document.activeElement) + by;
+  if (next < 0) field?.focus();
+  else links[Math.min(next, links.length - 1)]?.focus();
+}
+
+function isLetter({ key, ctrlKey, metaKey, altKey }: KeyboardEvent): boolean {
+  return key.length === 1 && key !== " " && key !== "/" && !ctrlKey && !metaKey && !altKey;
 }
 
 /** "/" comes to the field, ahead of the band's own. */

@@ -1,9 +1,12 @@
 import Link from "next/link";
 import { classGlyph } from "@/components/cases/class-glyph";
+import { LinkButton } from "@/components/ui/button";
 import { Empty } from "@/components/ui/empty";
 import { Glyph } from "@/components/ui/glyph";
+import { MarkedParts } from "@/components/ui/marked-parts";
 import { hitHref } from "@/lib/library/hit-href";
-import type { LibraryHit } from "@/lib/library/library-search";
+import type { LibraryHit } from "@/lib/library/library-hit";
+import { routes } from "@/lib/routes";
 
 /** What each class is called, by slug. */
 export type ClassTitles = Readonly<Record<string, string>>;
@@ -31,7 +34,14 @@ function hitWords(hit: LibraryHit, classTitles: ClassTitles): string {
 export function SearchHits({ query, hits, classTitles }: SearchHitsProps) {
   if (hits.length === 0) {
     return (
-      <Empty title={`Nothing in the library answers “${query}”.`}>
+      <Empty
+        title={`Nothing in the library answers “${query}”.`}
+        action={
+          <LinkButton href={routes.casebook({ q: query })} prefetch={false}>
+            Look in the casebook
+          </LinkButton>
+        }
+      >
         Try one word of it: what the copper looks like, the alloy, or the tank.
       </Empty>
     );
@@ -43,9 +53,13 @@ export function SearchHits({ query, hits, classTitles }: SearchHitsProps) {
           <Link href={hitHref(hit)} prefetch={false}>
             <Glyph name={classGlyph(hit.classes[0] ?? null)} />
             <span className="hits__words">
-              <strong>{hit.title}</strong>
+              <strong>{hit.matched === hit.title ? <MarkedParts parts={hit.parts} /> : hit.title}</strong>
               <span className="hits__kind">{hitWords(hit, classTitles)}</span>
-              {hit.matched !== hit.title && <span className="hits__matched">matched “{hit.matched}”</span>}
+              {hit.matched !== hit.title && (
+                <span className="hits__matched">
+                  matched “<MarkedParts parts={hit.parts} />”
+                </span>
+              )}
             </span>
           </Link>
         </li>

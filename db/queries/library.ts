@@ -28,6 +28,13 @@ export function getLibraryMark(db: Handle, shopId: number): string {
 /** Whether a stored word is one of the product's base metals. */
 export const isBaseMetal = (metal: string): metal is BaseMetal => BASE_METALS.some((known) => known === metal);
 
+/** How many classes, causes and fixes the shop's library has together. */
+export function countEntries(db: Handle, shopId: number): number {
+  return [libraryClasses, libraryCauses, libraryFixes]
+    .map((table) => db.select({ entries: count() }).from(table).where(eq(table.shopId, shopId)).get())
+    .reduce((sum, row) => sum + (row?.entries ?? 0), 0);
+}
+
 /** What of the shop's library is searched, each kind in shelf order. */
 export function listSearchEntries(db: Handle, shopId: number): LibraryEntries {
   const { slug, title, short, atStrike, inFinalPlate, synonyms } = libraryClasses;

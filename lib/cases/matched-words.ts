@@ -12,10 +12,18 @@ export interface TextPart {
  *   // [{ text: "Thin by the ", isMatch: false }, { text: "keyway", isMatch: true }]
  */
 export function matchedParts(text: string, terms: readonly SearchTerm[]): TextPart[] {
+  return partsByWord(text, /[\p{L}\p{N}\p{M}]+/gu, (word) => isFound(word, terms));
+}
+
+/**
+ * A text cut at its words that were found.
+ * @param words what a word is, global
+ */
+export function partsByWord(text: string, words: RegExp, isFoundWord: (word: string) => boolean): TextPart[] {
   const parts: TextPart[] = [];
   let from = 0;
-  for (const word of text.matchAll(/[\p{L}\p{N}\p{M}]+/gu)) {
-    if (!isFound(word[0], terms)) continue;
+  for (const word of text.matchAll(words)) {
+    if (!isFoundWord(word[0])) continue;
     if (word.index > from) parts.push({ text: text.slice(from, word.index), isMatch: false });
     parts.push({ text: word[0], isMatch: true });
     from = word.index + word[0].length;

@@ -1,5 +1,5 @@
 import { routes } from "@/lib/routes";
-import type { LibraryHit } from "./library-search";
+import type { LibraryHit } from "./library-hit";
 
 /** Where a hit leads: a class to its page; a cause or fix to its place on the page of the class that it shows as most. */
 export function hitHref(hit: Pick<LibraryHit, "slug" | "kind" | "classes">): string {

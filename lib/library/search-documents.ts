@@ -39,6 +39,8 @@ export interface SearchDocument {
   metalPhrases: SearchPhrase[];
   /** Index words, each with how much it says about the entry (0 to 1): by where it stands. */
   words: ReadonlyMap<string, number>;
+  /** Its explanations, line by line. */
+  body: readonly string[];
   /** Its text as written, for the vocabulary. */
   prose: string;
 }
@@ -99,29 +101,47 @@ function documentOf(
 ): SearchDocument {
   const named = [title, ...texts.also];
   const about = metalsNamedIn(title);
-  const atRisk = texts.metals.flatMap(namesOfMetal);
+  const metals = texts.metals.map(metalTextOf);
+  const phrases = named.map((said) => asPhrase(said, NAMED));
   const words = new Map<string, number>();
-  weigh(words, atRisk, metalWeight(texts.metals.length));
-  weigh(words, texts.body, EXPLAINED);
-  weigh(words, about.names, about.weight);
-  weigh(words, named, NAMED);
+  for (const metal of metals) weigh(words, metal.words, metalWeight(metals.length));
+  weigh(words, texts.body.flatMap(searchWords), EXPLAINED);
+  weigh(words, about.names.flatMap(searchWords), about.weight);
+  for (const phrase of phrases) weigh(words, phrase.words, NAMED);
   return {
     slug,
     title,
     kind,
     classes,
-    phrases: [
-      ...named.map((said) => asPhrase(said, NAMED)),
-      ...about.names.map((said) => asPhrase(said, about.weight)),
-    ],
-    metalPhrases: atRisk.map((said) => asPhrase(said, NAMED)),
+    phrases: [...phrases, ...about.names.map((said) => asPhrase(said, about.weight))],
+    metalPhrases: metals.flatMap((metal) => metal.phrases),
     words,
-    prose: [...named, ...about.names, ...atRisk, ...texts.body].join(" "),
+    body: texts.body,
+    prose: [...named, ...about.names, ...metals.map((metal) => metal.prose), ...texts.body].join(" "),
   };
 }
 
-function weigh(words: Map<string, number>, lines: readonly string[], weight: number): void {
-  for (const word of lines.flatMap(searchWords)) words.set(word, Math.max(weight, words.get(word) ?? 0));
+function weigh(weights: Map<string, number>, words: readonly string[], weight: number): void {
+  for (const word of words) weights.set(word, Math.max(weight, weights.get(word) ?? 0));
+}
+
+interface MetalText {
+  phrases: SearchPhrase[];
+  words: string[];
+  prose: string;
+}
+
+const metalTexts = new Map<BaseMetal, MetalText>();
+
+/** A metal's names. Each has some twenty and stands in half of the causes: they are read once. */
+function metalTextOf(metal: BaseMetal): MetalText {
+  const kept = metalTexts.get(metal);
+  if (kept) return kept;
+  const names = namesOfMetal(metal);
+  const phrases = names.map((said) => asPhrase(said, NAMED));
+  const text = { phrases, words: [...new Set(phrases.flatMap(({ words }) => words))], prose: names.join(" ") };
+  metalTexts.set(metal, text);
+  return text;
 }
 
 function asPhrase(said: string, weight: number): SearchPhrase {

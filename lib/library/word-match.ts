@@ -21,8 +21,8 @@ export interface WordMatch {
   cover: number;
   /** 0 to 1: how like one phrase of the entry what was typed is. */
   likeness: number;
-  /** That phrase. */
-  said: string;
+  /** That phrase; null where only the entry's explanations hold what was typed. */
+  said: string | null;
 }
 
 export function askedOf(placed: readonly PlacedWord[], index: WordIndex): Asked {
@@ -62,7 +62,7 @@ export function matchOf(document: SearchDocument, asked: Asked, index: WordIndex
   const phrase = nearestPhrase(document.phrases, asked, index);
   if (phrase.likeness > 0) return { held, cover, ...phrase };
   const metal = nearestPhrase(document.metalPhrases, asked, index);
-  return { held, cover, likeness: 0, said: metal.likeness > 0 ? metal.said : document.title };
+  return { held, cover, likeness: 0, said: metal.likeness > 0 ? metal.said : null };
 }
 
 function nearestPhrase(phrases: readonly SearchPhrase[], asked: Asked, index: WordIndex) {

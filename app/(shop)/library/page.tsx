@@ -11,9 +11,10 @@ import { Lead } from "@/components/ui/lead";
 import { Note } from "@/components/ui/note";
 import { Section } from "@/components/ui/section";
 import { getDb } from "@/db/client";
-import { countCasesByClass, listClassCards, type ClassCardRow } from "@/db/queries/library";
+import { countCasesByClass, countEntries, listClassCards, type ClassCardRow } from "@/db/queries/library";
 import { getStation } from "@/db/queries/line";
 import { listExemplars } from "@/db/queries/second-look-against";
+import { isLargeLibrary } from "@/lib/library/library-size";
 import { shelfWords } from "@/lib/library/shelf-words";
 import { libraryQuerySchema } from "@/lib/library/library-query.schema";
 import { can } from "@/lib/permissions";
@@ -69,6 +70,7 @@ export default async function LibraryPage({ searchParams }: LibraryPageProps) {
           key={query.q}
           query={query.q}
           hits={query.q ? librarySearchFor(db, member.shopId)(query.q) : []}
+          isLarge={isLargeLibrary(countEntries(db, member.shopId))}
           station={station?.slug ?? null}
           classTitles={Object.fromEntries(all.map((each) => [each.slug, each.title]))}
         />

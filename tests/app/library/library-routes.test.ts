@@ -56,6 +56,11 @@ describe("GET /api/library", () => {
       classes: ["underactivation"],
       score: expect.any(Number),
       matched: "sleepy brass",
+      parts: [
+        { text: "sleepy", isMatch: true },
+        { text: " ", isMatch: false },
+        { text: "brass", isMatch: true },
+      ],
     });
   });
 
