@@ -123,6 +123,20 @@ test("the line strip, the casebook's search and the library answer to keys", asy
   ) {
     await page.keyboard.press("Tab");
   }
+  await page.keyboard.type("pizza delivery");
+  await expect(page.getByText("Nothing in the library answers “pizza delivery”.")).toBeVisible();
+  await page.keyboard.press("Escape");
+  await expect(field).toHaveValue("");
+  await expect(field).toBeFocused();
   await page.keyboard.type("smutt");
-  await expect(page.getByText("Overactivation").first()).toBeVisible();
+  const hits = page.getByRole("list", { name: "What the library found" }).getByRole("link");
+  await expect(hits.first()).toContainText("Overactivation");
+  await expect(hits.first().locator("mark").first()).toHaveText(/smut/i);
+  await page.keyboard.press("ArrowDown");
+  await expect(hits.first()).toBeFocused();
+  await page.keyboard.press("ArrowUp");
+  await expect(field).toBeFocused();
+  await page.keyboard.press("ArrowDown");
+  await page.keyboard.press("Enter");
+  await expect(page).toHaveURL(/\/library\/overactivation/);
 });
