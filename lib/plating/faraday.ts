@@ -133,7 +133,8 @@ function densityOf({ metal, densityGCm3 }: Deposit): number {
 
 /** A result that can be counted. One that is endless is the fault of an input so small that nobody means it. */
 function requireCountable(field: string, result: number): number {
-  if (!Number.isFinite(result)) throw new InputError(field, "So small a number has no result that can be counted. Give a greater one.");
+  if (!Number.isFinite(result))
+    throw new InputError(field, "So small a number has no result that can be counted. Give a greater one.");
   return result;
 }
 

@@ -11,7 +11,9 @@ import {
   thicknessOfMassUm,
   umPerHourAtOneADm2,
 } from "@/lib/plating/faraday";
-import { DEPOSIT_METALS, METALS, type DepositMetal } from "@/lib/plating/metals";
+import { DEPOSIT_METALS, METALS, parseMetal, type DepositMetal } from "@/lib/plating/metals";
+import { milToUm, squareInchToDm2 } from "@/lib/units";
+import { referenceRows } from "@/tests/fixtures/reference-rows";
 
 describe("electrochemical equivalents agree with the handbook", () => {
   // g/(A·h) as printed in the handbook table of electrochemical equivalents (older atomic masses).
@@ -55,6 +57,17 @@ describe("electrochemical equivalents agree with the handbook", () => {
   it.each(PER_MIL)("%s, valence %i: %f A·h for a square foot, a thousandth of an inch", (metal, valence, printed) => {
     const perFootMil = (9.290304 * 25.4) / umPerHourAtOneADm2({ metal, valence });
     expect(Math.abs(perFootMil / printed - 1)).toBeLessThan(0.05);
+  });
+
+  it("agrees with every metal and valence of the reference table: equivalent, µm per hour and A·h per dm² and µm (Faraday's law, IUPAC masses, CRC densities, worked out apart from this code)", () => {
+    const rows = referenceRows("electrochemical_equivalents.csv");
+    expect(new Set(rows.map((row) => `${row.symbol} ${row.valence}`)).size).toBeGreaterThanOrEqual(19);
+    for (const row of rows) {
+      const deposit = { metal: parseMetal(row.symbol ?? ""), valence: Number(row.valence) };
+      expect(equivalentGPerAh(deposit), row.metal).toBeCloseTo(Number(row.equivalent_g_per_Ah_computed), 4);
+      expect(umPerHourAtOneADm2(deposit), row.metal).toBeCloseTo(Number(row.um_per_h_at_1_A_dm2_100pct), 3);
+      expect(1 / umPerHourAtOneADm2(deposit), row.metal).toBeCloseTo(Number(row.Ah_per_dm2_per_um_100pct), 5);
+    }
   });
 
   it("uses the exact Faraday constant, e × N_A of the SI of 2019", () => {
@@ -118,6 +131,21 @@ describe("worked examples from print", () => {
       1.186,
       2,
     );
+  });
+
+  it("takes 11.31 A·h, 22.6 minutes at 30 A, for 0.002 in of brush nickel on 37.7 in² (Surface Finishing Guidebook 2011-12, 150 A·h per in³)", () => {
+    // The book's factor holds the losses: 8.90 g/cm³ × 16.387 cm³/in³ ÷ 1.095 g/(A·h) is 133.2 A·h per in³ without any.
+    const efficiency = (8.9 * 16.387064) / 1.095 / 150;
+    const areaDm2 = squareInchToDm2(37.7);
+    const plate = plateForThickness({
+      metal: "Ni",
+      areaDm2,
+      thicknessUm: milToUm(2),
+      efficiency,
+      currentDensityADm2: 30 / areaDm2,
+    });
+    expect(plate.ampereHours).toBeCloseTo(11.31, 2);
+    expect(plate.minutes).toBeCloseTo(22.6, 1);
   });
 });
 
@@ -198,6 +226,18 @@ describe("impossible input is refused by name", () => {
     for (const bad of [0, -1, Number.NaN, Infinity, 1e308]) {
       expect(() => plateForThickness({ ...good, [field]: bad })).toThrow(expect.objectContaining({ field }));
     }
+  });
+
+  it("a number so small that nothing can be counted: no time is endless and no answer is NaN", () => {
+    expect(() => plateForThickness({ ...good, efficiency: 1e-310 })).toThrow(
+      expect.objectContaining({ field: "efficiency" }),
+    );
+    expect(() => plateForThickness({ ...good, currentDensityADm2: 5e-324 })).toThrow(
+      expect.objectContaining({ field: "currentDensityADm2" }),
+    );
+    expect(() => thicknessOfMassUm({ metal: "Ni" }, 1, 5e-324)).toThrow(expect.objectContaining({ field: "areaDm2" }));
+    const tiny = plateForThickness({ ...good, areaDm2: 5e-324, thicknessUm: 5e-324 });
+    expect(Object.values(tiny).every(Number.isFinite)).toBe(true);
   });
 
   it("an efficiency above 1 or a valence that nickel does not have", () => {

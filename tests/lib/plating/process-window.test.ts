@@ -19,6 +19,16 @@ describe("a check on the strike bath", () => {
     expect(checkAgainstWindow(seconds, 48).words).toBe("18 s over. The solution is due for replacement.");
   });
 
+  it("says it in °F and A/ft² to a shop that reads those", () => {
+    const density = STRIKE_WINDOWS.bath[3];
+    if (!temperature || !density) throw new Error("the bath has four windows");
+    // 57 °C is 134.6 °F by definition of the two scales; 4 A/dm² is 37.2 A/ft² (1 ft = 3.048 dm, exact).
+    expect(checkAgainstWindow(temperature, fahrenheitToC(138), "us").words).toBe("3.4 °F over.");
+    expect(checkAgainstWindow(temperature, fahrenheitToC(138)).words).toBe("1.89 °C over.");
+    expect(checkAgainstWindow(temperature, fahrenheitToC(127), "us").inside).toBe(true);
+    expect(checkAgainstWindow(density, 4.5, "us").words).toBe("4.65 A/ft² over.");
+  });
+
   it("refuses what is no reading, and a window upside down", () => {
     if (!voltage) throw new Error("the bath has windows");
     expect(() => checkAgainstWindow(voltage, Number.NaN)).toThrow(RangeError);

@@ -37,6 +37,19 @@ describe("how good the chances were", () => {
 });
 
 describe("the reliability diagram", () => {
+  it("of the worked example has one forecast in each of four bins, each wholly true or wholly not, at its own chance", () => {
+    const filled = reliabilityBins(FORECASTS).filter((bin) => bin.cases > 0);
+    expect(filled.map(({ meanProbability, happenedShare }) => [meanProbability, happenedShare])).toEqual([
+      [0.1, 0],
+      [0.3, 0],
+      [0.8, 1],
+      [0.9, 1],
+    ]);
+    // Murphy 1973: with one forecast a bin the score is the mean squared gap of the bins, here 0.0375.
+    const gaps = filled.map((bin) => ((bin.meanProbability ?? NaN) - (bin.happenedShare ?? NaN)) ** 2);
+    expect(gaps.reduce((sum, gap) => sum + gap, 0) / 4).toBeCloseTo(0.0375, 12);
+  });
+
   it("puts every forecast into one bin, 1 into the last, and leaves empty bins without a mean", () => {
     const forecast = fc.record({ probability: fc.double({ min: 0, max: 1, noNaN: true }), happened: fc.boolean() });
     fc.assert(

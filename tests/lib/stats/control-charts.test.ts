@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import { pChart, type Sample } from "@/lib/stats/p-chart";
 import { runsSignals } from "@/lib/stats/runs-rules";
 import { uChart } from "@/lib/stats/u-chart";
+import { referenceRows } from "@/tests/fixtures/reference-rows";
 
 function drawn<Chart extends { enough: boolean }>(chart: Chart) {
   if (!chart.enough) throw new Error("too few samples");
@@ -16,6 +17,13 @@ const NIST_BAD = [
 const NIST: Sample[] = NIST_BAD.map((bad) => ({ inspected: 50, bad }));
 
 describe("the fault rate chart", () => {
+  it("is drawn from the published data, sample for sample (NIST e-Handbook 6.3.3.2)", () => {
+    const rows = referenceRows("nist_pchart.csv");
+    expect(NIST).toEqual(rows.map((row) => ({ inspected: Number(row.n), bad: Number(row.nonconforming) })));
+    const { points } = drawn(pChart(NIST));
+    points.forEach((point, index) => expect(point.rate).toBeCloseTo(Number(rows[index]?.fraction), 2));
+  });
+
   it("has centre .2313 and limits .0524 and .4102, with samples 15 and 23 above (NIST e-Handbook 6.3.3.2)", () => {
     const { centre, points } = drawn(pChart(NIST));
     expect(centre).toBeCloseTo(0.2313, 4);
@@ -84,6 +92,19 @@ describe("the chart of faults per unit", () => {
     expect([points[1]?.lower, points[1]?.upper].map((limit) => limit?.toFixed(4))).toEqual(["0.1579", "2.6886"]);
     expect([points[9]?.lower, points[9]?.upper].map((limit) => limit?.toFixed(4))).toEqual(["0.4110", "2.4356"]);
     expect(points.every((point) => point.outside === "no")).toBe(true);
+  });
+
+  it("has the limits of every one of the ten samples", () => {
+    const rows = referenceRows("uchart_dyed_cloth.csv");
+    const { points } = drawn(
+      uChart(rows.map((row) => ({ faults: Number(row.nonconformities), units: Number(row.units) }))),
+    );
+    expect(points).toHaveLength(10);
+    for (const [index, point] of points.entries()) {
+      expect(point.rate).toBeCloseTo(Number(rows[index]?.u), 4);
+      expect(point.lower).toBeCloseTo(Number(rows[index]?.lcl), 4);
+      expect(point.upper).toBeCloseTo(Number(rows[index]?.ucl), 4);
+    }
   });
 
   it("agrees with the chart of counts for 26 boards samples: 19.85, 6.48 and 33.21, 6 below and 20 above (Montgomery)", () => {

@@ -16,6 +16,10 @@ describe("agreement beyond chance", () => {
       ]),
     );
     expect(result.kappa).toBeCloseTo(0.4, 10);
+    // Standard error by Fleiss, Cohen and Everitt 1969.
+    expect(result.standardError).toBeCloseTo(0.127, 3);
+    expect(result.low).toBeCloseTo(0.1511, 3);
+    expect(result.high).toBeCloseTo(0.6489, 3);
     expect(result.word).toBe("fair");
   });
 
