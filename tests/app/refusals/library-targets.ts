@@ -2,7 +2,7 @@ import { eq } from "drizzle-orm";
 import { libraryRevisions } from "@/db/schema";
 import { getEntry } from "@/db/queries/library-entries";
 import { shelf } from "@/db/seed/library/shelf";
-import { formOfEntry } from "@/lib/library/entry-form";
+import { formOfEntry, type FormValues } from "@/lib/library/entry-form";
 import { LIBRARY_FORMAT } from "@/lib/library/library-file.schema";
 import { saveEntry } from "@/lib/server/library/edit-entry";
 import { TEST_NOW } from "@/tests/fixtures/crew-factory";
@@ -14,8 +14,9 @@ export const EDIT = "app/(shop)/library/edit/actions.ts";
 /** A class's form as the browser would send it. */
 export function entryForm({ db, shop }: Aim, slug: string, head: Record<string, string>): FormData {
   const data = new FormData();
-  const values = formOfEntry("class", { ...getEntry(db, shop.shopId, "class", slug) });
-  for (const [name, value] of Object.entries({ ...values, entry: "class", slug, ...head })) {
+  const words = formOfEntry("class", { ...getEntry(db, shop.shopId, "class", slug) });
+  const values: FormValues = { ...words, entry: "class", slug, ...head };
+  for (const [name, value] of Object.entries(values)) {
     if (typeof value === "string") data.append(name, value);
     else for (const each of value) data.append(`${name}[]`, each);
   }
