@@ -63,7 +63,7 @@ export function StripCost({ strip, money, hrefFor }: StripCostProps) {
       <dl className="strip-cost">
         <CostRow
           label="At the strike"
-          sub="copper only, polish back"
+          sub={`copper only, ${STRIP_METHOD_TITLES[strip.atStrike.method].toLowerCase()}`}
           cost={strip.atStrike}
           maxCents={maxCents}
           money={money}

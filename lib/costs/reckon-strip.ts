@@ -74,7 +74,7 @@ function besideOf(input: ReworkInput): StripReckoning["beside"] {
     return { kind: "goes-on", estimate: estimateRework({ ...input, stageFound: "after-final-plate" }) };
   return {
     kind: "at-strike",
-    estimate: estimateRework({ ...input, stageFound: "at-strike", method: "polish-back" }),
+    estimate: estimateRework({ ...input, stageFound: "at-strike", method: undefined }),
   };
 }
 

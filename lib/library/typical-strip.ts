@@ -60,7 +60,7 @@ export interface TypicalStripRow extends StripCost {
 }
 
 export interface TypicalStrip {
-  atStrike: StripCost;
+  atStrike: StripCost & { method: StripMethod };
   rows: TypicalStripRow[];
   /** Usual cautions of the ways that the figures rest on. */
   cautions: string[];
@@ -91,7 +91,7 @@ export function typicalStrip(
   const unpriced = new Set<string>();
   const rows: TypicalStripRow[] = [];
   const estimates: ReworkEstimate[] = [];
-  let atStrike: StripCost | undefined;
+  let atStrike: TypicalStrip["atStrike"] | undefined;
   for (const plate of TYPICAL_PLATES) {
     const stack = strikeThenPlate(plate.layers);
     const missing = stack.filter(({ metal }) => rates.metalCentsPerG[metal] === undefined);
@@ -99,7 +99,7 @@ export function typicalStrip(
     if (missing.length > 0) continue;
     for (const baseMetal of baseMetals) {
       const compared = compareOne(baseMetal, stack, rates, table);
-      atStrike ??= costOf(compared.atStrike);
+      atStrike ??= { method: compared.atStrike.method, ...costOf(compared.atStrike) };
       estimates.push(compared.atStrike, compared.later);
       addRow(rows, plate.words, baseMetal, compared.later);
     }
