@@ -9,26 +9,13 @@ import {
   libraryFixes,
   librarySources,
 } from "../schema";
+import { causeColumns, cautionColumns, classColumns, fixColumns, sourceColumns } from "./library-columns";
 import { isBaseMetal, listCauseSlugs, listClassSlugs } from "./library";
 
 /** A class with all that belongs to it, or null when the shop's shelf has no such class. */
 export function getLibraryClass(db: Handle, shopId: number, slug: string) {
   const entry = db
-    .select({
-      slug: libraryClasses.slug,
-      title: libraryClasses.title,
-      short: libraryClasses.short,
-      atStrike: libraryClasses.atStrike,
-      inFinalPlate: libraryClasses.inFinalPlate,
-      tells: libraryClasses.tells,
-      checks: libraryClasses.checks,
-      prevention: libraryClasses.prevention,
-      stripNote: libraryClasses.stripNote,
-      otherLikelihood: libraryClasses.otherLikelihood,
-      synonyms: libraryClasses.synonyms,
-      sourceKeys: libraryClasses.sourceKeys,
-      revision: libraryClasses.revision,
-    })
+    .select({ ...classColumns, revision: libraryClasses.revision })
     .from(libraryClasses)
     .where(and(eq(libraryClasses.shopId, shopId), eq(libraryClasses.slug, slug)))
     .get();
@@ -51,17 +38,7 @@ export type ClassPage = NonNullable<ReturnType<typeof getLibraryClass>>;
 function listCausesOf(db: Handle, shopId: number, classSlug: string) {
   const classesOf = listClassSlugs(db, shopId);
   return db
-    .select({
-      id: libraryCauses.id,
-      slug: libraryCauses.slug,
-      title: libraryCauses.title,
-      station: libraryCauses.stationKind,
-      why: libraryCauses.why,
-      proof: libraryCauses.proof,
-      likelihood: libraryCauses.likelihood,
-      baseMetals: libraryCauses.baseMetals,
-      sourceKeys: libraryCauses.sourceKeys,
-    })
+    .select({ id: libraryCauses.id, ...causeColumns })
     .from(libraryClassCauses)
     .innerJoin(
       libraryCauses,
@@ -86,14 +63,7 @@ function listFixesOf(db: Handle, shopId: number, causeSlugs: string[]) {
     .where(and(eq(libraryCauseFixes.shopId, shopId), inArray(libraryCauseFixes.causeSlug, causeSlugs)))
     .all();
   return db
-    .select({
-      slug: libraryFixes.slug,
-      title: libraryFixes.title,
-      steps: libraryFixes.steps,
-      whenNot: libraryFixes.whenNot,
-      materials: libraryFixes.materials,
-      sourceKeys: libraryFixes.sourceKeys,
-    })
+    .select(fixColumns)
     .from(libraryFixes)
     .where(
       and(
@@ -111,12 +81,7 @@ function listFixesOf(db: Handle, shopId: number, causeSlugs: string[]) {
 
 function listCautionsOf(db: Handle, shopId: number, keys: string[]) {
   return db
-    .select({
-      key: libraryCautions.key,
-      level: libraryCautions.level,
-      text: libraryCautions.text,
-      sourceKey: libraryCautions.sourceKey,
-    })
+    .select(cautionColumns)
     .from(libraryCautions)
     .where(and(eq(libraryCautions.shopId, shopId), inArray(libraryCautions.key, keys)))
     .orderBy(asc(libraryCautions.id))
@@ -125,7 +90,7 @@ function listCautionsOf(db: Handle, shopId: number, keys: string[]) {
 
 function listSourcesOf(db: Handle, shopId: number, keys: string[]) {
   return db
-    .select({ key: librarySources.key, kind: librarySources.kind, citation: librarySources.citation })
+    .select(sourceColumns)
     .from(librarySources)
     .where(and(eq(librarySources.shopId, shopId), inArray(librarySources.key, keys)))
     .orderBy(asc(librarySources.id))

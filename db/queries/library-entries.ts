@@ -4,49 +4,8 @@ import type { KnownNames } from "@/lib/library/entry-links";
 import type { LibraryCause, LibraryFix, Shelf } from "@/lib/library/library-entry";
 import type { Handle } from "../open";
 import { libraryCauses, libraryCautions, libraryClasses, libraryFixes, librarySources } from "../schema";
+import { causeColumns, cautionColumns, classColumns, fixColumns, sourceColumns } from "./library-columns";
 import { isBaseMetal, listCauseSlugs, listClassSlugs } from "./library";
-
-const classColumns = {
-  slug: libraryClasses.slug,
-  title: libraryClasses.title,
-  short: libraryClasses.short,
-  atStrike: libraryClasses.atStrike,
-  inFinalPlate: libraryClasses.inFinalPlate,
-  tells: libraryClasses.tells,
-  checks: libraryClasses.checks,
-  prevention: libraryClasses.prevention,
-  stripNote: libraryClasses.stripNote,
-  otherLikelihood: libraryClasses.otherLikelihood,
-  sourceKeys: libraryClasses.sourceKeys,
-  synonyms: libraryClasses.synonyms,
-  position: libraryClasses.position,
-};
-const causeColumns = {
-  slug: libraryCauses.slug,
-  title: libraryCauses.title,
-  station: libraryCauses.stationKind,
-  why: libraryCauses.why,
-  proof: libraryCauses.proof,
-  likelihood: libraryCauses.likelihood,
-  baseMetals: libraryCauses.baseMetals,
-  sourceKeys: libraryCauses.sourceKeys,
-  synonyms: libraryCauses.synonyms,
-};
-const fixColumns = {
-  slug: libraryFixes.slug,
-  title: libraryFixes.title,
-  steps: libraryFixes.steps,
-  whenNot: libraryFixes.whenNot,
-  materials: libraryFixes.materials,
-  sourceKeys: libraryFixes.sourceKeys,
-};
-const cautionColumns = {
-  key: libraryCautions.key,
-  level: libraryCautions.level,
-  text: libraryCautions.text,
-  sourceKey: libraryCautions.sourceKey,
-};
-const sourceColumns = { key: librarySources.key, kind: librarySources.kind, citation: librarySources.citation };
 
 /** The whole library of a shop, each kind in its own order: what is exported, and what a file is set against. */
 export function listShelf(db: Handle, shopId: number): Shelf {
