@@ -1,6 +1,7 @@
 /** Which base metals a title is about, and what job cards call them, so that an alloy number finds the entry for it. */
 import { ALLOY_NAMES } from "@/lib/library/alloy-names";
-import { BASE_METAL_TITLES, type BaseMetal } from "@/lib/cases/case-words";
+import { plainWords } from "@/lib/library/search-words";
+import { BASE_METALS, BASE_METAL_TITLES, type BaseMetal } from "@/lib/cases/case-words";
 
 /**
  * Families within a base metal, the narrower before the wider: who asks for C172 wants beryllium copper's entry, not every
@@ -52,6 +53,22 @@ export function metalsNamedIn(title: string): { names: string[]; weight: number 
   if (families.length > 0) return { names: families.flatMap((family) => family.names), weight: SPEAKS.family[place] };
   const metals = SAID.filter((each) => each.said.test(head)).map((each) => each.metal);
   return { names: metals.flatMap(namesOfMetal), weight: SPEAKS.metal[place] };
+}
+
+const METALS_BY_NUMBER = new Map<string, Set<BaseMetal>>();
+for (const metal of BASE_METALS) {
+  for (const name of ALLOY_NAMES[metal].flatMap(plainWords)) {
+    if (!/\d/.test(name)) continue;
+    METALS_BY_NUMBER.set(name, (METALS_BY_NUMBER.get(name) ?? new Set()).add(metal));
+  }
+}
+
+/**
+ * The base metals whose alloy numbers stand among these words: none where no number does.
+ * @example metalsOfNumbers(["black", "c360"]) // Set { "brass" }
+ */
+export function metalsOfNumbers(words: readonly string[]): ReadonlySet<BaseMetal> {
+  return new Set(words.flatMap((word) => [...(METALS_BY_NUMBER.get(word) ?? [])]));
 }
 
 /** A base metal's title and all that job cards call it. */

@@ -33,6 +33,8 @@ export interface SearchDocument {
   title: string;
   kind: "class" | "cause" | "fix";
   classes: string[];
+  /** The base metals that it is about; none: any. */
+  baseMetals: readonly BaseMetal[];
   /** Title, shop words, and names of the metals it is about: each as said and as indexed. */
   phrases: SearchPhrase[];
   /** Names of the metals that it puts at risk besides. */
@@ -113,6 +115,7 @@ function documentOf(
     title,
     kind,
     classes,
+    baseMetals: texts.metals,
     phrases: [...phrases, ...about.names.map((said) => asPhrase(said, about.weight))],
     metalPhrases: metals.flatMap((metal) => metal.phrases),
     words,

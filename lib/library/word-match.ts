@@ -1,4 +1,6 @@
 /** How well an entry answers what was typed. */
+import type { BaseMetal } from "@/lib/cases/case-words";
+import { metalsOfNumbers } from "@/lib/library/named-metals";
 import type { SearchDocument, SearchPhrase } from "@/lib/library/search-documents";
 import type { PlacedWord } from "@/lib/library/search-words";
 import { strangeTelling, tellingOf, type WordIndex } from "@/lib/library/word-index";
@@ -7,6 +9,8 @@ import { strangeTelling, tellingOf, type WordIndex } from "@/lib/library/word-in
 export interface Asked {
   words: { readings: ReadonlyMap<string, number>; telling: number }[];
   telling: number;
+  /** Base metals whose alloy numbers were typed. */
+  metals: ReadonlySet<BaseMetal>;
   /** 0 to 1: how surely its words were placed in the library, on average. */
   sureness: number;
 }
@@ -40,6 +44,7 @@ export function askedOf(placed: readonly PlacedWord[], index: WordIndex): Asked 
   return {
     words,
     telling: total(words.map((word) => word.telling)),
+    metals: metalsOfNumbers(placed.map((each) => each.typed)),
     sureness: total(surest) / Math.max(1, surest.length),
   };
 }
@@ -58,11 +63,19 @@ export function matchOf(document: SearchDocument, asked: Asked, index: WordIndex
     covered += best * telling;
     if (surest >= RATHER_SURE) held += 1;
   }
-  const cover = asked.telling > 0 ? covered / asked.telling : 0;
+  const share = isOfOtherMetal(document, asked) ? OTHER_METAL_SHARE : 1;
+  const cover = asked.telling > 0 ? (share * covered) / asked.telling : 0;
   const phrase = nearestPhrase(document.phrases, asked, index);
-  if (phrase.likeness > 0) return { held, cover, ...phrase };
+  if (phrase.likeness > 0) return { held, cover, said: phrase.said, likeness: share * phrase.likeness };
   const metal = nearestPhrase(document.metalPhrases, asked, index);
   return { held, cover, likeness: 0, said: metal.likeness > 0 ? metal.said : null };
+}
+
+/** What is left of an entry for other metals than the one whose number was typed: 'C360 black' is not about zinc. */
+const OTHER_METAL_SHARE = 0.6;
+
+function isOfOtherMetal({ baseMetals }: SearchDocument, { metals }: Asked): boolean {
+  return metals.size > 0 && baseMetals.length > 0 && !baseMetals.some((metal) => metals.has(metal));
 }
 
 function nearestPhrase(phrases: readonly SearchPhrase[], asked: Asked, index: WordIndex) {

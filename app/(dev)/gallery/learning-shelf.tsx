@@ -43,7 +43,7 @@ const RECORDS = [fixRecord(triesOf(15, 5)), fixRecord(triesOf(2, 1)), fixRecord(
 export function LearningShelf() {
   return (
     <>
-      <Section title="Side by side">
+      <Section title="The tray of cases">
         {/* Pressing a tick leads to the casebook: the tray lives in its address. */}
         <BesideProvider refs={TRAY.slice(0, 3).map((each) => each.ref)} address={{}}>
           <BesideBox caseRef="CT-2606-0117" />
