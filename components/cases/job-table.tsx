@@ -18,6 +18,8 @@ export interface JobView {
   value?: string;
   /** Where a part of it is weighed. */
   weighHref: string;
+  /** Where taking its layers off is worked out; undefined for those who may not see money. */
+  stripHref?: string;
   /** A part of it weighed unlike what it declares: in words, who and when, and the way to that weighing. */
   misfit?: Misfit;
   /** Where a senior changes it; undefined for the others. */
@@ -38,7 +40,7 @@ const NAMES: readonly Column<JobView>[] = [
 ];
 const FACTS: readonly Column<JobView>[] = [
   { key: "metal", head: "Base metal", cell: (job) => <span className="wrap-anywhere">{job.metal}</span> },
-  { key: "layers", head: "On the strike", cell: (job) => job.layers },
+  { key: "layers", head: "On the strike", cell: (job) => <JobLayers job={job} /> },
   { key: "quantity", head: "Parts", numeric: true, cell: (job) => job.quantity },
 ];
 const VALUE: Column<JobView> = { key: "value", head: "Value of a part", numeric: true, cell: (job) => job.value };
@@ -75,6 +77,16 @@ function JobNumber({ job }: { job: JobView }) {
   return (
     <Link href={job.changeHref} className="wrap-anywhere">
       <strong>{job.number}</strong>
+    </Link>
+  );
+}
+
+/** The layers, and for those who may, the way to what taking them off would cost. */
+function JobLayers({ job }: { job: JobView }) {
+  if (!job.stripHref) return job.layers;
+  return (
+    <Link href={job.stripHref} aria-label={`Work out stripping ${job.layers} off ${job.number}`}>
+      {job.layers}
     </Link>
   );
 }

@@ -129,7 +129,7 @@ function Foot({ for: reader, ratesWords, correction, reckoning }: StripSheetProp
         <b>{reader === "shop" ? "Estimate, not an offer." : "How the work would be done, not an offer."}</b>{" "}
         {reader === "shop" && (
           <>
-            Ranges hold nine times out of ten. Rates of {ratesWords.from} ({ratesWords.source}). Minutes: {correction}.{" "}
+            Ranges hold nine times out of ten. Rates of {ratesWords.from} ({ratesWords.source}). {correction}.{" "}
             {reckoning.assumed.join(" ")}
           </>
         )}

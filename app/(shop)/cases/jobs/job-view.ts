@@ -28,6 +28,7 @@ export function jobView(job: JobRow, member: SignedIn, misfit?: Misfit): JobView
     misfit,
     held: job.heldCases === 0 ? "" : String(job.heldCases),
     ...(can(member, "money.case") ? { value } : {}),
+    ...(can(member, "strip.estimate") ? { stripHref: routes.strip({ job: job.number }) } : {}),
     ...(can(member, "job.change")
       ? { changeHref: routes.jobs({ change: String(job.id), ...(closedAt === null ? {} : { closed: "1" }) }) }
       : {}),

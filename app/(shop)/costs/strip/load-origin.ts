@@ -3,7 +3,7 @@ import type { Db } from "@/db/open";
 import { getCostFacts } from "@/db/queries/case-costs";
 import { getCaseFacts } from "@/db/queries/case-page";
 import type { SignedIn } from "@/db/queries/crew";
-import { getJob, type JobRow } from "@/db/queries/work-orders";
+import { findJobByNumber, getJob, type JobRow } from "@/db/queries/work-orders";
 import { CASE_REF_PATTERN } from "@/lib/cases/case-ref";
 import { strikeThenPlate } from "@/lib/costs/case-stack";
 import { EMPTY_STRIP, type StripTyped } from "@/lib/costs/strip-address";
@@ -59,12 +59,13 @@ function fromCase(db: Db, member: SignedIn, ref: string, now: number): LoadedOri
   return { origin, at: facts.openedAt };
 }
 
-function fromJob(db: Db, member: SignedIn, id: string, now: number): LoadedOrigin {
-  const job = /^\d{1,15}$/.test(id) ? getJob(db, member.shopId, Number(id)) : undefined;
-  if (!job) return { origin: null, fault: "There is no such job in this shop.", at: now };
+function fromJob(db: Db, member: SignedIn, number: string, now: number): LoadedOrigin {
+  const id = findJobByNumber(db, member.shopId, number);
+  const job = id === undefined ? undefined : getJob(db, member.shopId, id);
+  if (!job) return { origin: null, fault: `There is no job “${number}” in this shop.`, at: now };
   const origin: StripOrigin = {
     kind: "job",
-    key: String(job.id),
+    key: job.number,
     href: routes.jobs(),
     words: `${job.number}, ${job.customer}`,
     ...jobWords(job),
