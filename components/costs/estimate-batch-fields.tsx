@@ -28,7 +28,7 @@ export function StripBatchFields({ currencySign, filledFrom, ...editing }: Strip
         <Field
           label="Part value, each"
           name="value"
-          placeholder="Not known"
+          placeholder="none"
           unit={currencySign}
           inputMode="decimal"
           maxLength={14}
