@@ -90,6 +90,8 @@ for (const { name, viewport } of SIZES) {
     await test.step("the address holds all of it: opened again it says the same", async () => {
       await expect(page).toHaveURL(/metal3=Au&thickness3=0\.6&to3=1\.2/);
       await expect(page).toHaveURL(/shape=plate/);
+      // The address follows the typing a moment later: the mended width must be in it before it is opened again.
+      await expect(page).toHaveURL(/[?&]width=10(&|$)/);
       const said = await answer(page).innerText();
       await page.reload();
       await expect(answer(page)).toHaveText(said);
