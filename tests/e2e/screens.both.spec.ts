@@ -32,8 +32,10 @@ async function findRefs(browser: Browser): Promise<Refs> {
 const pathWith = (path: string, refs: Refs) =>
   path.replace(/\{(held|card|closed)\}/g, (_, state: keyof Refs) => refs[state]);
 
-async function expectClean(page: Page, where: string): Promise<void> {
-  const { violations } = await new AxeBuilder({ page }).analyze();
+/** On night shift only colours differ: only what rests on colour is looked at again. */
+async function expectClean(page: Page, where: string, isNight: boolean): Promise<void> {
+  const axe = new AxeBuilder({ page });
+  const { violations } = await (isNight ? axe.withRules(["color-contrast"]) : axe).analyze();
   const found = violations.map((each) => `${where}: ${each.id}: ${each.nodes[0]?.html.slice(0, 160)}`);
   expect(found).toEqual([]);
 }
@@ -61,7 +63,7 @@ for (const person of people) {
           () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
         );
         expect(sideways, `${path} scrolls sideways`).toBeLessThanOrEqual(0);
-        await expectClean(page, `${path} (${colorScheme})`);
+        await expectClean(page, `${path} (${colorScheme})`, colorScheme === "dark");
       }
       await context.close();
     }
