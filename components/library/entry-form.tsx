@@ -103,6 +103,7 @@ export function EntryForm({ id, entry, slug, baseRevision, values, choices, acti
         <input type="hidden" name="slug" value={slug ?? ""} />
         <input type="hidden" name="baseRevision" value={start.baseRevision} />
         <div className="form" key={start.version}>
+          {/* A row that was added or taken out stands in the form only once React has drawn it. */}
           <Fields values={start.values} errors={errors} choices={choices} slug={slug} onRows={() => setTimeout(read)} />
           <EntrySourceFields values={start.values} errors={errors} sources={choices.sources} />
           <Field
